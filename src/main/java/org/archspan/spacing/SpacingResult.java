@@ -1,0 +1,40 @@
+package org.archspan.spacing;
+
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.archspan.equilibrium.Equilibrium;
+import org.archspan.stability.GrowthCurve;
+
+/**
+ * The answer of the main job, CGS.
+ *
+ * @param equilibrium             base state
+ * @param forceBalanceResidual    greatest |dP/dz + rho g| / (rho g), dimensionless
+ * @param branches                one entry for each unstable branch, fastest first; empty when stable
+ * @param fastest                 the fastest of all: the first branch, or the halo continuum edge
+ * @param spacing                 index into {@code branches} of the fastest that gathers the disk's own gas; empty when
+ *                                none does
+ * @param acrossLimit             limit of short waves across the field
+ * @param longestStableWavelength shorter waves along the field than this are stable, cm; absent when all are
+ * @param complex                 what one spacing gathers; empty when stable
+ * @param curves                  growth against wavelength, for the branches reported
+ * @param certificate             proof that nothing faster was missed
+ * @param gatheringHeight         greatest centroid height that counts as gathering the disk's own gas, cm
+ * @param warnings                what a reader of the result must know, one sentence each
+ */
+public record SpacingResult(Equilibrium equilibrium, double forceBalanceResidual, List<BranchPeak> branches,
+    Optional<BranchPeak> fastest, Optional<Integer> spacing, AcrossLimit acrossLimit,
+    OptionalDouble longestStableWavelength, Optional<CloudComplex> complex, List<GrowthCurve> curves,
+    Certificate certificate, double gatheringHeight, List<String> warnings) {
+
+  /** Whether no wave grows. */
+  public boolean stable() {
+    return fastest.isEmpty();
+  }
+
+  /** The peak that sets the spacing: the fastest that gathers the disk's own gas, otherwise the fastest of all. */
+  public Optional<BranchPeak> spacingPeak() {
+    return spacing.map(branches::get).or(() -> fastest);
+  }
+}

@@ -1,0 +1,27 @@
+package org.archspan.stability;
+
+import org.archspan.boundary.Parity;
+
+/**
+ * One mode on the solver's nodes. The displacement is {@code (-i X, -i Y, Z) exp(i kx x + i ky y + s t)}, normalised so
+ * that the mass-weighted root-mean-square displacement within one scale height is one scale height.
+ *
+ * @param parity          symmetry about the midplane
+ * @param order           mode order, 0 for the fastest
+ * @param wavenumber      kx along the field, cm^-1
+ * @param crossWavenumber ky across the field, cm^-1
+ * @param growthRate      s, s^-1
+ * @param height          nodes z, cm, ascending from bottom to top, shape [n]
+ * @param along           X, cm, shape [n]
+ * @param across          Y, cm, shape [n]
+ * @param vertical        Z, cm, shape [n]
+ * @param divergence      D = kx X + ky Y + Z', dimensionless, shape [n]
+ * @param densityContrast rho_1/rho = -(Z dln(rho)/dz + D), dimensionless, amplitude of the cosine along x, shape [n]
+ * @param kineticEnergy   rho (X^2 + Y^2 + Z^2) over its maximum, dimensionless, shape [n]
+ * @param centroidHeight  height of the kinetic-energy centroid, cm
+ * @param columnContrast  amplitude of delta Sigma / Sigma, dimensionless
+ */
+public record EigenMode(Parity parity, int order, double wavenumber, double crossWavenumber, double growthRate,
+    double[] height, double[] along, double[] across, double[] vertical, double[] divergence,
+    double[] densityContrast, double[] kineticEnergy, double centroidHeight, double columnContrast) {
+}
