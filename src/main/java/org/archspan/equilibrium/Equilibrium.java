@@ -1,7 +1,9 @@
 package org.archspan.equilibrium;
 
+import org.archspan.boundary.TopBoundary;
+
 /**
- * A force-free-of-motion base state: gas, field and cosmic rays in balance with gravity. Immutable; safe to share
+ * A static base state: gas, field and cosmic rays in balance with gravity. Immutable; safe to share
  * among threads.
  */
 public interface Equilibrium {
@@ -20,6 +22,9 @@ public interface Equilibrium {
 
   /** Whether the lower end is the midplane of a disk rather than a rigid floor. */
   boolean aboutMidplane();
+
+  /** What bounds the gas at the top. */
+  TopBoundary topBoundary();
 
   /** Total surface density, g cm^-2: both sides of a disk, everything above a floor. */
   double surfaceDensity();

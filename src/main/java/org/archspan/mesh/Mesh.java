@@ -1,0 +1,44 @@
+package org.archspan.mesh;
+
+/**
+ * A row of spectral elements over an interval of height, all of one degree.
+ *
+ * @param edges  ends of the elements, ascending, shape [elements + 1]
+ * @param degree polynomial degree of each element
+ */
+public record Mesh(double[] edges, int degree) {
+  /** Number of elements. */
+  public int elements() {
+    return edges.length - 1;
+  }
+
+  /** The reference element. */
+  public ReferenceElement reference() {
+    return ReferenceElement.ofDegree(degree);
+  }
+
+  /** Length of element e, in the unit of the edges. */
+  public double length(int e) {
+    return edges[e + 1] - edges[e];
+  }
+
+  /** Nodes of all elements, the shared ends repeated, shape [elements * (degree + 1)]. */
+  public double[] nodes() {
+    double[] reference = reference().nodes();
+    int n = degree + 1;
+    double[] nodes = new double[elements() * n];
+    for (int e = 0; e < elements(); e++) {
+      double half = 0.5 * length(e);
+      for (int i = 0; i < n; i++) {
+        nodes[e * n + i] = edges[e] + half * (1.0 + reference[i]);
+      }
+      nodes[e * n + degree] = edges[e + 1];
+    }
+    return nodes;
+  }
+
+  /** The same elements with another degree. */
+  public Mesh withDegree(int newDegree) {
+    return new Mesh(edges, newDegree);
+  }
+}

@@ -1,0 +1,127 @@
+package org.archspan.mesh;
+
+import org.archspan.linalg.LegendreBasis;
+
+/**
+ * The interval [-1, 1] with Gauss-Lobatto-Legendre nodes, which serve both as interpolation and as quadrature points.
+ * Immutable; arrays are shared and must not be written.
+ */
+public final class ReferenceElement {
+  /** Lowest degree offered. */
+  public static final int LOWEST_DEGREE = 2;
+
+  /** Highest degree offered. */
+  public static final int HIGHEST_DEGREE = 24;
+
+  private static final ReferenceElement[] ALL = all();
+
+  private final int degree;
+  private final double[] nodes;
+  private final double[] weights;
+  private final double[] derivative;
+  private final int[] pairFirst;
+  private final int[] pairSecond;
+  private final double[] slopeProducts;
+
+  private ReferenceElement(int degree) {
+    this.degree = degree;
+    this.nodes = LegendreBasis.lobattoNodes(degree);
+    this.weights = LegendreBasis.lobattoWeights(nodes);
+    this.derivative = LegendreBasis.lobattoDerivative(nodes);
+    int[] order = eliminationOrder(degree);
+    int n = degree + 1;
+    this.pairFirst = new int[n * (n + 1) / 2];
+    this.pairSecond = new int[pairFirst.length];
+    int at = 0;
+    for (int i = 0; i < n; i++) {
+      for (int j = i; j < n; j++) {
+        pairFirst[at] = order[i];
+        pairSecond[at++] = order[j];
+      }
+    }
+    this.slopeProducts = products();
+  }
+
+  private static ReferenceElement[] all() {
+    ReferenceElement[] elements = new ReferenceElement[HIGHEST_DEGREE + 1];
+    for (int degree = LOWEST_DEGREE; degree <= HIGHEST_DEGREE; degree++) {
+      elements[degree] = new ReferenceElement(degree);
+    }
+    return elements;
+  }
+
+  /**
+   * The element of a degree.
+   *
+   * @param degree between {@link #LOWEST_DEGREE} and {@link #HIGHEST_DEGREE}
+   * @throws IllegalArgumentException outside that range
+   */
+  public static ReferenceElement ofDegree(int degree) {
+    if (degree < LOWEST_DEGREE || degree > HIGHEST_DEGREE) {
+      throw new IllegalArgumentException("degree must lie between " + LOWEST_DEGREE + " and " + HIGHEST_DEGREE
+          + ", found " + degree);
+    }
+    return ALL[degree];
+  }
+
+  /** Polynomial degree p. */
+  public int degree() {
+    return degree;
+  }
+
+  /** Nodes on [-1, 1], ascending, shape [p+1]. */
+  public double[] nodes() {
+    return nodes;
+  }
+
+  /** Quadrature weights, dimensionless, shape [p+1]. */
+  public double[] weights() {
+    return weights;
+  }
+
+  /** Differentiation matrix, row-major, shape [p+1][p+1]. */
+  public double[] derivative() {
+    return derivative;
+  }
+
+  /**
+   * The order in which an element's nodes are eliminated: the inner ones first, then the left end, then the right end.
+   * Pairs (i, j >= i) in this order, row by row, are the packed form of an element matrix.
+   */
+  static int[] eliminationOrder(int degree) {
+    int[] order = new int[degree + 1];
+    for (int i = 0; i < degree - 1; i++) {
+      order[i] = i + 1;
+    }
+    order[degree - 1] = 0;
+    order[degree] = degree;
+    return order;
+  }
+
+  /** First node of each packed pair, in elimination order; shape [(p+1)(p+2)/2]. */
+  public int[] pairFirst() {
+    return pairFirst;
+  }
+
+  /** Second node of each packed pair; shape [(p+1)(p+2)/2]. */
+  public int[] pairSecond() {
+    return pairSecond;
+  }
+
+  /** Products of slopes {@code D_qi D_qj} for each node q over the packed pairs, shape [p+1][(p+1)(p+2)/2]. */
+  public double[] slopeProducts() {
+    return slopeProducts;
+  }
+
+  private double[] products() {
+    int n = degree + 1;
+    int pairs = pairFirst.length;
+    double[] products = new double[n * pairs];
+    for (int q = 0; q < n; q++) {
+      for (int pair = 0; pair < pairs; pair++) {
+        products[q * pairs + pair] = derivative[q * n + pairFirst[pair]] * derivative[q * n + pairSecond[pair]];
+      }
+    }
+    return products;
+  }
+}
