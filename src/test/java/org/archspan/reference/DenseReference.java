@@ -1,0 +1,240 @@
+package org.archspan.reference;
+
+import dev.ludovic.netlib.lapack.JavaLAPACK;
+import java.util.Arrays;
+import java.util.stream.IntStream;
+import org.archspan.boundary.Parity;
+import org.archspan.boundary.TopBoundary;
+import org.archspan.closure.CosmicRayClosure;
+import org.archspan.closure.GasClosure;
+import org.archspan.equilibrium.Equilibrium;
+import org.archspan.equilibrium.GasState;
+import org.netlib.util.intW;
+
+/**
+ * The full problem in (X, Y, Z), nothing eliminated, by collocation on one set of Chebyshev points and LAPACK's dense
+ * generalised eigenvalues (dggev). Slow, O((5 n)^3), and obvious: the twin of the condensed solver.
+ *
+ * <p>Variables carry sqrt(rho). With {@code d = kx X + ky Y + Z' - (L/2) Z}, {@code L = d ln rho/dz},
+ * {@code dp = d - kx X}, {@code q = G d - g Z} and {@code P = q + 2 m dp}, the equations of motion are
+ * {@code s^2 X = -kx q}, {@code s^2 Y = -ky P - 2 m kx^2 Y},
+ * {@code s^2 Z = g d + g L Z - 2 m kx^2 Z + P' + (L/2) P}; m = p_B/rho, G = resistance to compression over rho.
+ *
+ * <p>Cosmic rays of finite diffusivity make the problem quadratic in s; it is then written in first order with the
+ * velocities and {@code w = s/(s + kappa kx^2) d}, that is {@code s w = d(velocity) - kappa kx^2 w}.
+ */
+public final class DenseReference {
+  private final int points;
+  private final Parity parity;
+  private final TopBoundary topBoundary;
+  private final double length;
+  private final double speed;
+  private final double diffusivity;
+  private final double[][] derivative;
+  private final double[] g;
+  private final double[] slope;
+  private final double[] tension;
+  private final double[] stiffness;
+  private final double[] cosmic;
+
+  /**
+   * Tabulates the state on the points.
+   *
+   * @param points number of Chebyshev points, at least 4
+   */
+  public DenseReference(Equilibrium equilibrium, GasClosure gas, CosmicRayClosure cosmicRays, Parity parity,
+      TopBoundary topBoundary, int points) {
+    if (topBoundary == TopBoundary.OPEN) {
+      throw new IllegalArgumentException("an open top depends on s and is no linear eigenvalue problem: LID or FREE");
+    }
+    this.points = points;
+    this.parity = parity;
+    this.topBoundary = topBoundary;
+    length = equilibrium.scaleHeight();
+    speed = equilibrium.dispersion();
+    diffusivity = cosmicRays.diffusivity() / (speed * length);
+    double bottom = equilibrium.bottom() / length;
+    double height = equilibrium.top() / length - bottom;
+    derivative = Chebyshev.derivative(points, height);
+    GasState[] states = Arrays.stream(Chebyshev.points(points, bottom, height))
+        .mapToObj(z -> equilibrium.at(z * length)).toArray(GasState[]::new);
+    double unit = speed * speed;
+    g = tabulate(states, s -> s.gravity() * length / unit);
+    slope = tabulate(states, s -> s.logDensityGradient() * length);
+    tension = tabulate(states, s -> 2.0 * s.magneticPerMass() / unit);
+    cosmic = tabulate(states, s -> cosmicRays.adiabaticIndex() * s.cosmicRayPerMass() / unit);
+    double answer = cosmicRays.diffusivity() == 0.0 ? cosmicRays.adiabaticIndex() : 0.0;
+    stiffness = tabulate(states, s -> (gas.adiabaticIndex() * s.gasPerMass() + answer * s.cosmicRayPerMass()) / unit);
+  }
+
+  private static double[] tabulate(GasState[] states, java.util.function.ToDoubleFunction<GasState> quantity) {
+    return Arrays.stream(states).mapToDouble(quantity).toArray();
+  }
+
+  /**
+   * All growing modes, fastest first, s^-1.
+   *
+   * @param kx along the field, cm^-1, positive
+   * @param ky across the field, cm^-1
+   */
+  public double[] growthRates(double kx, double ky) {
+    boolean leaking = diffusivity > 0.0 && !Double.isInfinite(diffusivity) && max(cosmic) > 0.0;
+    double x = kx * length;
+    double y = ky * length;
+    double[] values = leaking ? firstOrder(x, y).positive() : secondOrder(x, y).positive();
+    return Arrays.stream(values).map(v -> (leaking ? v : Math.sqrt(v)) * speed / length).toArray();
+  }
+
+  /** Eigenvalue s^2, blocks X, Y, Z. */
+  private Pencil secondOrder(double kx, double ky) {
+    Pencil pencil = new Pencil(3 * points);
+    equations(pencil, kx, ky, 0, false);
+    identity(pencil, 0, 0, 3 * points);
+    boundaries(pencil, kx, ky, false);
+    return pencil;
+  }
+
+  /** Eigenvalue s, blocks of X, Y, Z, then their velocities, then w. */
+  private Pencil firstOrder(double kx, double ky) {
+    int n = points;
+    Pencil pencil = new Pencil(7 * n);
+    identity(pencil, 0, 0, 7 * n);
+    for (int i = 0; i < 3 * n; i++) {
+      pencil.addLeft(i, 3 * n + i, 1.0);
+    }
+    equations(pencil, kx, ky, 3 * n, true);
+    double leak = diffusivity * kx * kx;
+    for (int i = 0; i < n; i++) {
+      divergence(pencil, 6 * n + i, i, 1.0, kx, ky, 3 * n);
+      pencil.addLeft(6 * n + i, 6 * n + i, -leak);
+    }
+    boundaries(pencil, kx, ky, true);
+    return pencil;
+  }
+
+  /** Rows {@code s^2 (X, Y, Z) = ...} from this row on. */
+  private void equations(Pencil pencil, double kx, double ky, int firstRow, boolean leaking) {
+    int n = points;
+    for (int i = 0; i < n; i++) {
+      gasPressure(pencil, firstRow + i, i, -kx, kx, ky, leaking);
+      totalPressure(pencil, firstRow + n + i, i, -ky, kx, ky, leaking);
+      pencil.addLeft(firstRow + n + i, n + i, -tension[i] * kx * kx);
+      int row = firstRow + 2 * n + i;
+      divergence(pencil, row, i, g[i], kx, ky, 0);
+      pencil.addLeft(row, 2 * n + i, g[i] * slope[i] - tension[i] * kx * kx);
+      for (int j = 0; j < n; j++) {
+        totalPressure(pencil, row, j, derivative[i][j] + (i == j ? 0.5 * slope[i] : 0.0), kx, ky, leaking);
+      }
+    }
+  }
+
+  /** Adds {@code factor d} at node i, from displacements or velocities that start at this column. */
+  private void divergence(Pencil pencil, int row, int i, double factor, double kx, double ky, int firstColumn) {
+    pencil.addLeft(row, firstColumn + i, factor * kx);
+    acrossDivergence(pencil, row, i, factor, ky, firstColumn);
+  }
+
+  private void acrossDivergence(Pencil pencil, int row, int i, double factor, double ky, int firstColumn) {
+    int vertical = firstColumn + 2 * points;
+    pencil.addLeft(row, firstColumn + points + i, factor * ky);
+    pencil.addLeft(row, vertical + i, -factor * 0.5 * slope[i]);
+    for (int j = 0; j < points; j++) {
+      pencil.addLeft(row, vertical + j, factor * derivative[i][j]);
+    }
+  }
+
+  /** Adds {@code factor q} at node i. */
+  private void gasPressure(Pencil pencil, int row, int i, double factor, double kx, double ky, boolean leaking) {
+    divergence(pencil, row, i, factor * stiffness[i], kx, ky, 0);
+    pencil.addLeft(row, 2 * points + i, -factor * g[i]);
+    if (leaking) {
+      pencil.addLeft(row, 6 * points + i, factor * cosmic[i]);
+    }
+  }
+
+  /** Adds {@code factor P} at node i. */
+  private void totalPressure(Pencil pencil, int row, int i, double factor, double kx, double ky, boolean leaking) {
+    if (factor != 0.0) {
+      gasPressure(pencil, row, i, factor, kx, ky, leaking);
+      acrossDivergence(pencil, row, i, factor * tension[i], ky, 0);
+    }
+  }
+
+  private void boundaries(Pencil pencil, double kx, double ky, boolean leaking) {
+    end(pencil, 0, parity != Parity.FLEXING, kx, ky, leaking);
+    end(pencil, points - 1, topBoundary == TopBoundary.LID, kx, ky, leaking);
+  }
+
+  /** At an end Z = 0, or the Lagrangian change of the total pressure, {@code P + g Z}, vanishes. */
+  private void end(Pencil pencil, int node, boolean rigid, double kx, double ky, boolean leaking) {
+    int z = 2 * points + node;
+    int row = leaking ? z + 3 * points : z;
+    pencil.clearRow(row);
+    if (rigid) {
+      pencil.addLeft(row, row, 1.0);
+    } else {
+      totalPressure(pencil, row, node, 1.0, kx, ky, leaking);
+      pencil.addLeft(row, z, g[node]);
+    }
+    if (rigid && leaking) {
+      pencil.clearRow(z);
+      pencil.addLeft(z, z, 1.0);
+    }
+  }
+
+  private static void identity(Pencil pencil, int row, int column, int size) {
+    IntStream.range(0, size).forEach(i -> pencil.addRight(row + i, column + i, 1.0));
+  }
+
+  private static double max(double[] values) {
+    return Arrays.stream(values).max().orElse(0.0);
+  }
+
+  /** {@code A u = lambda B u}, both dense and column by column. */
+  private static final class Pencil {
+    private final int size;
+    private final double[] left;
+    private final double[] right;
+
+    Pencil(int size) {
+      this.size = size;
+      left = new double[size * size];
+      right = new double[size * size];
+    }
+
+    void addLeft(int row, int column, double value) {
+      left[row + size * column] += value;
+    }
+
+    void addRight(int row, int column, double value) {
+      right[row + size * column] += value;
+    }
+
+    void clearRow(int row) {
+      for (int column = 0; column < size; column++) {
+        left[row + size * column] = 0.0;
+        right[row + size * column] = 0.0;
+      }
+    }
+
+    /** Real positive eigenvalues, descending; overwrites the matrices. */
+    double[] positive() {
+      double[] real = new double[size];
+      double[] imaginary = new double[size];
+      double[] denominator = new double[size];
+      double[] work = new double[16 * size];
+      intW info = new intW(0);
+      JavaLAPACK.getInstance().dggev("N", "N", size, left, size, right, size, real, imaginary, denominator,
+          new double[1], 1, new double[1], 1, work, work.length, info);
+      if (info.val != 0) {
+        throw new IllegalStateException("dggev did not converge: info " + info.val);
+      }
+      // 1e-9: eigenvalues are of order one in these units and carry rounding of about 1e-12; infinite ones
+      // (boundary rows) have a vanishing denominator
+      double[] ascending = IntStream.range(0, size)
+          .filter(i -> Math.abs(denominator[i]) > 1e-9 * Math.abs(real[i]) && imaginary[i] == 0.0)
+          .mapToDouble(i -> real[i] / denominator[i]).filter(v -> v > 1e-9).sorted().toArray();
+      return IntStream.range(0, ascending.length).mapToDouble(i -> ascending[ascending.length - 1 - i]).toArray();
+    }
+  }
+}
