@@ -21,6 +21,8 @@ public final class ReferenceElement {
   private final double[] derivative;
   private final int[] pairFirst;
   private final int[] pairSecond;
+  private final double[] pairSlope;
+  private final double[] pairSlopeReversed;
   private final double[] slopeProducts;
 
   private ReferenceElement(int degree) {
@@ -32,11 +34,15 @@ public final class ReferenceElement {
     int n = degree + 1;
     this.pairFirst = new int[n * (n + 1) / 2];
     this.pairSecond = new int[pairFirst.length];
+    this.pairSlope = new double[pairFirst.length];
+    this.pairSlopeReversed = new double[pairFirst.length];
     int at = 0;
     for (int i = 0; i < n; i++) {
       for (int j = i; j < n; j++) {
         pairFirst[at] = order[i];
-        pairSecond[at++] = order[j];
+        pairSecond[at] = order[j];
+        pairSlope[at] = derivative[order[i] * n + order[j]];
+        pairSlopeReversed[at++] = derivative[order[j] * n + order[i]];
       }
     }
     this.slopeProducts = products();
@@ -106,6 +112,16 @@ public final class ReferenceElement {
   /** Second node of each packed pair; shape [(p+1)(p+2)/2]. */
   public int[] pairSecond() {
     return pairSecond;
+  }
+
+  /** Slope {@code D_ij} of each packed pair (i, j), shape [(p+1)(p+2)/2]. */
+  public double[] pairSlope() {
+    return pairSlope;
+  }
+
+  /** Slope {@code D_ji} of each packed pair (i, j), shape [(p+1)(p+2)/2]. */
+  public double[] pairSlopeReversed() {
+    return pairSlopeReversed;
   }
 
   /** Products of slopes {@code D_qi D_qj} for each node q over the packed pairs, shape [p+1][(p+1)(p+2)/2]. */

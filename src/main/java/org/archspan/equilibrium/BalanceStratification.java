@@ -1,0 +1,130 @@
+package org.archspan.equilibrium;
+
+import java.util.Arrays;
+import java.util.stream.DoubleStream;
+import org.archspan.mesh.ReferenceElement;
+
+/**
+ * A prescribed density of isothermal gas in a given gravity; the field is what the balance leaves over:
+ * {@code p_B = Integral_z^infinity rho g dz - (1 + beta) c^2 rho}.
+ *
+ * <p>The total pressure per mass is integrated downwards once, with positive terms only, and interpolated on panels.
+ */
+final class BalanceStratification implements Stratification {
+  private static final ReferenceElement RULE = ReferenceElement.ofDegree(16);
+  private static final double[] BARYCENTRIC = barycentric();
+
+  private final StratumSum strata;
+  private final ExternalGravity gravity;
+  private final double[] edges;
+  private final double[] pressurePerMass;
+  private final double dispersionSquared;
+  private final double cosmicRayRatio;
+
+  private BalanceStratification(StratumSum strata, ExternalGravity gravity, double[] edges, double[] pressurePerMass,
+      double dispersionSquared, double cosmicRayRatio) {
+    this.strata = strata;
+    this.gravity = gravity;
+    this.edges = edges;
+    this.pressurePerMass = pressurePerMass;
+    this.dispersionSquared = dispersionSquared;
+    this.cosmicRayRatio = cosmicRayRatio;
+  }
+
+  /** Integrates the total pressure; the split into gas, field and cosmic rays follows by {@link #split}. */
+  static BalanceStratification integrate(StratumSum strata, ExternalGravity gravity, double bottom) {
+    HeightPanels panels = HeightPanels.of(strata::logDensity, bottom, landmarks(strata, gravity), gravity.kinks(),
+        gravity.greatestHeight());
+    double[] edges = panels.edges();
+    int n = RULE.degree() + 1;
+    double[] perMass = new double[(edges.length - 1) * n];
+    double far = edges[edges.length - 1];
+    double above = gravity.acceleration(far) / -strata.logDensityGradient(far);
+    for (int panel = edges.length - 2; panel >= 0; panel--) {
+      double end = edges[panel + 1];
+      double endDensity = strata.logDensity(end);
+      for (int i = n - 1; i >= 0; i--) {
+        double z = node(edges, panel, i);
+        double here = strata.logDensity(z);
+        perMass[panel * n + i] = above * Math.exp(endDensity - here)
+            + HeightPanels.integrate(y -> Math.exp(strata.logDensity(y) - here) * gravity.acceleration(y), z, end);
+      }
+      above = perMass[panel * n];
+    }
+    return new BalanceStratification(strata, gravity, edges, perMass, 0.0, 0.0);
+  }
+
+  /** The same total pressure with an isothermal gas of c^2 (cm^2 s^-2) and cosmic rays in the ratio beta. */
+  BalanceStratification split(double newDispersionSquared, double newCosmicRayRatio) {
+    return new BalanceStratification(strata, gravity, edges, pressurePerMass, newDispersionSquared,
+        newCosmicRayRatio);
+  }
+
+  private static double node(double[] edges, int panel, int i) {
+    return edges[panel] + 0.5 * (edges[panel + 1] - edges[panel]) * (1.0 + RULE.nodes()[i]);
+  }
+
+  private static double[] barycentric() {
+    double[] nodes = RULE.nodes();
+    double[] weights = new double[nodes.length];
+    for (int i = 0; i < nodes.length; i++) {
+      weights[i] = (i % 2 == 0 ? 1.0 : -1.0) * Math.sqrt(RULE.weights()[i]);
+    }
+    return weights;
+  }
+
+  /** Total pressure over density, cm^2 s^-2. */
+  double totalPerMass(double height) {
+    int last = edges.length - 1;
+    if (height >= edges[last]) {
+      return gravity.acceleration(height) / -strata.logDensityGradient(height);
+    }
+    int found = Arrays.binarySearch(edges, height);
+    int panel = found >= 0 ? found : -found - 2;
+    int n = BARYCENTRIC.length;
+    double above = 0.0;
+    double below = 0.0;
+    for (int i = 0; i < n; i++) {
+      double distance = height - node(edges, panel, i);
+      if (distance == 0.0) {
+        return pressurePerMass[panel * n + i];
+      }
+      double weight = BARYCENTRIC[i] / distance;
+      above += weight * pressurePerMass[panel * n + i];
+      below += weight;
+    }
+    return above / below;
+  }
+
+  @Override
+  public GasState at(double height) {
+    double magnetic = totalPerMass(height) - (1.0 + cosmicRayRatio) * dispersionSquared;
+    return new GasState(strata.logDensity(height), strata.logDensityGradient(height), gravity.acceleration(height),
+        dispersionSquared, magnetic, cosmicRayRatio * dispersionSquared);
+  }
+
+  @Override
+  public double logDensity(double height) {
+    return strata.logDensity(height);
+  }
+
+  @Override
+  public double[] landmarks() {
+    return landmarks(strata, gravity);
+  }
+
+  private static double[] landmarks(StratumSum strata, ExternalGravity gravity) {
+    return DoubleStream.concat(Arrays.stream(strata.landmarks()), Arrays.stream(gravity.landmarks()))
+        .sorted().distinct().toArray();
+  }
+
+  @Override
+  public double[] kinks() {
+    return gravity.kinks();
+  }
+
+  @Override
+  public double greatestHeight() {
+    return gravity.greatestHeight();
+  }
+}

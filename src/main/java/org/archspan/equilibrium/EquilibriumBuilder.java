@@ -1,0 +1,123 @@
+package org.archspan.equilibrium;
+
+import java.util.Locale;
+import org.archspan.disk.CosmicRays;
+import org.archspan.disk.Disk;
+import org.archspan.disk.Gas;
+import org.archspan.disk.GasComponent;
+import org.archspan.disk.MagneticField;
+import org.archspan.disk.RefusedModelException;
+
+/** Builds the base state of a disk. */
+public final class EquilibriumBuilder {
+  private EquilibriumBuilder() {
+  }
+
+  /**
+   * The equilibrium of a disk over its domain.
+   *
+   * @param disk      the physical model
+   * @param tolerance relative accuracy asked of growth rates, dimensionless: decides where an open top may stand
+   * @throws RefusedModelException when no such state exists, or the domain does not suit it
+   */
+  public static Equilibrium build(Disk disk, double tolerance) {
+    ExternalGravity gravity = new ExternalGravity(disk.gravity());
+    double bottom = bottom(disk);
+    Stratification stratification = stratification(disk, gravity, bottom);
+    double sides = disk.domain().aboutMidplane() ? 2.0 : 1.0;
+    double surfaceDensity = sides * columnAbove(stratification, bottom);
+    double scaleHeight = surfaceDensity / (sides * Math.exp(stratification.logDensity(bottom)));
+    DomainEnd end = DomainEnd.of(disk.domain(), stratification, bottom, scaleHeight, tolerance);
+    if (stratification instanceof BalanceStratification balance) {
+      FieldSupport.require(balance, bottom, end.top());
+    }
+    return new BoundedEquilibrium(stratification, bottom, end.top(), disk.domain().aboutMidplane(), end.boundary(),
+        surfaceDensity);
+  }
+
+  private static double bottom(Disk disk) {
+    if (disk.domain().aboutMidplane()) {
+      return 0.0;
+    }
+    if (disk.domain().floor().orElseThrow().inScaleHeights()) {
+      throw new RefusedModelException("the floor (domain.bottom) cannot be given in scale heights, which are counted"
+          + " from the density on it; give it as a length");
+    }
+    double bottom = disk.domain().floor().orElseThrow().value();
+    if (bottom < 0.0) {
+      throw new RefusedModelException("the floor (domain.bottom) must not lie below the midplane");
+    }
+    return bottom;
+  }
+
+  private static Stratification stratification(Disk disk, ExternalGravity gravity, double bottom) {
+    if (disk.gas() instanceof Gas.Stratified stratified) {
+      return BalanceSplit.build(disk, stratified, gravity, bottom);
+    }
+    double[] dispersionSquared = dispersionSquared(disk.gas());
+    if (disk.gas() instanceof Gas.Isothermal gas && gas.surfaceDensity().isPresent()) {
+      double density = MidplaneDensity.forSurfaceDensity(gas.surfaceDensity().getAsDouble(),
+          rho -> isothermal(disk, gravity, bottom, new double[] {rho}, dispersionSquared), bottom,
+          disk.domain().aboutMidplane(), dispersionSquared[0]);
+      return isothermal(disk, gravity, bottom, new double[] {density}, dispersionSquared);
+    }
+    return isothermal(disk, gravity, bottom, densities(disk.gas()), dispersionSquared);
+  }
+
+  private static double[] dispersionSquared(Gas gas) {
+    if (gas instanceof Gas.Components several) {
+      return several.components().stream().mapToDouble(part -> part.dispersion() * part.dispersion()).toArray();
+    }
+    double dispersion = ((Gas.Isothermal) gas).dispersion();
+    return new double[] {dispersion * dispersion};
+  }
+
+  private static double[] densities(Gas gas) {
+    if (gas instanceof Gas.Components several) {
+      return several.components().stream().mapToDouble(GasComponent::bottomDensity).toArray();
+    }
+    return new double[] {((Gas.Isothermal) gas).bottomDensity().orElseThrow(() -> new IllegalArgumentException(
+        "an isothermal gas needs a bottom density or a surface density, found neither"))};
+  }
+
+  private static IsothermalStratification isothermal(Disk disk, ExternalGravity gravity, double bottom,
+      double[] densities, double[] dispersionSquared) {
+    double pressure = 0.0;
+    for (int i = 0; i < densities.length; i++) {
+      pressure += densities[i] * dispersionSquared[i];
+    }
+    return new IsothermalStratification(gravity, bottom, densities, dispersionSquared,
+        magneticRatio(disk.field(), pressure), cosmicRayRatio(disk.cosmicRays(), pressure));
+  }
+
+  private static double magneticRatio(MagneticField field, double gasPressure) {
+    if (field instanceof MagneticField.ConstantRatio constant) {
+      return constant.pressureRatio();
+    }
+    if (field instanceof MagneticField.BottomStrength given) {
+      return given.strength() * given.strength() / (8.0 * Math.PI * gasPressure);
+    }
+    throw new RefusedModelException("field.shape = \"balance\" needs a gas stratification (gas.stratum); with an"
+        + " isothermal gas give field.pressure-ratio or field.strength");
+  }
+
+  static double cosmicRayRatio(CosmicRays cosmicRays, double gasPressure) {
+    if (cosmicRays instanceof CosmicRays.PressureRatio given) {
+      return given.ratio();
+    }
+    return ((CosmicRays.BottomPressure) cosmicRays).pressure() / gasPressure;
+  }
+
+  /** Column of gas above a level, g cm^-2. */
+  static double columnAbove(Stratification stratification, double bottom) {
+    HeightPanels panels = HeightPanels.of(stratification::logDensity, bottom, stratification.landmarks(),
+        stratification.kinks(), stratification.greatestHeight());
+    return panels.integrate(z -> Math.exp(stratification.logDensity(z)));
+  }
+
+  /** A length in parsecs for messages. */
+  static String parsecs(double length) {
+    return String.format(Locale.ROOT, "%.4g pc", length / org.archspan.units.Constants.PARSEC);
+  }
+
+}

@@ -1,0 +1,41 @@
+package org.archspan.equilibrium;
+
+/**
+ * Checks the balance of an equilibrium from its pressures alone, independently of how it was built: over thin slabs
+ * the drop of total pressure is compared with the weight between.
+ */
+public final class ForceBalance {
+  private static final int SLABS = 400;
+
+  private ForceBalance() {
+  }
+
+  /** Greatest |drop of pressure - weight| / weight over slabs that fill the domain, dimensionless. O(slabs). */
+  public static double residual(Equilibrium equilibrium) {
+    double greatest = 0.0;
+    for (int i = 0; i < SLABS; i++) {
+      greatest = Math.max(greatest, residual(equilibrium, slabEdge(equilibrium, i), slabEdge(equilibrium, i + 1)));
+    }
+    return greatest;
+  }
+
+  private static double slabEdge(Equilibrium equilibrium, int i) {
+    return equilibrium.bottom() + (equilibrium.top() - equilibrium.bottom()) * i / SLABS;
+  }
+
+  /** The same over one slab between two heights, cm. */
+  public static double residual(Equilibrium equilibrium, double from, double to) {
+    double reference = equilibrium.at(from).logDensity();
+    double drop = pressure(equilibrium.at(from), reference) - pressure(equilibrium.at(to), reference);
+    double weight = HeightPanels.integrate(z -> {
+      GasState state = equilibrium.at(z);
+      return Math.exp(state.logDensity() - reference) * state.gravity();
+    }, from, to);
+    return Math.abs(drop - weight) / weight;
+  }
+
+  private static double pressure(GasState state, double referenceLogDensity) {
+    return Math.exp(state.logDensity() - referenceLogDensity)
+        * (state.gasPerMass() + state.magneticPerMass() + state.cosmicRayPerMass());
+  }
+}

@@ -1,0 +1,58 @@
+package org.archspan.stability;
+
+import org.archspan.equilibrium.Equilibrium;
+import org.archspan.equilibrium.GasState;
+import org.archspan.mesh.Mesh;
+
+/**
+ * The base state on the nodes of a mesh, per unit mass and in {@link Scales}: all the eigenproblem needs. The density
+ * itself drops out, so exp(-1000) does no harm. Immutable; the flat arrays are shared and must not be written.
+ */
+final class Atmosphere {
+  /** The mesh, in scale lengths. */
+  final Mesh mesh;
+
+  /** Node heights, quadrature weights times element length, and the base state; shape [elements * (degree + 1)]. */
+  final double[] height;
+  final double[] weight;
+  final double[] gravity;
+  final double[] alfvenSquared;
+  final double[] gasPerMass;
+  final double[] cosmicRayPerMass;
+  /** Minus d ln(rho)/dz. */
+  final double[] inverseScaleHeight;
+
+  Atmosphere(Equilibrium equilibrium, Scales scales, Mesh mesh) {
+    this.mesh = mesh;
+    height = mesh.nodes();
+    int n = height.length;
+    weight = new double[n];
+    gravity = new double[n];
+    alfvenSquared = new double[n];
+    gasPerMass = new double[n];
+    cosmicRayPerMass = new double[n];
+    inverseScaleHeight = new double[n];
+    double[] reference = mesh.reference().weights();
+    double energy = scales.speed() * scales.speed();
+    for (int i = 0; i < n; i++) {
+      int e = i / reference.length;
+      weight[i] = 0.5 * mesh.length(e) * reference[i % reference.length];
+      GasState state = equilibrium.at(insideElement(mesh, e, height[i]) * scales.length());
+      gravity[i] = state.gravity() * scales.length() / energy;
+      alfvenSquared[i] = 2.0 * state.magneticPerMass() / energy;
+      gasPerMass[i] = state.gasPerMass() / energy;
+      cosmicRayPerMass[i] = state.cosmicRayPerMass() / energy;
+      inverseScaleHeight[i] = -state.logDensityGradient() * scales.length();
+    }
+  }
+
+  /** Moves a node on an element's end a hair inwards, so that a kink there is seen from the right side. */
+  private static double insideElement(Mesh mesh, int e, double z) {
+    double hair = 1e-14 * mesh.length(e);
+    return Math.max(mesh.edges()[e] + hair, Math.min(mesh.edges()[e + 1] - hair, z));
+  }
+
+  int nodes() {
+    return height.length;
+  }
+}

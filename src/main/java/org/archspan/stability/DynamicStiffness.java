@@ -1,0 +1,147 @@
+package org.archspan.stability;
+
+import org.archspan.boundary.TopBoundary;
+import org.archspan.linalg.ElementAssembly;
+import org.archspan.linalg.PackedElimination;
+import org.archspan.linalg.TwistedTridiagonal;
+import org.archspan.mesh.ReferenceElement;
+
+/**
+ * The matrix S(s, kx, ky) of the condensed form on a mesh, factored element by element.
+ *
+ * <p>Every term grows with s, so the number of its negative eigenvalues is the number of modes that grow faster than s:
+ * the count of Wittrick and Williams (1971), Q. J. Mech. Appl. Math. 24, 263. The inner nodes of each element are
+ * eliminated first; what is left couples the element ends in a tridiagonal matrix of Schur complements.
+ *
+ * <p>All quantities in {@link Scales}. Owns its work arrays: one instance for one thread.
+ */
+final class DynamicStiffness {
+  /** Stands for infinitely many modes: the growth rate lies in the continuum of the atmosphere above. */
+  static final int INFINITE = Integer.MAX_VALUE;
+
+  private final Atmosphere atmosphere;
+  private final PressureResponse response;
+  private final TopCondition top;
+  private final ReferenceElement element;
+  private final int elements;
+  private final int first;
+  private final int unknowns;
+  private final CondensedForm form;
+  private final double[] packed;
+  private final double[] diagonal;
+  private final double[] offDiagonal;
+  private final double[] ends;
+  private final TwistedTridiagonal tridiagonal;
+  private long factorisations;
+
+  /**
+   * A problem on a mesh.
+   *
+   * @param bottomFixed whether zeta vanishes at the lower end
+   */
+  DynamicStiffness(Atmosphere atmosphere, PressureResponse response, boolean bottomFixed, TopBoundary topBoundary) {
+    this.atmosphere = atmosphere;
+    this.response = response;
+    this.top = new TopCondition(topBoundary);
+    this.element = atmosphere.mesh.reference();
+    this.elements = atmosphere.mesh.elements();
+    this.first = bottomFixed ? 1 : 0;
+    this.unknowns = elements + 1 - first - (top.fixed() ? 1 : 0);
+    this.form = new CondensedForm(atmosphere.nodes());
+    this.packed = new double[elements * element.pairFirst().length];
+    this.diagonal = new double[elements + 1];
+    this.offDiagonal = new double[elements];
+    this.ends = new double[elements + 1];
+    this.tridiagonal = new TwistedTridiagonal(elements + 1);
+  }
+
+  Atmosphere atmosphere() {
+    return atmosphere;
+  }
+
+  PressureResponse response() {
+    return response;
+  }
+
+  TopCondition top() {
+    return top;
+  }
+
+  /** Number of factorisations since the start. */
+  long factorisations() {
+    return factorisations;
+  }
+
+  /** Number of modes with wavenumber kx that grow faster than s. O(elements * degree^3). */
+  int count(double growth, double kx, double ky) {
+    return count(growth, kx, kx, ky);
+  }
+
+  /**
+   * An upper bound on the number of modes that grow faster than s, for every kx between two values; exact when they are
+   * equal.
+   */
+  int count(double growth, double lowest, double highest, double ky) {
+    factorisations++;
+    response.evaluate(growth, highest);
+    form.fill(atmosphere, 0, atmosphere.nodes(), growth * growth, highest * highest, lowest * lowest, ky * ky,
+        response.gas, response.cosmicRay);
+    if (!top.evaluate(form, atmosphere, atmosphere.nodes() - 1)) {
+      return INFINITE;
+    }
+    return condense() + tridiagonal.count(diagonal, offDiagonal, first, unknowns);
+  }
+
+  private int condense() {
+    int n = element.degree() + 1;
+    int pairs = element.pairFirst().length;
+    int negative = 0;
+    diagonal[0] = 0.0;
+    for (int e = 0; e < elements; e++) {
+      weigh(e, n);
+      int offset = e * pairs;
+      ElementAssembly.assemble(form.a, form.b, form.c, e * n, n, element.slopeProducts(), element.pairFirst(),
+          element.pairSecond(), element.pairSlope(), element.pairSlopeReversed(), packed, offset);
+      negative += PackedElimination.eliminate(packed, offset, n, n - 2);
+      diagonal[e] += packed[offset + pairs - 3];
+      offDiagonal[e] = packed[offset + pairs - 2];
+      diagonal[e + 1] = packed[offset + pairs - 1];
+    }
+    diagonal[elements] += top.entry();
+    return negative;
+  }
+
+  private void weigh(int e, int n) {
+    double slope = 2.0 / atmosphere.mesh.length(e);
+    for (int i = e * n; i < (e + 1) * n; i++) {
+      double weight = atmosphere.weight[i];
+      form.a[i] *= weight * slope * slope;
+      form.b[i] *= weight * slope;
+      form.c[i] *= weight;
+    }
+  }
+
+  /**
+   * After a count at one kx: the vector zeta that S almost annihilates, on all nodes.
+   *
+   * @param zeta receives the values, shape [elements * (degree + 1)]
+   * @return the quadratic form zeta^T S zeta
+   */
+  double nullVector(double[] zeta) {
+    tridiagonal.nullVector(diagonal, offDiagonal, first, ends);
+    int n = element.degree() + 1;
+    int pairs = element.pairFirst().length;
+    ends[0] = first == 1 ? 0.0 : ends[0];
+    ends[elements] = top.fixed() ? 0.0 : ends[elements];
+    double[] local = new double[n];
+    for (int e = 0; e < elements; e++) {
+      local[n - 2] = ends[e];
+      local[n - 1] = ends[e + 1];
+      PackedElimination.extend(packed, e * pairs, n, n - 2, local);
+      System.arraycopy(local, 0, zeta, e * n + 1, n - 2);
+      zeta[e * n] = local[n - 2];
+      zeta[e * n + n - 1] = local[n - 1];
+    }
+    return tridiagonal.residual();
+  }
+}

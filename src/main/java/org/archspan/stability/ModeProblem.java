@@ -1,0 +1,48 @@
+package org.archspan.stability;
+
+import org.archspan.boundary.Parity;
+import org.archspan.boundary.TopBoundary;
+import org.archspan.closure.CosmicRayClosure;
+import org.archspan.closure.GasClosure;
+import org.archspan.equilibrium.Equilibrium;
+
+/**
+ * What is to be solved for one parity and one cross-field wavenumber.
+ *
+ * @param equilibrium     base state
+ * @param gas             closure of the gas
+ * @param cosmicRays      closure of the cosmic rays
+ * @param parity          condition at the lower end
+ * @param crossWavenumber ky, cm^-1, not negative
+ * @param tolerance       requested relative error of growth rates, dimensionless
+ */
+public record ModeProblem(Equilibrium equilibrium, GasClosure gas, CosmicRayClosure cosmicRays, Parity parity,
+    double crossWavenumber, double tolerance) {
+  /** Refuses a tolerance that double precision cannot reach, and a parity that the domain does not have. */
+  public ModeProblem {
+    if (!(tolerance >= 1e-12 && tolerance <= 1e-2)) {
+      throw new IllegalArgumentException("tolerance must lie between 1e-12 and 1e-2, found " + tolerance);
+    }
+    if (equilibrium.aboutMidplane() == (parity == Parity.FLOOR)) {
+      throw new IllegalArgumentException("parity " + parity + " does not fit a domain that starts "
+          + (equilibrium.aboutMidplane() ? "at the midplane" : "on a floor"));
+    }
+    if (!(crossWavenumber >= 0.0) || Double.isInfinite(crossWavenumber)) {
+      throw new IllegalArgumentException("cross-field wavenumber must be finite and not negative, found "
+          + crossWavenumber);
+    }
+  }
+
+  /** The same problem with the other symmetry. */
+  public ModeProblem withParity(Parity other) {
+    return new ModeProblem(equilibrium, gas, cosmicRays, other, crossWavenumber, tolerance);
+  }
+
+  boolean bottomFixed() {
+    return parity != Parity.FLEXING;
+  }
+
+  TopBoundary topBoundary() {
+    return equilibrium.topBoundary();
+  }
+}
