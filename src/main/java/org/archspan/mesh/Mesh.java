@@ -41,4 +41,15 @@ public record Mesh(double[] edges, int degree) {
   public Mesh withDegree(int newDegree) {
     return new Mesh(edges, newDegree);
   }
+
+  /** Every element cut in two. */
+  public Mesh halved() {
+    double[] halves = new double[2 * elements() + 1];
+    for (int e = 0; e < elements(); e++) {
+      halves[2 * e] = edges[e];
+      halves[2 * e + 1] = 0.5 * (edges[e] + edges[e + 1]);
+    }
+    halves[2 * elements()] = edges[elements()];
+    return new Mesh(halves, degree);
+  }
 }

@@ -24,6 +24,7 @@ public final class ReferenceElement {
   private final double[] pairSlope;
   private final double[] pairSlopeReversed;
   private final double[] slopeProducts;
+  private final double[] legendreTail;
 
   private ReferenceElement(int degree) {
     this.degree = degree;
@@ -46,6 +47,7 @@ public final class ReferenceElement {
       }
     }
     this.slopeProducts = products();
+    this.legendreTail = tail();
   }
 
   private static ReferenceElement[] all() {
@@ -127,6 +129,24 @@ public final class ReferenceElement {
   /** Products of slopes {@code D_qi D_qj} for each node q over the packed pairs, shape [p+1][(p+1)(p+2)/2]. */
   public double[] slopeProducts() {
     return slopeProducts;
+  }
+
+  /**
+   * Rows that turn nodal values into the two highest Legendre coefficients, shape [2][p+1]: degree p-1 first, then p.
+   * A smooth function has small ones.
+   */
+  public double[] legendreTail() {
+    return legendreTail;
+  }
+
+  private double[] tail() {
+    int n = degree + 1;
+    double[] rows = new double[2 * n];
+    for (int i = 0; i < n; i++) {
+      rows[i] = weights[i] * LegendreBasis.value(degree - 1, nodes[i]) * (degree - 0.5);
+      rows[n + i] = weights[i] * LegendreBasis.value(degree, nodes[i]) * 0.5 * degree;
+    }
+    return rows;
   }
 
   private double[] products() {

@@ -34,6 +34,12 @@ final class Discretisation {
     return -form / displacement.byGrowth;
   }
 
+  /** After a finite count: the Newton correction of the wavenumber at a fixed growth rate. */
+  double newtonStepInWavenumber(double growth, double kx, double ky) {
+    newtonStep(growth, kx, ky);
+    return -stiffness.residual() / displacement.byWavenumber;
+  }
+
   /** ds/dkx of the latest root. */
   double slope() {
     return -displacement.byWavenumber / displacement.byGrowth;

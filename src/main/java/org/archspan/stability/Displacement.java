@@ -10,6 +10,9 @@ import org.archspan.mesh.ReferenceElement;
  * <p>All quantities in {@link Scales}. Owns its work arrays: one instance for one thread.
  */
 final class Displacement {
+  /** Rounding of a term of the form, relative; a few units in the last place, enlarged by the slopes of the elements. */
+  private static final double ROUNDING = 4e-15;
+
   private final Atmosphere atmosphere;
   private final PressureResponse response;
   private final double[] slope;
@@ -26,6 +29,7 @@ final class Displacement {
   double inertia;
   double inertiaMoment;
 
+  private double magnitude;
   private double growth;
   private double kx;
   private double ky;
@@ -59,6 +63,7 @@ final class Displacement {
     byWavenumber = 0.0;
     inertia = 0.0;
     inertiaMoment = 0.0;
+    magnitude = 0.0;
     int n = atmosphere.nodes();
     for (int i = 0; i < n; i++) {
       accumulate(i, slope[i], atmosphere.weight[i], atmosphere.height[i]);
@@ -89,10 +94,11 @@ final class Displacement {
     double z = zeta[i];
     double g = atmosphere.gravity[i];
     double v = atmosphere.alfvenSquared[i];
+    double h = atmosphere.inverseScaleHeight[i];
     double stiffness = response.gas * atmosphere.gasPerMass[i] + response.cosmicRay * atmosphere.cosmicRayPerMass[i];
     double q = 1.0 / (growth * growth + stiffness * kx * kx);
     double m = growth * growth * q;
-    double verticalSlope = zetaSlope + 0.5 * atmosphere.inverseScaleHeight[i] * z;
+    double verticalSlope = zetaSlope + 0.5 * h * z;
     double tension = growth * growth + kx * kx * v;
     double squeeze = m * stiffness + v;
     double y = -ky * (squeeze * verticalSlope - m * g * z) / (tension + squeeze * ky * ky);
@@ -108,6 +114,7 @@ final class Displacement {
     byGrowth += weight * (2.0 * growth * square + response.cosmicRayByGrowth * answer);
     byWavenumber += weight * (2.0 * kx * (v * (y * y + z * z) - q * m * drive * drive)
         + response.cosmicRayByWavenumber * answer);
+    magnitude += weight * (squeeze * verticalSlope * verticalSlope + (tension + g * h) * z * z);
     inertia += weight * square;
     inertiaMoment += weight * square * height;
   }
@@ -120,10 +127,28 @@ final class Displacement {
     slopeAtTop();
   }
 
+  /** Slopes of the form of the atmosphere at the top alone, for zeta = 1 without vertical variation. */
+  void uniformAtTop(double newGrowth, double newKx, double newKy) {
+    growth = newGrowth;
+    kx = newKx;
+    ky = newKy;
+    response.evaluate(growth, kx);
+    byGrowth = 0.0;
+    byWavenumber = 0.0;
+    int last = atmosphere.nodes() - 1;
+    zeta[last] = 1.0;
+    accumulate(last, 0.0, 1.0, 0.0);
+  }
+
   /** Restores the pointwise values at the top, which belong to the side below it. */
   private void slopeAtTop() {
     int last = atmosphere.nodes() - 1;
     accumulate(last, slope[last], 0.0, 0.0);
+  }
+
+  /** Relative rounding error of a growth rate: terms of this size cancel in the form. */
+  double rounding(double s) {
+    return ROUNDING * magnitude / (s * byGrowth);
   }
 
   /** Height of the kinetic-energy centroid. */

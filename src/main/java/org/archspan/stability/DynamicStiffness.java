@@ -144,4 +144,9 @@ final class DynamicStiffness {
     }
     return tridiagonal.residual();
   }
+
+  /** The quadratic form of the latest null vector. */
+  double residual() {
+    return tridiagonal.residual();
+  }
 }

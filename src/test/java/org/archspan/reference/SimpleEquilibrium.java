@@ -1,6 +1,7 @@
 package org.archspan.reference;
 
 import java.util.function.DoubleUnaryOperator;
+import org.archspan.boundary.TopBoundary;
 import org.archspan.equilibrium.Equilibrium;
 import org.archspan.equilibrium.GasState;
 
@@ -32,6 +33,11 @@ public record SimpleEquilibrium(DoubleUnaryOperator gravity, DoubleUnaryOperator
     double support = (1.0 + alpha + beta) * c2;
     double g = gravity.applyAsDouble(height);
     return new GasState(-potential.applyAsDouble(height) / support, -g / support, g, c2, alpha * c2, beta * c2);
+  }
+
+  @Override
+  public TopBoundary topBoundary() {
+    return TopBoundary.LID;
   }
 
   @Override

@@ -1,0 +1,228 @@
+package org.archspan.stability;
+
+import java.util.Optional;
+import org.archspan.mesh.Mesh;
+
+/**
+ * Growth rates of one parity at one cross-field wavenumber. Chooses and refines its mesh by itself: every growth rate is
+ * checked against a mesh of higher degree, and elements are split until the two agree within the tolerance.
+ *
+ * <p>Works in {@link Scales}. Owns its work arrays: one instance for one thread.
+ */
+final class ModeSolver {
+  /** Degree of the working mesh, and of the mesh that checks it. */
+  static final int DEGREE = 10;
+  static final int CHECKING_DEGREE = 12;
+
+  private static final int MOST_ELEMENTS = 2000;
+  private static final int MOST_REFINEMENTS = 24;
+  private static final int NODES_PER_HALF_WAVE = 4;
+  private static final double HAIR = 1e-9;
+
+  private final ModeProblem problem;
+  private final Scales scales;
+  private final double ky;
+  private Discretisation working;
+  private Discretisation checking;
+  private HaloEdge halo;
+  private double fastestPossible;
+  private double shortestUnstable;
+  private long spentBefore;
+
+  ModeSolver(ModeProblem problem) {
+    this.problem = problem;
+    this.scales = Scales.of(problem.equilibrium());
+    this.ky = problem.crossWavenumber() * scales.length();
+    discretise(MeshGrading.initial(problem.equilibrium(), scales, DEGREE));
+  }
+
+  private void discretise(Mesh mesh) {
+    spentBefore = factorisations();
+    working = new Discretisation(problem, scales, mesh);
+    checking = new Discretisation(problem, scales, mesh.withDegree(CHECKING_DEGREE));
+    halo = problem.topBoundary() == org.archspan.boundary.TopBoundary.OPEN
+        ? new HaloEdge(working.stiffness().atmosphere(), new PressureResponse(problem.gas(), problem.cosmicRays(), scales))
+        : null;
+    BuoyancyBound bound = BuoyancyBound.of(working.stiffness().atmosphere(), problem.gas().adiabaticIndex())
+        .max(BuoyancyBound.of(checking.stiffness().atmosphere(), problem.gas().adiabaticIndex()));
+    fastestPossible = bound.growth();
+    shortestUnstable = bound.wavenumber();
+  }
+
+  ModeProblem problem() {
+    return problem;
+  }
+
+  Scales scales() {
+    return scales;
+  }
+
+  double ky() {
+    return ky;
+  }
+
+  Mesh mesh() {
+    return working.stiffness().atmosphere().mesh;
+  }
+
+  /** The mesh of higher degree, with the displacement of the latest root. */
+  Discretisation checking() {
+    return checking;
+  }
+
+  /** Factorisations spent so far, on both meshes. */
+  long factorisations() {
+    return working == null ? 0
+        : spentBefore + working.stiffness().factorisations() + checking.stiffness().factorisations();
+  }
+
+  /** A growth rate that no mode exceeds; 0 when nothing can be unstable. */
+  double fastestPossible() {
+    return fastestPossible;
+  }
+
+  /** A wavenumber beyond which nothing grows; infinite without field. */
+  double shortestUnstable() {
+    return shortestUnstable;
+  }
+
+  /** The slowest growth that is told from none. */
+  double slowest() {
+    return HAIR * fastestPossible;
+  }
+
+  /** Growth rate of the edge of the continuum above an open top; 0 where there is none. */
+  double haloEdge(double kx) {
+    return halo == null ? 0.0 : halo.growth(kx, ky, fastestPossible);
+  }
+
+  /** ds/dkx of that edge. */
+  double haloEdgeSlope(double growth, double kx) {
+    return halo.slope(growth, kx, ky);
+  }
+
+  /** A growth rate just above whatever is not a discrete mode. */
+  private double floor(double kx) {
+    return Math.max(slowest(), haloEdge(kx) * (1.0 + HAIR));
+  }
+
+  /**
+   * Number of discrete modes that grow at a wavenumber. The slowest of many need a finer mesh than the fastest: the count
+   * is repeated on halved elements until it stands still with several nodes to each half-wave.
+   *
+   * @throws UnsolvedException when it does not
+   */
+  int unstableModes(double kx) {
+    if (fastestPossible == 0.0) {
+      return 0;
+    }
+    double floor = floor(kx);
+    Mesh mesh = mesh();
+    int count = working.stiffness().count(floor, kx, ky);
+    while (mesh.elements() <= MOST_ELEMENTS) {
+      mesh = mesh.halved();
+      int finer = new Discretisation(problem, scales, mesh).stiffness().count(floor, kx, ky);
+      if (finer == count && mesh.elements() * DEGREE >= NODES_PER_HALF_WAVE * count) {
+        return count;
+      }
+      count = finer;
+    }
+    throw new UnsolvedException("more than " + count + " modes grow at wavenumber " + kx + " per scale height: too many"
+        + " to count");
+  }
+
+  /** Number of modes faster than s at any wavenumber between two, or more. */
+  int count(double growth, double lowest, double highest) {
+    return working.stiffness().count(growth, lowest, highest, ky);
+  }
+
+  /**
+   * The growth rate of the mode of an order, or nothing when fewer modes grow.
+   *
+   * @param guess a growth rate to start from; NaN for none
+   */
+  Optional<GrowthRoot> growth(double kx, int order, double guess) {
+    if (fastestPossible == 0.0) {
+      return Optional.empty();
+    }
+    double floor = floor(kx);
+    double ceiling = fastestPossible * (1.0 + HAIR);
+    if (floor >= ceiling || working.stiffness().count(floor, kx, ky) <= order) {
+      return Optional.empty();
+    }
+    return Optional.of(refineUntilTrue(kx, order, floor, ceiling, guess));
+  }
+
+  private GrowthRoot refineUntilTrue(double kx, int order, double floor, double ceiling, double guess) {
+    double start = guess;
+    for (int refinement = 0; refinement <= MOST_REFINEMENTS; refinement++) {
+      double s = RootFinder.find(growthAxis(kx), order, floor, ceiling, start);
+      GrowthRoot root = check(kx, s);
+      if (root.error() <= problem.tolerance()) {
+        return root;
+      }
+      start = root.growth();
+      double[] edges = MeshGrading.split(checking.stiffness().atmosphere(), checking.displacement().zeta);
+      if (edges.length > MOST_ELEMENTS) {
+        break;
+      }
+      discretise(new Mesh(edges, DEGREE));
+    }
+    throw new UnsolvedException("the growth rate at wavenumber " + kx + " per scale height is " + start
+        + " in units of the crossing rate, but its tolerance " + problem.tolerance() + " was not reached with "
+        + mesh().elements() + " elements; ask for a larger --tolerance");
+  }
+
+  /** The Newton correction that the checking mesh asks for is the error of the working mesh; its result is kept. */
+  private GrowthRoot check(double kx, double s) {
+    int count = checking.stiffness().count(s, kx, ky);
+    if (count == DynamicStiffness.INFINITE) {
+      return new GrowthRoot(kx, s, Double.NaN, 1.0);
+    }
+    double change = checking.newtonStep(s, kx, ky);
+    double better = s + change;
+    double error = Math.abs(change) / Math.abs(better) + checking.displacement().rounding(s);
+    return new GrowthRoot(kx, better, checking.slope(), error);
+  }
+
+  private RootFinder.Axis growthAxis(double kx) {
+    return new RootFinder.Axis() {
+      @Override
+      public int count(double s) {
+        return working.stiffness().count(s, kx, ky);
+      }
+
+      @Override
+      public double newtonStep(double s) {
+        return working.newtonStep(s, kx, ky);
+      }
+    };
+  }
+
+  /** Shortest wave at which more than {@code order} modes grow, as a wavenumber; 0 when there is none. */
+  double marginalWavenumber(int order) {
+    if (fastestPossible == 0.0) {
+      return 0.0;
+    }
+    double high = shortestUnstable * (1.0 + HAIR);
+    double low = 1e-6 * high;
+    if (Double.isInfinite(high) || working.stiffness().count(slowest(), low, ky) <= order) {
+      return Double.isInfinite(high) ? high : 0.0;
+    }
+    return RootFinder.find(wavenumberAxis(), order, low, high, Double.NaN);
+  }
+
+  private RootFinder.Axis wavenumberAxis() {
+    return new RootFinder.Axis() {
+      @Override
+      public int count(double kx) {
+        return working.stiffness().count(slowest(), kx, ky);
+      }
+
+      @Override
+      public double newtonStep(double kx) {
+        return working.newtonStepInWavenumber(slowest(), kx, ky);
+      }
+    };
+  }
+}
