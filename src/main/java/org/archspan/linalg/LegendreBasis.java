@@ -1,6 +1,6 @@
 package org.archspan.linalg;
 
-/** Legendre polynomials and the Gauss-Lobatto rule built on them. */
+/** Legendre polynomials and the Gauss-Lobatto rule built on them. All numbers are dimensionless. */
 public final class LegendreBasis {
   private static final int NEWTON_STEPS = 50;
 

@@ -87,7 +87,7 @@ public final class TwistedTridiagonal {
     }
   }
 
-  /** The r of the last {@link #nullVector}: also the quadratic form x^T T x. */
+  /** The r of the last {@link #nullVector}: also the quadratic form x^T T x, in the unit of the matrix. */
   public double residual() {
     return residual;
   }

@@ -20,7 +20,7 @@ import org.archspan.boundary.Parity;
  * @param heldBy              what confines the mode
  * @param tallerGrowthChange  relative change of the growth rate when the domain is 1.5 times as tall, dimensionless;
  *                            NaN when not computed
- * @param tallerWavelengthChange the same for the wavelength
+ * @param tallerWavelengthChange the same for the wavelength, dimensionless
  */
 public record BranchPeak(Parity parity, int order, double wavenumber, double crossWavenumber, double growthRate,
     double growthError, double wavelengthError, int unstableModes, double centroidHeight, double columnContrast,

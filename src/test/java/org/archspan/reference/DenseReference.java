@@ -2,6 +2,7 @@ package org.archspan.reference;
 
 import dev.ludovic.netlib.lapack.JavaLAPACK;
 import java.util.Arrays;
+import java.util.function.ToDoubleFunction;
 import java.util.stream.IntStream;
 import org.archspan.boundary.Parity;
 import org.archspan.boundary.TopBoundary;
@@ -12,16 +13,18 @@ import org.archspan.equilibrium.GasState;
 import org.netlib.util.intW;
 
 /**
- * The full problem in (X, Y, Z), nothing eliminated, by collocation on one set of Chebyshev points and LAPACK's dense
- * generalised eigenvalues (dggev). Slow, O((5 n)^3), and obvious: the twin of the condensed solver.
+ * The full problem in (X, Y, Z), nothing eliminated, by collocation on one set of Chebyshev points and
+ * LAPACK's dense generalised eigenvalues (dggev). Slow, O((5 n)^3), and obvious: the twin of the condensed
+ * solver.
  *
  * <p>Variables carry sqrt(rho). With {@code d = kx X + ky Y + Z' - (L/2) Z}, {@code L = d ln rho/dz},
  * {@code dp = d - kx X}, {@code q = G d - g Z} and {@code P = q + 2 m dp}, the equations of motion are
  * {@code s^2 X = -kx q}, {@code s^2 Y = -ky P - 2 m kx^2 Y},
- * {@code s^2 Z = g d + g L Z - 2 m kx^2 Z + P' + (L/2) P}; m = p_B/rho, G = resistance to compression over rho.
+ * {@code s^2 Z = g d + g L Z - 2 m kx^2 Z + P' + (L/2) P}; m = p_B/rho, G = resistance to compression over
+ * rho.
  *
- * <p>Cosmic rays of finite diffusivity make the problem quadratic in s; it is then written in first order with the
- * velocities and {@code w = s/(s + kappa kx^2) d}, that is {@code s w = d(velocity) - kappa kx^2 w}.
+ * <p>Cosmic rays of finite diffusivity make the problem quadratic in s; it is then written in first order
+ * with the velocities and {@code w = s/(s + kappa kx^2) d}, that is {@code s w = d(velocity) - kappa kx^2 w}.
  */
 public final class DenseReference {
   private final int points;
@@ -43,13 +46,13 @@ public final class DenseReference {
    * @param points number of Chebyshev points, at least 4
    */
   public DenseReference(Equilibrium equilibrium, GasClosure gas, CosmicRayClosure cosmicRays, Parity parity,
-      TopBoundary topBoundary, int points) {
-    if (topBoundary == TopBoundary.OPEN) {
-      throw new IllegalArgumentException("an open top depends on s and is no linear eigenvalue problem: LID or FREE");
+      int points) {
+    if (equilibrium.topBoundary() == TopBoundary.OPEN) {
+      throw new IllegalArgumentException("an open top is no linear eigenvalue problem in s: use LID or FREE");
     }
     this.points = points;
     this.parity = parity;
-    this.topBoundary = topBoundary;
+    topBoundary = equilibrium.topBoundary();
     length = equilibrium.scaleHeight();
     speed = equilibrium.dispersion();
     diffusivity = cosmicRays.diffusivity() / (speed * length);
@@ -64,10 +67,11 @@ public final class DenseReference {
     tension = tabulate(states, s -> 2.0 * s.magneticPerMass() / unit);
     cosmic = tabulate(states, s -> cosmicRays.adiabaticIndex() * s.cosmicRayPerMass() / unit);
     double answer = cosmicRays.diffusivity() == 0.0 ? cosmicRays.adiabaticIndex() : 0.0;
-    stiffness = tabulate(states, s -> (gas.adiabaticIndex() * s.gasPerMass() + answer * s.cosmicRayPerMass()) / unit);
+    stiffness = tabulate(states,
+        s -> (gas.adiabaticIndex() * s.gasPerMass() + answer * s.cosmicRayPerMass()) / unit);
   }
 
-  private static double[] tabulate(GasState[] states, java.util.function.ToDoubleFunction<GasState> quantity) {
+  private static double[] tabulate(GasState[] states, ToDoubleFunction<GasState> quantity) {
     return Arrays.stream(states).mapToDouble(quantity).toArray();
   }
 
@@ -129,7 +133,8 @@ public final class DenseReference {
   }
 
   /** Adds {@code factor d} at node i, from displacements or velocities that start at this column. */
-  private void divergence(Pencil pencil, int row, int i, double factor, double kx, double ky, int firstColumn) {
+  private void divergence(Pencil pencil, int row, int i, double factor, double kx, double ky,
+      int firstColumn) {
     pencil.addLeft(row, firstColumn + i, factor * kx);
     acrossDivergence(pencil, row, i, factor, ky, firstColumn);
   }
@@ -144,7 +149,8 @@ public final class DenseReference {
   }
 
   /** Adds {@code factor q} at node i. */
-  private void gasPressure(Pencil pencil, int row, int i, double factor, double kx, double ky, boolean leaking) {
+  private void gasPressure(Pencil pencil, int row, int i, double factor, double kx, double ky,
+      boolean leaking) {
     divergence(pencil, row, i, factor * stiffness[i], kx, ky, 0);
     pencil.addLeft(row, 2 * points + i, -factor * g[i]);
     if (leaking) {
@@ -153,7 +159,8 @@ public final class DenseReference {
   }
 
   /** Adds {@code factor P} at node i. */
-  private void totalPressure(Pencil pencil, int row, int i, double factor, double kx, double ky, boolean leaking) {
+  private void totalPressure(Pencil pencil, int row, int i, double factor, double kx, double ky,
+      boolean leaking) {
     if (factor != 0.0) {
       gasPressure(pencil, row, i, factor, kx, ky, leaking);
       acrossDivergence(pencil, row, i, factor * tension[i], ky, 0);
@@ -234,7 +241,8 @@ public final class DenseReference {
       double[] ascending = IntStream.range(0, size)
           .filter(i -> Math.abs(denominator[i]) > 1e-9 * Math.abs(real[i]) && imaginary[i] == 0.0)
           .mapToDouble(i -> real[i] / denominator[i]).filter(v -> v > 1e-9).sorted().toArray();
-      return IntStream.range(0, ascending.length).mapToDouble(i -> ascending[ascending.length - 1 - i]).toArray();
+      int last = ascending.length - 1;
+      return IntStream.rangeClosed(0, last).mapToDouble(i -> ascending[last - i]).toArray();
     }
   }
 }

@@ -2,7 +2,6 @@ package org.archspan.reference;
 
 import java.util.concurrent.atomic.AtomicInteger;
 import org.archspan.boundary.Parity;
-import org.archspan.boundary.TopBoundary;
 import org.archspan.closure.CosmicRayClosure;
 import org.archspan.closure.GasClosure;
 import org.archspan.equilibrium.Equilibrium;
@@ -14,13 +13,14 @@ import org.hipparchus.ode.sampling.ODEStateInterpolator;
 import org.hipparchus.ode.sampling.ODEStepHandler;
 
 /**
- * Modes by shooting from the bottom, and by counting the zeros of Z on the way: the number of modes that grow faster
- * than s is the number of interior zeros, one more where the end at the top would release energy (Sturm oscillation;
- * the coefficient u below is positive and the energy form rises with s).
+ * Modes by shooting from the bottom, and by counting the zeros of Z on the way: the number of modes that grow
+ * faster than s is the number of interior zeros, one more where the end at the top would release energy
+ * (Sturm oscillation; the coefficient u below is positive and the energy form rises with s).
  *
  * <p>With {@code P = G D + 2 m D_perp - g Z}, {@code t = 2 m kx^2}, {@code Q = G (s^2 + t) + 2 m s^2}:
  * {@code D_perp = [(s^2 + G kx^2) P + g s^2 Z]/Q}, {@code D = [(s^2 + t) D_perp - kx^2 P]/s^2},
- * {@code Z' = D_perp + ky^2 P/(s^2 + t)}, {@code P' = -L P + (s^2 + t - g L) Z - g D}. Variables carry sqrt(rho).
+ * {@code Z' = D_perp + ky^2 P/(s^2 + t)}, {@code P' = -L P + (s^2 + t - g L) Z - g D}. Variables carry
+ * sqrt(rho).
  */
 public final class ShootingReference {
   private static final double STEP_TOLERANCE = 1e-13;
@@ -29,18 +29,16 @@ public final class ShootingReference {
   private final GasClosure gas;
   private final CosmicRayClosure cosmicRays;
   private final Parity parity;
-  private final TopBoundary topBoundary;
   private final double length;
   private final double speed;
 
   /** A problem to shoot at. */
-  public ShootingReference(Equilibrium equilibrium, GasClosure gas, CosmicRayClosure cosmicRays, Parity parity,
-      TopBoundary topBoundary) {
+  public ShootingReference(Equilibrium equilibrium, GasClosure gas, CosmicRayClosure cosmicRays,
+      Parity parity) {
     this.equilibrium = equilibrium;
     this.gas = gas;
     this.cosmicRays = cosmicRays;
     this.parity = parity;
-    this.topBoundary = topBoundary;
     length = equilibrium.scaleHeight();
     speed = equilibrium.dispersion();
   }
@@ -125,7 +123,8 @@ public final class ShootingReference {
       double g = state.gravity() * length / unit;
       double slope = state.logDensityGradient() * length;
       double magnetic2 = 2.0 * state.magneticPerMass() / unit;
-      double stiffness = (gas.adiabaticIndex() * state.gasPerMass() + cosmicRayIndex() * state.cosmicRayPerMass()) / unit;
+      double stiffness = (gas.adiabaticIndex() * state.gasPerMass()
+          + cosmicRayIndex() * state.cosmicRayPerMass()) / unit;
       double w = s * s;
       double stretched = w + magnetic2 * kx * kx;
       double q = stiffness * stretched + magnetic2 * w;
@@ -141,7 +140,7 @@ public final class ShootingReference {
     /** Whether what lies at the top, under the displacement that arrives there, has negative energy. */
     boolean releasesEnergy(double top, double[] end) {
       double[] c = coefficients(top);
-      return switch (topBoundary) {
+      return switch (equilibrium.topBoundary()) {
         case LID -> false;
         case FREE -> end[0] * (end[1] + gravity(top) * end[0]) < 0.0;
         case OPEN -> {

@@ -6,8 +6,9 @@ import org.archspan.equilibrium.Equilibrium;
 import org.archspan.equilibrium.GasState;
 
 /**
- * Isothermal gas with constant pressure ratios and unit bottom density in any gravity: {@code rho = exp(-Phi/C)},
- * {@code C = (1 + alpha + beta) c^2}. Any consistent units. The slow, obvious twin of the equilibria under test.
+ * Isothermal gas with constant pressure ratios and unit bottom density in any gravity:
+ * {@code rho = exp(-Phi/C)}, {@code C = (1 + alpha + beta) c^2}. Any consistent units. The slow, obvious twin
+ * of the equilibria under test.
  *
  * @param gravity       g(z), cm s^-2
  * @param potential     its integral from the bottom z = 0, cm^2 s^-2
@@ -16,15 +17,22 @@ import org.archspan.equilibrium.GasState;
  * @param dispersion    isothermal speed c, cm s^-1, positive
  * @param top           upper end, cm
  * @param aboutMidplane whether z = 0 is the midplane of a disk
+ * @param topBoundary   what bounds the gas at the top
  */
-public record SimpleEquilibrium(DoubleUnaryOperator gravity, DoubleUnaryOperator potential, double alpha, double beta,
-    double dispersion, double top, boolean aboutMidplane) implements Equilibrium {
+public record SimpleEquilibrium(DoubleUnaryOperator gravity, DoubleUnaryOperator potential, double alpha,
+    double beta, double dispersion, double top, boolean aboutMidplane, TopBoundary topBoundary)
+    implements Equilibrium {
 
   /** {@code g = C tanh z}: density sech z, scale height of the gravity 1; units c = 1. */
-  public static SimpleEquilibrium tanh(double alpha, double beta, double top) {
+  public static SimpleEquilibrium tanh(double alpha, double beta, double top, TopBoundary boundary) {
     double support = 1.0 + alpha + beta;
-    return new SimpleEquilibrium(z -> support * Math.tanh(z), z -> support * Math.log(Math.cosh(z)), alpha, beta,
-        1.0, top, true);
+    return new SimpleEquilibrium(z -> support * Math.tanh(z), z -> support * Math.log(Math.cosh(z)), alpha,
+        beta, 1.0, top, true, boundary);
+  }
+
+  /** The same under a lid. */
+  public static SimpleEquilibrium tanh(double alpha, double beta, double top) {
+    return tanh(alpha, beta, top, TopBoundary.LID);
   }
 
   @Override
@@ -32,7 +40,8 @@ public record SimpleEquilibrium(DoubleUnaryOperator gravity, DoubleUnaryOperator
     double c2 = dispersion * dispersion;
     double support = (1.0 + alpha + beta) * c2;
     double g = gravity.applyAsDouble(height);
-    return new GasState(-potential.applyAsDouble(height) / support, -g / support, g, c2, alpha * c2, beta * c2);
+    double logDensity = -potential.applyAsDouble(height) / support;
+    return new GasState(logDensity, -g / support, g, c2, alpha * c2, beta * c2);
   }
 
   @Override
@@ -75,6 +84,7 @@ public record SimpleEquilibrium(DoubleUnaryOperator gravity, DoubleUnaryOperator
 
   @Override
   public Equilibrium withTop(double newTop) {
-    return new SimpleEquilibrium(gravity, potential, alpha, beta, dispersion, newTop, aboutMidplane);
+    return new SimpleEquilibrium(gravity, potential, alpha, beta, dispersion, newTop, aboutMidplane,
+        topBoundary);
   }
 }

@@ -1,14 +1,16 @@
 package org.archspan.reference;
 
+import org.archspan.boundary.TopBoundary;
 import org.archspan.equilibrium.Equilibrium;
 
 /**
  * Exact modes of an isothermal atmosphere in uniform gravity between rigid walls, in units c = H = 1, so that
  * gravity is {@code 1 + alpha + beta}. Every mode is {@code Z = exp(z/2) sin(kz z)}, {@code kz = n pi/L}.
  *
- * <p>With {@code Z' -> (1/2 + i kz) Z} and {@code delta Pi' -> (-1/2 + i kz) delta Pi} the equations of motion become a
- * Hermitian 3 x 3 matrix H with {@code det(H + s^2) = 0}: a real cubic in s^2 whose roots are all real, of which at
- * most one is positive. Sources: Parker (1966), ApJ 145, 811; Parker (1967), ApJ 149, 535.
+ * <p>With {@code Z' -> (1/2 + i kz) Z} and {@code delta Pi' -> (-1/2 + i kz) delta Pi} the equations of
+ * motion become a Hermitian 3 x 3 matrix H with {@code det(H + s^2) = 0}: a real cubic in s^2 whose roots are
+ * all real, of which at most one is positive. Sources: Parker (1966), ApJ 145, 811; Parker (1967), ApJ 149,
+ * 535.
  *
  * @param alpha          magnetic over gas pressure, dimensionless, positive
  * @param beta           cosmic-ray over gas pressure, dimensionless, not negative
@@ -24,14 +26,14 @@ public record UniformAtmosphere(double alpha, double beta, double gasIndex, doub
     return 1.0 + alpha + beta;
   }
 
-  /** The n-th mode, n = 1, 2, ..., between walls a distance apart; growth rate, dimensionless, 0 when stable. */
+  /** Growth rate, dimensionless, 0 when stable, of the n-th mode, n = 1, 2, ..., between walls. */
   public double growthRate(double kx, double ky, double wallDistance, int n) {
     return growthRate(kx, ky, n * Math.PI / wallDistance);
   }
 
   /**
-   * Growth rate, dimensionless, 0 when stable. Where cosmic rays diffuse at a finite rate, stiffness rises with s and
-   * growth falls with stiffness, so that {@code s(G(x)) - x} falls with x and has a single root.
+   * Growth rate, dimensionless, 0 when stable. Where cosmic rays diffuse at a finite rate, stiffness rises
+   * with s and growth falls with stiffness, so that {@code s(G(x)) - x} falls with x and has a single root.
    */
   public double growthRate(double kx, double ky, double kz) {
     double low = 0.0;
@@ -64,8 +66,8 @@ public record UniformAtmosphere(double alpha, double beta, double gasIndex, doub
   }
 
   /**
-   * Limit of short waves across the field, where the total pressure does not change: growth rate, dimensionless, 0 when
-   * stable.
+   * Limit of short waves across the field, where the total pressure does not change: growth rate,
+   * dimensionless, 0 when stable.
    */
   public double acrossLimit(double kx) {
     double high = acrossLimit(kx, stiffness(0.0, kx));
@@ -75,10 +77,15 @@ public record UniformAtmosphere(double alpha, double beta, double gasIndex, doub
     return Bisection.root(s -> acrossLimit(kx, stiffness(s, kx)) - s, 0.0, high);
   }
 
-  /** The state, with unit density on the floor at z = 0 and a top at this height. */
+  /** The state, with unit density on the floor at z = 0 and a lid at this height. */
   public Equilibrium equilibrium(double top) {
+    return equilibrium(top, TopBoundary.LID);
+  }
+
+  /** The same under another boundary. */
+  public Equilibrium equilibrium(double top, TopBoundary boundary) {
     double g = gravity();
-    return new SimpleEquilibrium(z -> g, z -> g * z, alpha, beta, 1.0, top, false);
+    return new SimpleEquilibrium(z -> g, z -> g * z, alpha, beta, 1.0, top, false, boundary);
   }
 
   /** {@code G = gamma + gamma_c_eff beta} at growth rate s. */

@@ -13,11 +13,11 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 
-/** Holds the closed forms to digits found otherwise, to the determinant they come from, and to published criteria. */
+/** Holds the closed forms to digits found otherwise, to their own determinant, and to published criteria. */
 class UniformAtmosphereTest {
   private static final double INFINITE = Double.POSITIVE_INFINITY;
 
-  /** Digits: two independent dense computations made for this project; alpha = beta = G = 1, walls 10 H apart. */
+  /** Digits: two independent dense computations made for this project; alpha = beta = G = 1, L = 10 H. */
   @ParameterizedTest
   @CsvSource({"0, 1, 0.720201289", "0, 2, 0.589250073", "1, 1, 0.789000737", "3, 1, 0.818967681"})
   void growthRatesOfTheClassicalAtmosphere(double ky, int n, double expected) {
@@ -30,8 +30,9 @@ class UniformAtmosphereTest {
   void rootsMakeTheDeterminantVanish(RepetitionInfo repetition) {
     Random random = new Random(repetition.getCurrentRepetition());
     double diffusivity = new double[] {0.0, INFINITE, Math.exp(random.nextGaussian())}[random.nextInt(3)];
-    UniformAtmosphere atmosphere = new UniformAtmosphere(0.2 + 2.0 * random.nextDouble(), 1.5 * random.nextDouble(),
-        0.6 + 0.6 * random.nextDouble(), 4.0 / 3.0 * random.nextDouble(), diffusivity);
+    UniformAtmosphere atmosphere = new UniformAtmosphere(0.2 + 2.0 * random.nextDouble(),
+        1.5 * random.nextDouble(), 0.6 + 0.6 * random.nextDouble(),
+        4.0 / 3.0 * random.nextDouble(), diffusivity);
     double kx = 0.05 + 0.5 * random.nextDouble();
     double ky = random.nextInt(3) == 0 ? 0.0 : 4.0 * random.nextDouble();
     double kz = Math.PI / 10.0 * (1 + random.nextInt(3));
@@ -46,7 +47,7 @@ class UniformAtmosphereTest {
     assertThat(s).isLessThan(atmosphere.acrossLimit(kx));
   }
 
-  /** Parker (1966), ApJ 145, 811: along the field unstable only if (1+a+b)^2 > G (1 + b + 3a/2), G = gamma here. */
+  /** Parker (1966), ApJ 145, 811: along the field only if (1+a+b)^2 > G (1 + b + 3a/2), G = gamma here. */
   @ParameterizedTest
   @CsvSource({"1, 1", "0.5, 0.3", "2, 0", "0.1, 1.5"})
   void criterionAlongTheField(double alpha, double beta) {
@@ -56,7 +57,7 @@ class UniformAtmosphereTest {
     assertThat(closure(alpha, beta, critical * 1.001).growthRate(1e-3, 0.0, 1e-3)).isZero();
   }
 
-  /** Newcomb (1961), Phys. Fluids 4, 391; Parker (1967), ApJ 149, 535: in three dimensions only if G < 1 + a + b. */
+  /** Newcomb (1961), Phys. Fluids 4, 391; Parker (1967), ApJ 149, 535: in 3-D only if G < 1 + a + b. */
   @ParameterizedTest
   @CsvSource({"1, 1", "0.5, 0.3", "2, 0"})
   void criterionAcrossTheField(double alpha, double beta) {
