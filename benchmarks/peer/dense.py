@@ -2,8 +2,8 @@
 
 Two forms of the same problem. `Collocation` is what one writes first: the equations at the points,
 `scipy.linalg.eig`. `Weak` is what a careful user writes next: the energy form with Clenshaw-Curtis weights,
-symmetric, so that `scipy.linalg.eigh` may be asked for the lowest eigenvalue alone. Variables carry the square root
-of the density.
+symmetric, so that `scipy.linalg.eigh` may be asked for the lowest eigenvalue alone. Variables carry the square
+root of the density.
 """
 import os
 
@@ -37,7 +37,7 @@ def chebyshev(points, length):
 
 
 class Weak:
-    """Symmetric form; what does not depend on the wave is made once, `growth_rate` is the repeated question."""
+    """Symmetric form; what does not depend on the wave is made once, before `growth_rate` is asked."""
 
     def __init__(self, model, points, parity):
         z, derivative, weights = chebyshev(points, model.lid)

@@ -1,7 +1,7 @@
 """Fastest wavelength and growth time of the thick disk under lids at 3, 5 and 8 kpc: are the scripts right?
 
-Kim et al. (2000), ApJ 531, 873, state a wavelength of about 3 kpc and a growth time of about 30 Myr, nearly equal
-for both midplane parities.
+Kim et al. (2000), ApJ 531, 873, state a wavelength of about 3 kpc and a growth time of about 30 Myr, nearly
+equal for both midplane parities.
 """
 import json
 
