@@ -3,7 +3,7 @@ package org.archspan.mesh;
 /**
  * A row of spectral elements over an interval of height, all of one degree.
  *
- * @param edges  ends of the elements, ascending, shape [elements + 1]
+ * @param edges  ends of the elements, ascending, in the unit of the caller, shape [elements + 1]
  * @param degree polynomial degree of each element
  */
 public record Mesh(double[] edges, int degree) {
@@ -22,7 +22,7 @@ public record Mesh(double[] edges, int degree) {
     return edges[e + 1] - edges[e];
   }
 
-  /** Nodes of all elements, the shared ends repeated, shape [elements * (degree + 1)]. */
+  /** Nodes of all elements in the unit of the edges, the shared ends repeated, shape [elements * (degree + 1)]. */
   public double[] nodes() {
     double[] reference = reference().nodes();
     int n = degree + 1;

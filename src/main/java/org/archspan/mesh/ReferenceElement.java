@@ -4,7 +4,7 @@ import org.archspan.linalg.LegendreBasis;
 
 /**
  * The interval [-1, 1] with Gauss-Lobatto-Legendre nodes, which serve both as interpolation and as quadrature points.
- * Immutable; arrays are shared and must not be written.
+ * All numbers are dimensionless. Immutable; arrays are shared and must not be written.
  */
 public final class ReferenceElement {
   /** Lowest degree offered. */

@@ -14,7 +14,7 @@ final class UnitWords {
   private static final Pattern BARE = Pattern.compile(
       "(?:^|[,;(]|\\bin\\b)\\s*" + UNIT + "(?=\\s*(?:$|[.,;:)]|\\s\\(|\\s(?:of|from|above)\\b))");
   private static final Pattern WORDS = Pattern.compile(
-      "\\bdimensionless\\b|\\bunits? of\\b|\\bin units\\b|\\bcentimetres\\b|\\bmilliseconds\\b");
+      "\\bdimensionless\\b|\\bunits? of the\\b|\\bin units\\b|\\bcentimetres\\b|\\bmilliseconds\\b");
 
   /** What a type may say once for all its members. */
   private static final Pattern FOR_ALL = Pattern.compile("\\bAll numbers are dimensionless\\b");

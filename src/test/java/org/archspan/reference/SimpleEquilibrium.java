@@ -45,11 +45,6 @@ public record SimpleEquilibrium(DoubleUnaryOperator gravity, DoubleUnaryOperator
   }
 
   @Override
-  public TopBoundary topBoundary() {
-    return TopBoundary.LID;
-  }
-
-  @Override
   public double bottom() {
     return 0.0;
   }
