@@ -27,6 +27,7 @@ final class DynamicStiffness {
   private final int first;
   private final int unknowns;
   private final CondensedForm form;
+  private final WaveSquared wave = new WaveSquared();
   private final double[] packed;
   private final double[] diagonal;
   private final double[] offDiagonal;
@@ -74,18 +75,30 @@ final class DynamicStiffness {
 
   /** Number of modes with wavenumber kx that grow faster than s. O(elements * degree^3). */
   int count(double growth, double kx, double ky) {
-    return count(growth, kx, kx, ky);
+    wave.exact(kx, ky);
+    return count(growth, kx);
   }
 
-  /**
-   * An upper bound on the number of modes that grow faster than s, for every kx between two values; exact when they are
-   * equal.
-   */
-  int count(double growth, double lowest, double highest, double ky) {
+  /** An upper bound on the number of modes that grow faster than s at any one kx between two values. */
+  int countBetween(double growth, double lowest, double highest, double ky) {
+    wave.below(lowest, highest, ky);
+    return count(growth, highest);
+  }
+
+  /** Whether the form at s is positive for every kx between two values: no mode grows faster at any of them. */
+  boolean positiveBetween(double growth, double lowest, double highest, double ky) {
+    wave.tangent(lowest, highest, lowest, ky);
+    if (count(growth, highest) > 0) {
+      return false;
+    }
+    wave.tangent(lowest, highest, highest, ky);
+    return count(growth, highest) == 0;
+  }
+
+  private int count(double growth, double softestAt) {
     factorisations++;
-    response.evaluate(growth, highest);
-    form.fill(atmosphere, 0, atmosphere.nodes(), growth * growth, highest * highest, lowest * lowest, ky * ky,
-        response.gas, response.cosmicRay);
+    response.evaluate(growth, softestAt);
+    form.fill(atmosphere, 0, atmosphere.nodes(), growth * growth, wave, response.gas, response.cosmicRay);
     if (!top.evaluate(form, atmosphere, atmosphere.nodes() - 1)) {
       return INFINITE;
     }

@@ -10,6 +10,7 @@ final class HaloEdge {
   private final Atmosphere atmosphere;
   private final PressureResponse response;
   private final CondensedForm form;
+  private final WaveSquared wave = new WaveSquared();
   private final Displacement displacement;
   private final int top;
 
@@ -46,7 +47,8 @@ final class HaloEdge {
   /** The coefficient c of zeta^2 above the top: negative where waves propagate; rises with s. */
   private double curvature(double growth, double kx, double ky) {
     response.evaluate(growth, kx);
-    form.fill(atmosphere, top, top + 1, growth * growth, kx * kx, kx * kx, ky * ky, response.gas, response.cosmicRay);
+    wave.exact(kx, ky);
+    form.fill(atmosphere, top, top + 1, growth * growth, wave, response.gas, response.cosmicRay);
     return form.c[top];
   }
 

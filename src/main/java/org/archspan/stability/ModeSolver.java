@@ -11,8 +11,8 @@ import org.archspan.mesh.Mesh;
  */
 final class ModeSolver {
   /** Degree of the working mesh, and of the mesh that checks it. */
-  static final int DEGREE = 10;
-  static final int CHECKING_DEGREE = 12;
+  static final int DEGREE = 8;
+  static final int CHECKING_DEGREE = 10;
 
   private static final int MOST_ELEMENTS = 2000;
   private static final int MOST_REFINEMENTS = 24;
@@ -68,6 +68,11 @@ final class ModeSolver {
   /** The mesh of higher degree, with the displacement of the latest root. */
   Discretisation checking() {
     return checking;
+  }
+
+  /** ds/dkx of the latest root on the working mesh. */
+  double workingSlope() {
+    return working.slope();
   }
 
   /** Factorisations spent so far, on both meshes. */
@@ -133,7 +138,12 @@ final class ModeSolver {
 
   /** Number of modes faster than s at any wavenumber between two, or more. */
   int count(double growth, double lowest, double highest) {
-    return working.stiffness().count(growth, lowest, highest, ky);
+    return working.stiffness().countBetween(growth, lowest, highest, ky);
+  }
+
+  /** Whether no mode is faster than s at any wavenumber between two. */
+  boolean positive(double growth, double lowest, double highest) {
+    return working.stiffness().positiveBetween(growth, lowest, highest, ky);
   }
 
   /**
@@ -147,19 +157,19 @@ final class ModeSolver {
     }
     double floor = floor(kx);
     double ceiling = fastestPossible * (1.0 + HAIR);
-    if (floor >= ceiling || working.stiffness().count(floor, kx, ky) <= order) {
-      return Optional.empty();
-    }
-    return Optional.of(refineUntilTrue(kx, order, floor, ceiling, guess));
+    return floor >= ceiling ? Optional.empty() : refineUntilTrue(kx, order, floor, ceiling, guess);
   }
 
-  private GrowthRoot refineUntilTrue(double kx, int order, double floor, double ceiling, double guess) {
+  private Optional<GrowthRoot> refineUntilTrue(double kx, int order, double floor, double ceiling, double guess) {
     double start = guess;
     for (int refinement = 0; refinement <= MOST_REFINEMENTS; refinement++) {
       double s = RootFinder.find(growthAxis(kx), order, floor, ceiling, start);
+      if (Double.isNaN(s)) {
+        return Optional.empty();
+      }
       GrowthRoot root = check(kx, s);
       if (root.error() <= problem.tolerance()) {
-        return root;
+        return Optional.of(root);
       }
       start = root.growth();
       double[] edges = MeshGrading.split(checking.stiffness().atmosphere(), checking.displacement().zeta);
@@ -206,10 +216,11 @@ final class ModeSolver {
     }
     double high = shortestUnstable * (1.0 + HAIR);
     double low = 1e-6 * high;
-    if (Double.isInfinite(high) || working.stiffness().count(slowest(), low, ky) <= order) {
-      return Double.isInfinite(high) ? high : 0.0;
+    if (Double.isInfinite(high)) {
+      return high;
     }
-    return RootFinder.find(wavenumberAxis(), order, low, high, Double.NaN);
+    double marginal = RootFinder.find(wavenumberAxis(), order, low, high, Double.NaN);
+    return Double.isNaN(marginal) ? 0.0 : marginal;
   }
 
   private RootFinder.Axis wavenumberAxis() {

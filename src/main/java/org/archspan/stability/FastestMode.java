@@ -1,0 +1,85 @@
+package org.archspan.stability;
+
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/**
+ * The fastest mode of one branch over a range of wavenumbers, with its proof. Works in {@link Scales}.
+ *
+ * @param root            the peak, on the checking mesh
+ * @param wavelengthError estimated relative error of its wavelength
+ * @param bound           growth rate that the branch exceeds nowhere in the range
+ * @param intervals       intervals of wavenumber that the proof took
+ */
+record FastestMode(GrowthRoot root, double wavelengthError, double bound, int intervals) {
+  /** The proof leaves this relative gap above the peak of order 0; its cost rises as the logarithm of it. */
+  private static final double GAP = 1e-6;
+  /** For higher orders, whose interval bound is of first order, the cost rises as its inverse square root. */
+  private static final double HIGHER_GAP = 1e-2;
+  private static final double[] FIRST_TRIES = {0.5, 0.3, 0.7, 0.15, 0.85, 0.07, 0.03, 0.93, 0.015};
+  private static final int MOST_CLIMBS = 30;
+
+  /**
+   * Finds it.
+   *
+   * @param order   0 for the fastest mode at each wavenumber
+   * @param lowest  lowest wavenumber of the range, 0 or more
+   * @param highest highest; infinite for the marginal one
+   * @return empty when the branch grows nowhere in the range
+   * @throws UnsolvedException when a tolerance is missed, or without field and without a shortest wave
+   */
+  static Optional<FastestMode> find(ModeSolver solver, int order, double lowest, double highest) {
+    double end = Math.min(highest, solver.marginalWavenumber(order));
+    if (end <= lowest) {
+      return Optional.empty();
+    }
+    PeakSearch search = new PeakSearch(solver, order, lowest, end);
+    Optional<GrowthRoot> start = firstVisible(solver, order, lowest, end);
+    if (start.isEmpty()) {
+      return Optional.empty();
+    }
+    WavenumberCover cover = new WavenumberCover(solver, order);
+    GrowthRoot peak = search.climb(start.get());
+    for (int climb = 0; climb < MOST_CLIMBS; climb++) {
+      double bound = peak.growth() * (1.0 + (order == 0 ? GAP : HIGHER_GAP));
+      OptionalDouble better = cover.violation(bound, lowest, end);
+      if (better.isEmpty()) {
+        return Optional.of(polished(solver, order, peak, bound, cover.intervals(), lowest, end));
+      }
+      peak = search.climb(solver.growth(better.getAsDouble(), order, bound).orElseThrow());
+    }
+    throw new UnsolvedException("the growth curve of mode " + order + " has more than " + MOST_CLIMBS + " peaks");
+  }
+
+  private static Optional<GrowthRoot> firstVisible(ModeSolver solver, int order, double lowest, double end) {
+    for (double share : FIRST_TRIES) {
+      Optional<GrowthRoot> root = solver.growth(lowest + share * (end - lowest), order, Double.NaN);
+      if (root.isPresent()) {
+        return root;
+      }
+    }
+    return Optional.empty();
+  }
+
+  /** Refines the peak on the checking mesh; the shift it asks for is the error of the wavelength. */
+  private static FastestMode polished(ModeSolver solver, int order, GrowthRoot peak, double bound, int intervals,
+      double lowest, double end) {
+    double k = peak.wavenumber();
+    if (k <= lowest || k >= end) {
+      return new FastestMode(peak, 0.0, bound, intervals);
+    }
+    double step = 1e-3 * k;
+    Optional<GrowthRoot> beside = solver.growth(k - step, order, peak.growth());
+    GrowthRoot here = solver.growth(k, order, peak.growth()).orElse(peak);
+    double workingSlope = solver.workingSlope();
+    if (beside.isEmpty()) {
+      return new FastestMode(here, Double.NaN, bound, intervals);
+    }
+    double curvature = (here.slope() - beside.get().slope()) / step;
+    double shift = -here.slope() / curvature;
+    double error = Math.abs((workingSlope - here.slope()) / curvature) / k + Math.abs(shift) / k
+        + here.error() * here.growth() / Math.abs(curvature * k * k);
+    GrowthRoot polished = new GrowthRoot(k + shift, here.growth() + 0.5 * shift * here.slope(), 0.0, here.error());
+    return new FastestMode(polished, error, bound, intervals);
+  }
+}
