@@ -39,6 +39,17 @@ class ShootingReferenceTest {
         .fasterThan(edge * (1.0 + 1e-9), 0.5, 1.0)).isZero();
   }
 
+  /** Digits: converged dense and sparse SciPy solutions, benchmarks/peer; kx = 0.4, lid at 10 H. */
+  @ParameterizedTest
+  @CsvSource({"MIRROR, 0, 0.6372721022", "FLEXING, 0, 0.6466101414", "MIRROR, 1, 0.7299625664",
+      "FLEXING, 1, 0.7305786588"})
+  void agreesWithThePeerScripts(Parity parity, double ky, double expected) {
+    ShootingReference shooting = new ShootingReference(SimpleEquilibrium.tanh(1.0, 1.0, 10.0),
+        new GasClosure(1.0), CosmicRayClosure.instantDiffusion(), parity);
+    // 2e-10: rounding of the dense eigenvalues, 1e-10, and of the digits quoted
+    assertThat(shooting.growthRate(0.4, ky, 0)).isCloseTo(expected, within(2e-10));
+  }
+
   private static ShootingReference shooting(Equilibrium equilibrium, UniformAtmosphere atmosphere) {
     return new ShootingReference(equilibrium, new GasClosure(atmosphere.gasIndex()),
         new CosmicRayClosure(atmosphere.cosmicRayIndex(), atmosphere.diffusivity()), Parity.FLOOR);
