@@ -44,9 +44,11 @@ final class JavaSource {
     this.code = code;
   }
 
-  static List<JavaSource> under(Path root) throws IOException {
+  static List<JavaSource> under(Path root) {
     try (Stream<Path> paths = Files.walk(root)) {
       return paths.filter(p -> p.toString().endsWith(".java")).sorted().map(JavaSource::read).toList();
+    } catch (IOException e) {
+      throw new UncheckedIOException(e);
     }
   }
 

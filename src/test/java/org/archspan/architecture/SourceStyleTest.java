@@ -2,7 +2,6 @@ package org.archspan.architecture;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import java.io.IOException;
 import java.nio.file.Path;
 import java.util.List;
 import org.archspan.architecture.JavaSource.Declaration;
@@ -16,10 +15,11 @@ class SourceStyleTest {
   private static final int LONGEST_FILE = 300;
   private static final int LONGEST_METHOD = 40;
   private static final int LONGEST_KERNEL = 60;
+  private static final List<JavaSource> SOURCES = JavaSource.under(Path.of("src", "main", "java"));
 
   @Test
-  void everyPublicDoubleNamesItsUnit() throws IOException {
-    List<Declaration> doubles = sources().stream().flatMap(s -> s.publicDoubles().stream()).toList();
+  void everyPublicDoubleNamesItsUnit() {
+    List<Declaration> doubles = SOURCES.stream().flatMap(s -> s.publicDoubles().stream()).toList();
     // a floor: a reader that sees nothing would find no fault
     assertThat(doubles).hasSizeGreaterThan(50);
     assertThat(doubles.stream().filter(d -> !UnitWords.present(d.documentation())).map(Declaration::where))
@@ -27,15 +27,15 @@ class SourceStyleTest {
   }
 
   @Test
-  void filesStayShort() throws IOException {
-    assertThat(sources().stream().filter(s -> s.codeLines() > LONGEST_FILE)
+  void filesStayShort() {
+    assertThat(SOURCES.stream().filter(s -> s.codeLines() > LONGEST_FILE)
         .map(s -> s.name() + ": " + s.codeLines() + " code lines").toList())
         .as("files over %d code lines", LONGEST_FILE).isEmpty();
   }
 
   @Test
-  void methodsStayShort() throws IOException {
-    assertThat(sources().stream().flatMap(s -> s.methods().stream()
+  void methodsStayShort() {
+    assertThat(SOURCES.stream().flatMap(s -> s.methods().stream()
         .filter(m -> m.codeLines() > (s.isKernel() ? LONGEST_KERNEL : LONGEST_METHOD)))
         .map(m -> m.where() + ": " + m.codeLines() + " code lines").toList())
         .as("methods over %d code lines (%d in kernels)", LONGEST_METHOD, LONGEST_KERNEL).isEmpty();
@@ -96,9 +96,5 @@ class SourceStyleTest {
         """);
     assertThat(source.codeLines()).isEqualTo(6);
     assertThat(source.methods()).singleElement().satisfies(m -> assertThat(m.codeLines()).isEqualTo(4));
-  }
-
-  private static List<JavaSource> sources() throws IOException {
-    return JavaSource.under(Path.of("src", "main", "java"));
   }
 }
