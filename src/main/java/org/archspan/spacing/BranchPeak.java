@@ -15,7 +15,7 @@ import org.archspan.boundary.Parity;
  * @param unstableModes       number of modes of this parity that grow at this wavelength; -1 where a continuum makes
  *                            the number infinite
  * @param centroidHeight      height of the kinetic-energy centroid, cm; infinite for the halo continuum
- * @param columnContrast      surface-density contrast for a displacement of one scale height, dimensionless; 0 for modes
+ * @param columnContrast      surface-density contrast when the midplane layer moves by one scale height, dimensionless; 0 for modes
  *                            that flex the midplane; NaN for the halo continuum
  * @param heldBy              what confines the mode
  * @param tallerGrowthChange  relative change of the growth rate when the domain is 1.5 times as tall, dimensionless;

@@ -4,7 +4,8 @@ import org.archspan.boundary.Parity;
 
 /**
  * One mode on the solver's nodes. The displacement is {@code (-i X, -i Y, Z) exp(i kx x + i ky y + s t)}, normalised so
- * that the mass-weighted root-mean-square displacement within one scale height is one scale height.
+ * that the midplane layer moves by one scale height: the root-mean-square displacement, weighted by the square of the
+ * density, is one scale height.
  *
  * @param parity          symmetry about the midplane
  * @param order           mode order, 0 for the fastest

@@ -22,31 +22,32 @@ record FastestMode(GrowthRoot root, double wavelengthError, double bound, int in
   /**
    * Finds it.
    *
-   * @param order   0 for the fastest mode at each wavenumber
-   * @param lowest  lowest wavenumber of the range, 0 or more
-   * @param highest highest; infinite for the marginal one
-   * @return empty when the branch grows nowhere in the range
-   * @throws UnsolvedException when a tolerance is missed, or without field and without a shortest wave
+   * @param order    0 for the fastest mode at each wavenumber
+   * @param lowest   lowest wavenumber of the range, 0 or more
+   * @param highest  highest; infinite for the marginal one
+   * @param haloPeak greatest growth rate of the continuum above an open top, 0 where there is none
+   * @return empty when the branch grows nowhere in the range, or nowhere faster than the continuum
+   * @throws UnsolvedException when a tolerance is missed
    */
-  static Optional<FastestMode> find(ModeSolver solver, int order, double lowest, double highest) {
+  static Optional<FastestMode> find(ModeSolver solver, int order, double lowest, double highest, double haloPeak) {
     double end = Math.min(highest, solver.marginalWavenumber(order));
     if (end <= lowest) {
       return Optional.empty();
     }
     PeakSearch search = new PeakSearch(solver, order, lowest, end);
-    Optional<GrowthRoot> start = firstVisible(solver, order, lowest, end);
-    if (start.isEmpty()) {
-      return Optional.empty();
-    }
     WavenumberCover cover = new WavenumberCover(solver, order);
-    GrowthRoot peak = search.climb(start.get());
+    Optional<GrowthRoot> peak = firstVisible(solver, order, lowest, end).map(search::climb);
     for (int climb = 0; climb < MOST_CLIMBS; climb++) {
-      double bound = peak.growth() * (1.0 + (order == 0 ? GAP : HIGHER_GAP));
+      double known = Math.max(haloPeak, peak.map(GrowthRoot::growth).orElse(0.0));
+      if (known == 0.0) {
+        return Optional.empty();
+      }
+      double bound = known * (1.0 + (order == 0 ? GAP : HIGHER_GAP));
       OptionalDouble better = cover.violation(bound, lowest, end);
       if (better.isEmpty()) {
-        return Optional.of(polished(solver, order, peak, bound, cover.intervals(), lowest, end));
+        return peak.map(root -> polished(solver, order, root, bound, cover.intervals(), lowest, end));
       }
-      peak = search.climb(solver.growth(better.getAsDouble(), order, bound).orElseThrow());
+      peak = solver.growth(better.getAsDouble(), order, bound).map(search::climb);
     }
     throw new UnsolvedException("the growth curve of mode " + order + " has more than " + MOST_CLIMBS + " peaks");
   }

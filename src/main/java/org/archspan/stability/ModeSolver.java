@@ -101,9 +101,14 @@ final class ModeSolver {
     return halo == null ? 0.0 : halo.growth(kx, ky, fastestPossible);
   }
 
-  /** ds/dkx of that edge. */
-  double haloEdgeSlope(double growth, double kx) {
-    return halo.slope(growth, kx, ky);
+  /** The greatest growth rate of that edge over a range of wavenumbers; empty where the atmosphere above is stable. */
+  Optional<GrowthRoot> haloPeak(double lowest, double highest) {
+    double end = Math.min(highest, shortestUnstable);
+    if (halo == null || fastestPossible == 0.0 || !(end > lowest) || Double.isInfinite(end)) {
+      return Optional.empty();
+    }
+    GrowthRoot peak = halo.peak(lowest, end, ky, fastestPossible);
+    return peak.growth() > 0.0 ? Optional.of(peak) : Optional.empty();
   }
 
   /** A growth rate just above whatever is not a discrete mode. */

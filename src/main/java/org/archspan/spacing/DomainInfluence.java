@@ -1,0 +1,88 @@
+package org.archspan.spacing;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.archspan.boundary.TopBoundary;
+import org.archspan.disk.Disk;
+import org.archspan.disk.RefusedModelException;
+import org.archspan.equilibrium.Equilibrium;
+import org.archspan.stability.Peak;
+
+/** How much each mode owes to the upper end of the domain: the same search in a domain 1.5 times as tall. */
+final class DomainInfluence {
+  static final double TALLER = 1.5;
+  /** A mode whose growth rate or wavelength moves by more than this is held by the lid. */
+  static final double HELD = 0.05;
+  private static final int MORE_BRANCHES = 4;
+
+  private final List<BranchSearch.Found> taller;
+  private final boolean open;
+
+  DomainInfluence(Disk disk, Equilibrium equilibrium, SearchOptions options, WaveRange range) {
+    open = equilibrium.topBoundary() == TopBoundary.OPEN;
+    taller = search(disk, equilibrium, options, range);
+  }
+
+  private static List<BranchSearch.Found> search(Disk disk, Equilibrium equilibrium, SearchOptions options,
+      WaveRange range) {
+    double top = equilibrium.bottom() + TALLER * (equilibrium.top() - equilibrium.bottom());
+    Equilibrium stretched = equilibrium.withTop(top);
+    if (stretched.top() < top) {
+      return List.of();
+    }
+    try {
+      return new BranchSearch(disk, stretched, options, range, options.branches() + MORE_BRANCHES).found();
+    } catch (RefusedModelException impossible) {
+      return List.of();
+    }
+  }
+
+  /** Every peak with what holds it. */
+  List<BranchPeak> judge(List<BranchSearch.Found> found) {
+    List<BranchPeak> judged = new ArrayList<>();
+    for (BranchSearch.Found branch : found) {
+      judged.add(judge(branch));
+    }
+    return judged;
+  }
+
+  private BranchPeak judge(BranchSearch.Found branch) {
+    Peak peak = branch.peak();
+    double growthChange = Double.NaN;
+    double wavelengthChange = Double.NaN;
+    Optional<Peak> match = match(branch);
+    if (match.isPresent()) {
+      growthChange = match.get().growthRate() / peak.growthRate() - 1.0;
+      wavelengthChange = peak.wavenumber() / match.get().wavenumber() - 1.0;
+    }
+    boolean lid = !(Math.abs(growthChange) <= HELD && Math.abs(wavelengthChange) <= HELD);
+    double truncation = open && match.isPresent() ? 1.0 : 0.0;
+    return new BranchPeak(branch.parity(), peak.order(), peak.wavenumber(),
+        branch.solver().problem().crossWavenumber(), peak.growthRate(),
+        peak.growthError() + (truncation > 0.0 ? Math.abs(growthChange) : 0.0),
+        peak.wavelengthError() + (truncation > 0.0 ? Math.abs(wavelengthChange) : 0.0), peak.unstableModes(),
+        peak.centroidHeight(), peak.columnContrast(), lid ? HeldBy.LID : HeldBy.DISK, growthChange, wavelengthChange);
+  }
+
+  /** The branch of the taller domain that comes nearest in wavelength, growth and height: orders may have shifted. */
+  private Optional<Peak> match(BranchSearch.Found branch) {
+    Peak best = null;
+    double least = Double.POSITIVE_INFINITY;
+    for (BranchSearch.Found candidate : taller) {
+      if (candidate.parity() == branch.parity()) {
+        double distance = distance(branch.peak(), candidate.peak());
+        if (distance < least) {
+          least = distance;
+          best = candidate.peak();
+        }
+      }
+    }
+    return Optional.ofNullable(best);
+  }
+
+  private static double distance(Peak a, Peak b) {
+    return Math.abs(Math.log(a.wavenumber() / b.wavenumber())) + Math.abs(Math.log(a.growthRate() / b.growthRate()))
+        + Math.abs(Math.log(a.centroidHeight() / b.centroidHeight()));
+  }
+}

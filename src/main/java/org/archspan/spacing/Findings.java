@@ -1,0 +1,65 @@
+package org.archspan.spacing;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import org.archspan.boundary.TopBoundary;
+import org.archspan.equilibrium.Equilibrium;
+
+/** What a reader of the result must know, one sentence each. */
+final class Findings {
+  private final List<String> sentences = new ArrayList<>();
+
+  static List<String> of(Equilibrium equilibrium, List<BranchPeak> branches, Optional<BranchPeak> fastest,
+      Optional<Integer> spacing, SearchOptions options) {
+    Findings findings = new Findings();
+    fastest.ifPresent(peak -> {
+      findings.aboutFastest(peak, equilibrium);
+      findings.aboutSpacing(branches, peak, spacing, options);
+      findings.aboutLid(spacing.map(branches::get).orElse(peak), equilibrium);
+    });
+    return List.copyOf(findings.sentences);
+  }
+
+  private void aboutFastest(BranchPeak peak, Equilibrium equilibrium) {
+    if (peak.heldBy() == HeldBy.HALO) {
+      sentences.add("The fastest growth is the edge of the continuum of the uniform atmosphere above the disk: no"
+          + " discrete mode of the disk grows faster, and the disk does not choose this wavelength.");
+    }
+    if (peak.wavenumber() == 0.0) {
+      sentences.add("Growth rises towards infinite wavelength along the field: the gas interchanges without bending the"
+          + " field, and no spacing along the field follows.");
+    }
+    if (peak.heldBy() != HeldBy.HALO && peak.centroidHeight() > 0.8 * equilibrium.top()) {
+      sentences.add("The fastest mode has its kinetic energy in the uppermost fifth of the domain.");
+    }
+  }
+
+  private void aboutSpacing(List<BranchPeak> branches, BranchPeak fastest, Optional<Integer> spacing,
+      SearchOptions options) {
+    String limit = options.gatheringHeight().inScaleHeights()
+        ? String.format(Locale.ROOT, "%.3g scale heights", options.gatheringHeight().value()) : "the height asked for";
+    if (spacing.isEmpty()) {
+      sentences.add("No unstable branch has its kinetic-energy centroid within " + limit + " of the midplane: nothing"
+          + " gathers the disk's own gas, and the spacing given is that of the fastest growth anywhere.");
+    } else if (branches.get(spacing.get()) != fastest) {
+      sentences.add("The fastest growth of all is not the one that gathers the disk's own gas; the spacing is that of"
+          + " the fastest branch whose kinetic-energy centroid lies within " + limit + ".");
+    }
+  }
+
+  private void aboutLid(BranchPeak peak, Equilibrium equilibrium) {
+    if (peak.heldBy() == HeldBy.HALO) {
+      return;
+    }
+    if (Double.isNaN(peak.tallerGrowthChange())) {
+      sentences.add("The influence of the upper boundary could not be measured: no taller domain can be built.");
+    } else if (peak.heldBy() == HeldBy.LID) {
+      sentences.add(String.format(Locale.ROOT, "The %s decides this mode: in a domain 1.5 times as tall its wavelength"
+          + " changes by %+.1f per cent and its growth rate by %+.1f per cent.",
+          equilibrium.topBoundary() == TopBoundary.LID ? "lid" : "upper boundary",
+          100.0 * peak.tallerWavelengthChange(), 100.0 * peak.tallerGrowthChange()));
+    }
+  }
+}

@@ -1,0 +1,89 @@
+package org.archspan.spacing;
+
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.archspan.disk.Disk;
+import org.archspan.equilibrium.Equilibrium;
+import org.archspan.equilibrium.EquilibriumBuilder;
+import org.archspan.equilibrium.ForceBalance;
+import org.archspan.stability.GrowthPoint;
+import org.archspan.stability.ShortCrossWaves;
+
+/** The main job: from a disk to its fastest mode and its spacing. Immutable. */
+public final class SpacingStudy {
+  private final Disk disk;
+  private final SearchOptions options;
+  private final Arm arm;
+
+  /** A study of a disk. */
+  public SpacingStudy(Disk disk, SearchOptions options, Arm arm) {
+    this.disk = disk;
+    this.options = options;
+    this.arm = arm;
+  }
+
+  /**
+   * Solves.
+   *
+   * @throws org.archspan.disk.RefusedModelException  when the equilibrium does not exist or the range is empty
+   * @throws org.archspan.stability.UnsolvedException when the tolerance is missed
+   */
+  public SpacingResult solve() {
+    Equilibrium equilibrium = EquilibriumBuilder.build(disk, options.tolerance());
+    WaveRange range = WaveRange.of(options, equilibrium);
+    BranchSearch search = new BranchSearch(disk, equilibrium, options, range, options.branches());
+    List<BranchPeak> branches = new DomainInfluence(disk, equilibrium, options, range).judge(search.found()).stream()
+        .sorted(Comparator.comparingDouble(BranchPeak::growthRate).reversed()).toList();
+    Optional<BranchPeak> fastest = fastest(branches, search, range);
+    double gatheringHeight = options.gatheringHeight().resolve(equilibrium.scaleHeight());
+    Optional<Integer> spacing = gathering(branches, equilibrium.bottom() + gatheringHeight);
+    Optional<CloudComplex> complex = spacing.map(branches::get).or(() -> fastest)
+        .filter(peak -> peak.wavenumber() > 0.0).map(peak -> complex(equilibrium, peak));
+    return new SpacingResult(equilibrium, ForceBalance.residual(equilibrium), branches, fastest, spacing,
+        acrossLimit(equilibrium), longestStable(search), complex, GrowthCurves.of(search, range),
+        search.certificate(), gatheringHeight,
+        Findings.of(equilibrium, branches, fastest, spacing, options));
+  }
+
+  /** The fastest branch, or the continuum of the atmosphere above where that is faster. */
+  private static Optional<BranchPeak> fastest(List<BranchPeak> branches, BranchSearch search, WaveRange range) {
+    Optional<BranchPeak> discrete = branches.stream().findFirst();
+    Optional<GrowthPoint> halo = search.halo()
+        .filter(edge -> edge.growthRate() >= discrete.map(BranchPeak::growthRate).orElse(0.0));
+    return halo.map(edge -> new BranchPeak(search.solvers().get(0).problem().parity(), 0, edge.wavenumber(),
+        range.crossWavenumber(), edge.growthRate(), edge.relativeError(), edge.relativeError(), -1,
+        Double.POSITIVE_INFINITY, Double.NaN, HeldBy.HALO, 0.0, 0.0)).or(() -> discrete);
+  }
+
+  private static Optional<Integer> gathering(List<BranchPeak> branches, double highestCentroid) {
+    for (int i = 0; i < branches.size(); i++) {
+      if (branches.get(i).centroidHeight() <= highestCentroid && branches.get(i).wavenumber() > 0.0) {
+        return Optional.of(i);
+      }
+    }
+    return Optional.empty();
+  }
+
+  private AcrossLimit acrossLimit(Equilibrium equilibrium) {
+    ShortCrossWaves.Fastest fastest =
+        new ShortCrossWaves(equilibrium, disk.gasClosure(), disk.cosmicRays().closure()).fastest();
+    return new AcrossLimit(fastest.growthRate(), fastest.wavenumber(), fastest.height());
+  }
+
+  private static OptionalDouble longestStable(BranchSearch search) {
+    double marginal = search.marginalWavenumber();
+    return marginal > 0.0 && Double.isFinite(marginal) ? OptionalDouble.of(2.0 * Math.PI / marginal)
+        : OptionalDouble.empty();
+  }
+
+  private CloudComplex complex(Equilibrium equilibrium, BranchPeak peak) {
+    double perWidth = equilibrium.surfaceDensity() * peak.wavelength();
+    OptionalDouble mass = arm.width().isPresent() ? OptionalDouble.of(perWidth * arm.width().getAsDouble())
+        : OptionalDouble.empty();
+    OptionalDouble eFoldings = arm.crossingTime().isPresent()
+        ? OptionalDouble.of(arm.crossingTime().getAsDouble() * peak.growthRate()) : OptionalDouble.empty();
+    return new CloudComplex(perWidth, mass, eFoldings);
+  }
+}
