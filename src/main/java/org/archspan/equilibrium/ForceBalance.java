@@ -5,7 +5,7 @@ package org.archspan.equilibrium;
  * the drop of total pressure is compared with the weight between.
  */
 public final class ForceBalance {
-  private static final int SLABS = 400;
+  private static final int SLABS = 100;
 
   private ForceBalance() {
   }

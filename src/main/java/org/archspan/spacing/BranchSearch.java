@@ -101,7 +101,6 @@ final class BranchSearch {
       }
     }
     long spent = solvers.stream().mapToLong(BranchSolver::factorisations).sum();
-    return new Certificate(bound, 2.0 * Math.PI / Math.min(range.highest(), Double.MAX_VALUE),
-        2.0 * Math.PI / range.lowest(), intervals, spent);
+    return new Certificate(bound, 2.0 * Math.PI / range.highest(), 2.0 * Math.PI / range.lowest(), intervals, spent);
   }
 }

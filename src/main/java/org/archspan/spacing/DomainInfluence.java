@@ -62,27 +62,22 @@ final class DomainInfluence {
         branch.solver().problem().crossWavenumber(), peak.growthRate(),
         peak.growthError() + (truncation > 0.0 ? Math.abs(growthChange) : 0.0),
         peak.wavelengthError() + (truncation > 0.0 ? Math.abs(wavelengthChange) : 0.0), peak.unstableModes(),
-        peak.centroidHeight(), peak.columnContrast(), lid ? HeldBy.LID : HeldBy.DISK, growthChange, wavelengthChange);
+        peak.mode().centroidHeight(), peak.mode().columnContrast(), lid ? HeldBy.LID : HeldBy.DISK, growthChange, wavelengthChange);
   }
 
-  /** The branch of the taller domain that comes nearest in wavelength, growth and height: orders may have shifted. */
+  /** The branch of the taller domain whose shape is most like this one: orders may have shifted. */
   private Optional<Peak> match(BranchSearch.Found branch) {
     Peak best = null;
-    double least = Double.POSITIVE_INFINITY;
+    double greatest = 0.0;
     for (BranchSearch.Found candidate : taller) {
       if (candidate.parity() == branch.parity()) {
-        double distance = distance(branch.peak(), candidate.peak());
-        if (distance < least) {
-          least = distance;
+        double overlap = ShapeOverlap.of(branch.peak().mode(), candidate.peak().mode());
+        if (overlap > greatest) {
+          greatest = overlap;
           best = candidate.peak();
         }
       }
     }
     return Optional.ofNullable(best);
-  }
-
-  private static double distance(Peak a, Peak b) {
-    return Math.abs(Math.log(a.wavenumber() / b.wavenumber())) + Math.abs(Math.log(a.growthRate() / b.growthRate()))
-        + Math.abs(Math.log(a.centroidHeight() / b.centroidHeight()));
   }
 }

@@ -102,10 +102,10 @@ public final class BranchSolver {
 
   private Peak peak(int order, FastestMode found) {
     GrowthRoot root = found.root();
-    ModeShape shape = new ModeShape(solver);
     double wavenumber = root.wavenumber() / length;
+    EigenMode mode = new ModeShape(solver).mode(order, wavenumber, root.growth() / time);
     return new Peak(order, wavenumber, root.growth() / time, root.error(), found.wavelengthError(),
-        root.wavenumber() > 0.0 ? unstableModes(wavenumber) : -1, shape.centroidHeight(), shape.columnContrast(),
+        root.wavenumber() > 0.0 ? unstableModes(wavenumber) : -1, mode,
         found.bound() / time, found.intervals());
   }
 

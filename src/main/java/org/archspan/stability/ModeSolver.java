@@ -18,6 +18,7 @@ final class ModeSolver {
   private static final int MOST_REFINEMENTS = 24;
   private static final int NODES_PER_HALF_WAVE = 4;
   private static final double HAIR = 1e-9;
+  private static final double ROUNDING_OF_SQUARE = 1e-12;
 
   private final ModeProblem problem;
   private final Scales scales;
@@ -173,7 +174,7 @@ final class ModeSolver {
         return Optional.empty();
       }
       GrowthRoot root = check(kx, s);
-      if (root.error() <= problem.tolerance()) {
+      if (root.error() <= problem.tolerance() || lostInRounding(root)) {
         return Optional.of(root);
       }
       start = root.growth();
@@ -198,6 +199,12 @@ final class ModeSolver {
     double better = s + change;
     double error = Math.abs(change) / Math.abs(better) + checking.displacement().rounding(s);
     return new GrowthRoot(kx, better, checking.slope(), error);
+  }
+
+  /** Close to the margin s^2 itself drowns in rounding; a finer mesh does not help, and the error says so. */
+  private boolean lostInRounding(GrowthRoot root) {
+    double squareError = 2.0 * root.error() * root.growth() * root.growth();
+    return squareError <= ROUNDING_OF_SQUARE * fastestPossible * fastestPossible;
   }
 
   private RootFinder.Axis growthAxis(double kx) {

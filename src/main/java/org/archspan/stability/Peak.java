@@ -9,11 +9,10 @@ package org.archspan.stability;
  * @param growthError     estimated relative error of the growth rate, dimensionless
  * @param wavelengthError estimated relative error of the wavelength, dimensionless
  * @param unstableModes   number of modes of this parity that grow at this wavelength; -1 for infinitely many
- * @param centroidHeight  height of the kinetic-energy centroid, cm
- * @param columnContrast  surface-density contrast when the midplane layer moves by one scale height, dimensionless
+ * @param mode            its shape, centroid and column contrast
  * @param bound           growth rate that the branch exceeds at no wavelength of the range, s^-1
  * @param intervals       wavenumber intervals that this proof took
  */
 public record Peak(int order, double wavenumber, double growthRate, double growthError, double wavelengthError,
-    int unstableModes, double centroidHeight, double columnContrast, double bound, int intervals) {
+    int unstableModes, EigenMode mode, double bound, int intervals) {
 }
