@@ -34,12 +34,29 @@ public final class ElementAssembly {
       packed[diagonal] += c[node + pairFirst[diagonal - offset]];
       diagonal += n - i;
     }
-    for (int q = 0; q < n; q++) {
-      double weight = a[node + q];
-      int products = q * pairs;
-      for (int pair = 0; pair < pairs; pair++) {
-        packed[offset + pair] += weight * slopeProducts[products + pair];
-      }
+    int q = 0;
+    for (; q + 2 < n; q += 3) {
+      addThree(packed, offset, pairs, slopeProducts, q * pairs, a[node + q], a[node + q + 1], a[node + q + 2]);
+    }
+    for (; q < n; q++) {
+      addOne(packed, offset, pairs, slopeProducts, q * pairs, a[node + q]);
+    }
+  }
+
+  /** Three nodes in one pass over the matrix: a third of the loads and stores. */
+  private static void addThree(double[] packed, int offset, int pairs, double[] products, int start, double first,
+      double second, double third) {
+    int next = start + pairs;
+    int last = next + pairs;
+    for (int pair = 0; pair < pairs; pair++) {
+      packed[offset + pair] += first * products[start + pair] + second * products[next + pair]
+          + third * products[last + pair];
+    }
+  }
+
+  private static void addOne(double[] packed, int offset, int pairs, double[] products, int start, double weight) {
+    for (int pair = 0; pair < pairs; pair++) {
+      packed[offset + pair] += weight * products[start + pair];
     }
   }
 }

@@ -22,26 +22,48 @@ public final class PackedElimination {
   public static int eliminate(double[] packed, int offset, int n, int eliminated) {
     int negative = 0;
     int row = offset;
-    for (int k = 0; k < eliminated; k++) {
+    int k = 0;
+    for (; k + 1 < eliminated; k += 2) {
       int length = n - k;
-      double pivot = packed[row];
-      if (pivot < 0.0) {
-        negative++;
-      }
-      double inverse = 1.0 / pivot;
-      int target = row + length;
-      for (int i = 1; i < length; i++) {
-        double factor = packed[row + i] * inverse;
-        int source = row + i;
+      int next = row + length;
+      double firstInverse = 1.0 / packed[row];
+      subtract(packed, next, row + 1, length - 1, packed[row + 1] * firstInverse);
+      double secondInverse = 1.0 / packed[next];
+      negative += (firstInverse < 0.0 ? 1 : 0) + (secondInverse < 0.0 ? 1 : 0);
+      int target = next + length - 1;
+      for (int i = 2; i < length; i++) {
         int width = length - i;
-        for (int j = 0; j < width; j++) {
-          packed[target + j] -= factor * packed[source + j];
-        }
+        subtractTwo(packed, target, row + i, next + i - 1, width, packed[row + i] * firstInverse,
+            packed[next + i - 1] * secondInverse);
         target += width;
       }
-      row += length;
+      row = next + length - 1;
+    }
+    if (k < eliminated) {
+      int length = n - k;
+      double inverse = 1.0 / packed[row];
+      negative += inverse < 0.0 ? 1 : 0;
+      int target = row + length;
+      for (int i = 1; i < length; i++) {
+        subtract(packed, target, row + i, length - i, packed[row + i] * inverse);
+        target += length - i;
+      }
     }
     return negative;
+  }
+
+  private static void subtract(double[] packed, int target, int source, int width, double factor) {
+    for (int j = 0; j < width; j++) {
+      packed[target + j] -= factor * packed[source + j];
+    }
+  }
+
+  /** Two pivots in one pass over the remaining rows: half of the loads and stores. */
+  private static void subtractTwo(double[] packed, int target, int first, int second, int width, double firstFactor,
+      double secondFactor) {
+    for (int j = 0; j < width; j++) {
+      packed[target + j] -= firstFactor * packed[first + j] + secondFactor * packed[second + j];
+    }
   }
 
   /**

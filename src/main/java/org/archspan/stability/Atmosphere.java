@@ -21,6 +21,12 @@ final class Atmosphere {
   final double[] cosmicRayPerMass;
   /** Minus d ln(rho)/dz. */
   final double[] inverseScaleHeight;
+  /** g times minus d ln(rho)/dz, and g^2. */
+  final double[] fall;
+  final double[] gravitySquared;
+  /** Quadrature weights for products of two, one and no slopes taken on the reference element. */
+  final double[] slopeWeight;
+  final double[] mixedWeight;
 
   Atmosphere(Equilibrium equilibrium, Scales scales, Mesh mesh) {
     this.mesh = mesh;
@@ -32,17 +38,25 @@ final class Atmosphere {
     gasPerMass = new double[n];
     cosmicRayPerMass = new double[n];
     inverseScaleHeight = new double[n];
+    fall = new double[n];
+    gravitySquared = new double[n];
+    slopeWeight = new double[n];
+    mixedWeight = new double[n];
     double[] reference = mesh.reference().weights();
     double energy = scales.speed() * scales.speed();
     for (int i = 0; i < n; i++) {
       int e = i / reference.length;
       weight[i] = 0.5 * mesh.length(e) * reference[i % reference.length];
+      mixedWeight[i] = reference[i % reference.length];
+      slopeWeight[i] = 2.0 / mesh.length(e) * reference[i % reference.length];
       GasState state = equilibrium.at(insideElement(mesh, e, height[i]) * scales.length());
       gravity[i] = state.gravity() * scales.length() / energy;
       alfvenSquared[i] = 2.0 * state.magneticPerMass() / energy;
       gasPerMass[i] = state.gasPerMass() / energy;
       cosmicRayPerMass[i] = state.cosmicRayPerMass() / energy;
       inverseScaleHeight[i] = -state.logDensityGradient() * scales.length();
+      fall[i] = gravity[i] * inverseScaleHeight[i];
+      gravitySquared[i] = gravity[i] * gravity[i];
     }
   }
 

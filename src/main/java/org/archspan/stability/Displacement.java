@@ -15,7 +15,7 @@ final class Displacement {
 
   private final Atmosphere atmosphere;
   private final PressureResponse response;
-  private final double[] slope;
+  private final double[] verticalSlope;
   /** sqrt(rho) times X, Y, Z and the divergence D on the nodes. */
   final double[] along;
   final double[] across;
@@ -25,20 +25,16 @@ final class Displacement {
   /** Derivatives of the form along the vector with respect to s and kx. */
   double byGrowth;
   double byWavenumber;
-  /** Integral of rho (X^2 + Y^2 + Z^2), and of that times height. */
-  double inertia;
-  double inertiaMoment;
 
-  private double magnitude;
   private double growth;
   private double kx;
-  private double ky;
+  private double decay;
 
   Displacement(Atmosphere atmosphere, PressureResponse response) {
     this.atmosphere = atmosphere;
     this.response = response;
     int n = atmosphere.nodes();
-    slope = new double[n];
+    verticalSlope = new double[n];
     along = new double[n];
     across = new double[n];
     zeta = new double[n];
@@ -46,113 +42,153 @@ final class Displacement {
   }
 
   /**
-   * Completes the displacement from {@link #zeta} and evaluates the slopes. O(elements * degree^2).
+   * Completes the displacement from {@link #zeta} and evaluates the slopes. O(elements * degree^2), no allocation.
    *
-   * @param growth s
-   * @param kx     along the field
-   * @param ky     across it
-   * @param decay  decay rate of zeta above an open top, 0 otherwise
+   * @param newGrowth s
+   * @param newKx     along the field
+   * @param ky        across it
+   * @param newDecay  decay rate of zeta above an open top, 0 otherwise
    */
-  void complete(double growth, double kx, double ky, double decay) {
-    this.growth = growth;
-    this.kx = kx;
-    this.ky = ky;
+  void complete(double newGrowth, double newKx, double ky, double newDecay) {
+    growth = newGrowth;
+    kx = newKx;
+    decay = newDecay;
     response.evaluate(growth, kx);
     differentiate();
     byGrowth = 0.0;
     byWavenumber = 0.0;
-    inertia = 0.0;
-    inertiaMoment = 0.0;
-    magnitude = 0.0;
-    int n = atmosphere.nodes();
-    for (int i = 0; i < n; i++) {
-      accumulate(i, slope[i], atmosphere.weight[i], atmosphere.height[i]);
-    }
+    int last = atmosphere.nodes() - 1;
     if (decay > 0.0) {
-      accumulateAbove(decay);
+      double below = verticalSlope[last];
+      verticalSlope[last] = (0.5 * atmosphere.inverseScaleHeight[last] - decay) * zeta[last];
+      horizontal(last, last + 1, ky);
+      slopes(last, last + 1, 0.5 / (decay * atmosphere.weight[last]));
+      verticalSlope[last] = below;
     }
+    horizontal(0, last + 1, ky);
+    slopes(0, last + 1, 1.0);
   }
 
+  /** sqrt(rho) Z' on the nodes: zeta' + zeta/(2 h). */
   private void differentiate() {
     ReferenceElement element = atmosphere.mesh.reference();
     double[] derivative = element.derivative();
+    double[] inverseScaleHeight = atmosphere.inverseScaleHeight;
     int n = element.degree() + 1;
     for (int e = 0; e < atmosphere.mesh.elements(); e++) {
       double scale = 2.0 / atmosphere.mesh.length(e);
+      int start = e * n;
       for (int i = 0; i < n; i++) {
         double sum = 0.0;
+        int row = i * n;
         for (int j = 0; j < n; j++) {
-          sum += derivative[i * n + j] * zeta[e * n + j];
+          sum += derivative[row + j] * zeta[start + j];
         }
-        slope[e * n + i] = scale * sum;
+        verticalSlope[start + i] = scale * sum + 0.5 * inverseScaleHeight[start + i] * zeta[start + i];
       }
     }
   }
 
-  /** Adds the integrand at node i, with a given slope of zeta, times a weight. */
-  private void accumulate(int i, double zetaSlope, double weight, double height) {
-    double z = zeta[i];
-    double g = atmosphere.gravity[i];
-    double v = atmosphere.alfvenSquared[i];
-    double h = atmosphere.inverseScaleHeight[i];
-    double stiffness = response.gas * atmosphere.gasPerMass[i] + response.cosmicRay * atmosphere.cosmicRayPerMass[i];
-    double q = 1.0 / (growth * growth + stiffness * kx * kx);
-    double m = growth * growth * q;
-    double verticalSlope = zetaSlope + 0.5 * h * z;
-    double tension = growth * growth + kx * kx * v;
-    double squeeze = m * stiffness + v;
-    double y = -ky * (squeeze * verticalSlope - m * g * z) / (tension + squeeze * ky * ky);
-    double perpendicular = ky * y + verticalSlope;
-    double drive = stiffness * perpendicular - g * z;
-    double x = -kx * q * drive;
-    double d = kx * x + perpendicular;
-    double square = x * x + y * y + z * z;
-    double answer = atmosphere.cosmicRayPerMass[i] * d * d;
-    along[i] = x;
-    across[i] = y;
-    divergence[i] = d;
-    byGrowth += weight * (2.0 * growth * square + response.cosmicRayByGrowth * answer);
-    byWavenumber += weight * (2.0 * kx * (v * (y * y + z * z) - q * m * drive * drive)
-        + response.cosmicRayByWavenumber * answer);
-    magnitude += weight * (squeeze * verticalSlope * verticalSlope + (tension + g * h) * z * z);
-    inertia += weight * square;
-    inertiaMoment += weight * square * height;
+  /** The X, Y and D that make the form stationary at each node. */
+  private void horizontal(int from, int to, double ky) {
+    double[] gravity = atmosphere.gravity;
+    double[] alfvenSquared = atmosphere.alfvenSquared;
+    double[] gasPerMass = atmosphere.gasPerMass;
+    double[] cosmicRayPerMass = atmosphere.cosmicRayPerMass;
+    double gas = response.gas;
+    double cosmicRay = response.cosmicRay;
+    double growthSquared = growth * growth;
+    double alongSquared = kx * kx;
+    double acrossSquared = ky * ky;
+    for (int i = from; i < to; i++) {
+      double v = alfvenSquared[i];
+      double fall = gravity[i] * zeta[i];
+      double slope = verticalSlope[i];
+      double stiffness = gas * gasPerMass[i] + cosmicRay * cosmicRayPerMass[i];
+      double q = 1.0 / (growthSquared + stiffness * alongSquared);
+      double m = growthSquared * q;
+      double squeeze = m * stiffness + v;
+      double y = -ky * (squeeze * slope - m * fall) / (growthSquared + alongSquared * v + squeeze * acrossSquared);
+      double perpendicular = ky * y + slope;
+      double x = -kx * q * (stiffness * perpendicular - fall);
+      along[i] = x;
+      across[i] = y;
+      divergence[i] = kx * x + perpendicular;
+    }
   }
 
-  /** Above an open top everything falls as exp(-2 decay z): the integrals are the top's integrand over 2 decay. */
-  private void accumulateAbove(double decay) {
-    int last = atmosphere.nodes() - 1;
-    double top = atmosphere.height[last];
-    accumulate(last, -decay * zeta[last], 0.5 / decay, top + 0.5 / decay);
-    slopeAtTop();
+  /** Adds the derivatives of the full form at fixed X, Y, Z over a range of nodes, times a factor. */
+  private void slopes(int from, int to, double factor) {
+    double[] weight = atmosphere.weight;
+    double inertia = 0.0;
+    double bending = 0.0;
+    double work = 0.0;
+    double answer = 0.0;
+    double gas = response.gas;
+    double cosmicRay = response.cosmicRay;
+    for (int i = from; i < to; i++) {
+      double x = along[i];
+      double y = across[i];
+      double z = zeta[i];
+      double d = divergence[i];
+      double w = weight[i];
+      double cosmicRays = atmosphere.cosmicRayPerMass[i];
+      double stiffness = gas * atmosphere.gasPerMass[i] + cosmicRay * cosmicRays;
+      inertia += w * (x * x + y * y + z * z);
+      bending += w * atmosphere.alfvenSquared[i] * (y * y + z * z);
+      work += w * x * (stiffness * d - atmosphere.gravity[i] * z);
+      answer += w * cosmicRays * d * d;
+    }
+    byGrowth += factor * (2.0 * growth * inertia + response.cosmicRayByGrowth * answer);
+    byWavenumber += factor * (2.0 * (work + kx * bending) + response.cosmicRayByWavenumber * answer);
   }
 
   /** Slopes of the form of the atmosphere at the top alone, for zeta = 1 without vertical variation. */
-  void uniformAtTop(double newGrowth, double newKx, double newKy) {
+  void uniformAtTop(double newGrowth, double newKx, double ky) {
     growth = newGrowth;
     kx = newKx;
-    ky = newKy;
     response.evaluate(growth, kx);
     byGrowth = 0.0;
     byWavenumber = 0.0;
     int last = atmosphere.nodes() - 1;
     zeta[last] = 1.0;
-    accumulate(last, 0.0, 1.0, 0.0);
-  }
-
-  /** Restores the pointwise values at the top, which belong to the side below it. */
-  private void slopeAtTop() {
-    int last = atmosphere.nodes() - 1;
-    accumulate(last, slope[last], 0.0, 0.0);
+    verticalSlope[last] = 0.5 * atmosphere.inverseScaleHeight[last];
+    horizontal(last, last + 1, ky);
+    slopes(last, last + 1, 1.0);
   }
 
   /** Relative rounding error of a growth rate: terms of this size cancel in the form. */
   double rounding(double s) {
+    double magnitude = 0.0;
+    for (int i = 0; i < atmosphere.nodes(); i++) {
+      double z = zeta[i];
+      double slope = verticalSlope[i];
+      double v = atmosphere.alfvenSquared[i];
+      double flat = s * s + kx * kx * v + atmosphere.gravity[i] * atmosphere.inverseScaleHeight[i];
+      magnitude += atmosphere.weight[i] * ((atmosphere.gasPerMass[i] + v) * slope * slope + flat * z * z);
+    }
     return ROUNDING * magnitude / (s * byGrowth);
   }
 
-  /** Height of the kinetic-energy centroid. */
+  /** Height of the kinetic-energy centroid, including what lies above an open top. */
   double centroid() {
-    return inertiaMoment / inertia;
+    double inertia = 0.0;
+    double moment = 0.0;
+    for (int i = 0; i < atmosphere.nodes(); i++) {
+      double energy = atmosphere.weight[i] * square(i);
+      inertia += energy;
+      moment += energy * atmosphere.height[i];
+    }
+    if (decay > 0.0) {
+      int last = atmosphere.nodes() - 1;
+      double above = square(last) * 0.5 / decay;
+      inertia += above;
+      moment += above * (atmosphere.height[last] + 0.5 / decay);
+    }
+    return moment / inertia;
+  }
+
+  private double square(int i) {
+    return along[i] * along[i] + across[i] * across[i] + zeta[i] * zeta[i];
   }
 }

@@ -102,6 +102,7 @@ final class DynamicStiffness {
     if (!top.evaluate(form, atmosphere, atmosphere.nodes() - 1)) {
       return INFINITE;
     }
+    weigh();
     return condense() + tridiagonal.count(diagonal, offDiagonal, first, unknowns);
   }
 
@@ -111,7 +112,6 @@ final class DynamicStiffness {
     int negative = 0;
     diagonal[0] = 0.0;
     for (int e = 0; e < elements; e++) {
-      weigh(e, n);
       int offset = e * pairs;
       ElementAssembly.assemble(form.a, form.b, form.c, e * n, n, element.slopeProducts(), element.pairFirst(),
           element.pairSecond(), element.pairSlope(), element.pairSlopeReversed(), packed, offset);
@@ -124,13 +124,14 @@ final class DynamicStiffness {
     return negative;
   }
 
-  private void weigh(int e, int n) {
-    double slope = 2.0 / atmosphere.mesh.length(e);
-    for (int i = e * n; i < (e + 1) * n; i++) {
-      double weight = atmosphere.weight[i];
-      form.a[i] *= weight * slope * slope;
-      form.b[i] *= weight * slope;
-      form.c[i] *= weight;
+  private void weigh() {
+    double[] slopeWeight = atmosphere.slopeWeight;
+    double[] mixedWeight = atmosphere.mixedWeight;
+    double[] weight = atmosphere.weight;
+    for (int i = 0; i < weight.length; i++) {
+      form.a[i] *= slopeWeight[i];
+      form.b[i] *= mixedWeight[i];
+      form.c[i] *= weight[i];
     }
   }
 

@@ -25,6 +25,7 @@ final class ModeSolver {
   private final double ky;
   private Discretisation working;
   private Discretisation checking;
+  private WarmStart warmStart;
   private HaloEdge halo;
   private double fastestPossible;
   private double shortestUnstable;
@@ -41,6 +42,7 @@ final class ModeSolver {
     spentBefore = factorisations();
     working = new Discretisation(problem, scales, mesh);
     checking = new Discretisation(problem, scales, mesh.withDegree(CHECKING_DEGREE));
+    warmStart = new WarmStart(working, checking, ky, problem.tolerance());
     halo = problem.topBoundary() == org.archspan.boundary.TopBoundary.OPEN
         ? new HaloEdge(working.stiffness().atmosphere(), new PressureResponse(problem.gas(), problem.cosmicRays(), scales))
         : null;
@@ -169,11 +171,14 @@ final class ModeSolver {
   private Optional<GrowthRoot> refineUntilTrue(double kx, int order, double floor, double ceiling, double guess) {
     double start = guess;
     for (int refinement = 0; refinement <= MOST_REFINEMENTS; refinement++) {
-      double s = RootFinder.find(growthAxis(kx), order, floor, ceiling, start);
-      if (Double.isNaN(s)) {
-        return Optional.empty();
+      GrowthRoot root = Double.isNaN(start) ? null : warmStart.find(kx, order, floor, ceiling, start);
+      if (root == null) {
+        double s = RootFinder.find(growthAxis(kx), order, floor, ceiling, start);
+        if (Double.isNaN(s)) {
+          return Optional.empty();
+        }
+        root = check(kx, s);
       }
-      GrowthRoot root = check(kx, s);
       if (root.error() <= problem.tolerance() || lostInRounding(root)) {
         return Optional.of(root);
       }
