@@ -4,9 +4,9 @@ package org.archspan.units;
  * The units in which results are given.
  *
  * @param length               name of the unit of length
- * @param centimetresPerLength cm in one of it
+ * @param centimetresPerLength size of that unit, cm
  * @param time                 name of the unit of time
- * @param secondsPerTime       s in one of it
+ * @param secondsPerTime       size of that unit, s
  */
 public record OutputUnits(String length, double centimetresPerLength, String time, double secondsPerTime) {
   /** Parsecs and millions of years. */
@@ -42,22 +42,22 @@ public record OutputUnits(String length, double centimetresPerLength, String tim
     return centimetresPerLength < 0.01 * Constants.ASTRONOMICAL_UNIT;
   }
 
-  /** A length in cm in these units. */
+  /** A length (cm) in the unit of the output. */
   public double length(double centimetres) {
     return centimetres / centimetresPerLength;
   }
 
-  /** A time in s in these units. */
+  /** A time (s) in the unit of the output. */
   public double time(double seconds) {
     return seconds / secondsPerTime;
   }
 
-  /** A growth rate in s^-1 in these units, one over the unit of time. */
+  /** A growth rate (s^-1) over the inverse of the unit of time, dimensionless. */
   public double rate(double perSecond) {
     return perSecond * secondsPerTime;
   }
 
-  /** A wavenumber in cm^-1 in these units, one over the unit of length. */
+  /** A wavenumber (cm^-1) over the inverse of the unit of length, dimensionless. */
   public double wavenumber(double perCentimetre) {
     return perCentimetre * centimetresPerLength;
   }
@@ -67,7 +67,7 @@ public record OutputUnits(String length, double centimetresPerLength, String tim
     return stellar() ? "g" : "Msun";
   }
 
-  /** A mass in g in that unit. */
+  /** A mass (g) in the unit of {@link #mass()}. */
   public double mass(double grams) {
     return stellar() ? grams : grams / Constants.SOLAR_MASS;
   }
@@ -77,7 +77,7 @@ public record OutputUnits(String length, double centimetresPerLength, String tim
     return stellar() ? "g/cm^2" : "Msun/pc^2";
   }
 
-  /** A surface density in g cm^-2 in that unit. */
+  /** A surface density (g cm^-2) in the unit of {@link #surfaceDensity()}. */
   public double surfaceDensity(double gramsPerSquareCentimetre) {
     return stellar() ? gramsPerSquareCentimetre
         : gramsPerSquareCentimetre * Constants.PARSEC * Constants.PARSEC / Constants.SOLAR_MASS;
@@ -88,7 +88,7 @@ public record OutputUnits(String length, double centimetresPerLength, String tim
     return stellar() ? "G" : "uG";
   }
 
-  /** A field strength in G in that unit. */
+  /** A field strength (G) in the unit of {@link #field()}. */
   public double field(double gauss) {
     return stellar() ? gauss : 1e6 * gauss;
   }

@@ -3,7 +3,7 @@ package org.archspan.units;
 /**
  * A unit.
  *
- * @param factor    CGS units in one of it, of the dimension's own unit
+ * @param factor    its size, in units of the CGS unit of its dimension
  * @param dimension its dimension
  */
 public record Unit(double factor, Dimension dimension) {

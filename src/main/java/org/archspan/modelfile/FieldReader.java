@@ -1,0 +1,63 @@
+package org.archspan.modelfile;
+
+import java.util.OptionalDouble;
+import org.archspan.closure.CosmicRayClosure;
+import org.archspan.disk.CosmicRays;
+import org.archspan.disk.Gas;
+import org.archspan.disk.MagneticField;
+
+/** Makes the magnetic field and the cosmic rays of a model. */
+final class FieldReader {
+  private final Inputs inputs;
+
+  FieldReader(Inputs inputs) {
+    this.inputs = inputs;
+  }
+
+  MagneticField field(Gas gas) {
+    inputs.oneOf("field.pressure-ratio", "field.strength");
+    boolean balance = inputs.text("field.shape").orElse("constant-ratio").equals("balance");
+    if (gas instanceof Gas.Stratified stratified) {
+      return balance(stratified, balance);
+    }
+    if (balance) {
+      inputs.fault("field.shape", "\"balance\" without gas.stratum",
+          "a field that the balance leaves over needs a prescribed stratification");
+    }
+    OptionalDouble strength = inputs.number("field.strength");
+    return strength.isPresent() ? new MagneticField.BottomStrength(strength.getAsDouble())
+        : new MagneticField.ConstantRatio(inputs.number("field.pressure-ratio").orElse(0.0));
+  }
+
+  private MagneticField balance(Gas.Stratified gas, boolean shapeIsBalance) {
+    if (!shapeIsBalance) {
+      String allowed = "with gas.stratum the field follows from the balance: set field.shape = \"balance\"";
+      if (inputs.given("field.shape")) {
+        inputs.fault("field.shape", "found " + inputs.entry("field.shape").shown(), allowed);
+      } else {
+        inputs.missing("field.shape", allowed);
+      }
+    }
+    if (inputs.given("field.pressure-ratio")) {
+      inputs.fault("field.pressure-ratio", "given beside gas.stratum", "the balance decides the ratio; remove it");
+    }
+    if (gas.dispersion().isPresent() == inputs.given("field.strength")) {
+      String allowed = "with gas.stratum give exactly one of gas.dispersion and field.strength; the other follows";
+      if (inputs.given("field.strength")) {
+        inputs.fault("field.strength", "given beside gas.dispersion", allowed);
+      } else {
+        inputs.missing("field.strength", allowed);
+      }
+    }
+    return new MagneticField.Balance(inputs.number("field.strength"));
+  }
+
+  CosmicRays cosmicRays() {
+    inputs.oneOf("cosmic-rays.pressure-ratio", "cosmic-rays.pressure");
+    CosmicRayClosure closure = new CosmicRayClosure(inputs.number("cosmic-rays.adiabatic-index").orElse(4.0 / 3.0),
+        inputs.number("cosmic-rays.diffusivity").orElse(Double.POSITIVE_INFINITY));
+    OptionalDouble pressure = inputs.number("cosmic-rays.pressure");
+    return pressure.isPresent() ? new CosmicRays.BottomPressure(pressure.getAsDouble(), closure)
+        : new CosmicRays.PressureRatio(inputs.number("cosmic-rays.pressure-ratio").orElse(0.0), closure);
+  }
+}

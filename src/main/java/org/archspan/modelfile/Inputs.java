@@ -1,0 +1,122 @@
+package org.archspan.modelfile;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.archspan.disk.Height;
+
+/** The checked values of a model by key, and the faults found so far. */
+final class Inputs {
+  private final String source;
+  private final Map<String, Entry> entries;
+  private final Map<String, Object> values = new LinkedHashMap<>();
+  private final Map<String, Uncertainty> uncertainties = new LinkedHashMap<>();
+  private final List<Diagnostic> faults;
+
+  Inputs(String source, Map<String, Entry> entries, List<Diagnostic> faults) {
+    this.source = source;
+    this.entries = entries;
+    this.faults = faults;
+    ValueReader reader = new ValueReader(this);
+    for (String key : entries.keySet()) {
+      reader.read(key);
+    }
+  }
+
+  Entry entry(String key) {
+    return entries.get(key);
+  }
+
+  Map<String, Entry> entries() {
+    return entries;
+  }
+
+  void put(String key, Object value) {
+    values.put(key, value);
+  }
+
+  void put(String key, Uncertainty uncertainty) {
+    uncertainties.put(key, uncertainty);
+  }
+
+  Map<String, Uncertainty> uncertainties() {
+    return uncertainties;
+  }
+
+  List<Diagnostic> faults() {
+    return faults;
+  }
+
+  /** Whether the file gives the key, well or badly. */
+  boolean given(String key) {
+    return entries.containsKey(key) || entries.keySet().stream().anyMatch(name -> name.startsWith(key + "."));
+  }
+
+  OptionalDouble number(String key) {
+    return values.get(key) instanceof Double number ? OptionalDouble.of(number) : OptionalDouble.empty();
+  }
+
+  /** The number, or NaN where it is missing or faulty (a fault has been noted then). */
+  double required(String key, String why) {
+    if (!given(key)) {
+      missing(key, why);
+    }
+    return number(key).orElse(Double.NaN);
+  }
+
+  Optional<String> text(String key) {
+    return values.get(key) instanceof String text ? Optional.of(text) : Optional.empty();
+  }
+
+  Optional<Height> height(String key) {
+    return values.get(key) instanceof Height height ? Optional.of(height) : Optional.empty();
+  }
+
+  /** How many tables an array holds. */
+  int tables(String array) {
+    int count = 0;
+    while (given(array + "." + (count + 1))) {
+      count++;
+    }
+    return count;
+  }
+
+  void missing(String key, String why) {
+    faults.add(new Diagnostic(source, 0, key, "missing", why));
+  }
+
+  void fault(String key, String found, String allowed) {
+    Entry entry = entries.get(key);
+    if (entry == null) {
+      entry = entries.entrySet().stream().filter(e -> e.getKey().startsWith(key + ".")).map(Map.Entry::getValue)
+          .findFirst().orElse(new Entry("", source, 0));
+    }
+    faults.add(new Diagnostic(entry.source(), entry.line(), key, found, allowed));
+  }
+
+  /** Notes a fault when more than one of several keys is given; names the one to use otherwise. */
+  Optional<String> oneOf(String... keys) {
+    List<String> given = new ArrayList<>();
+    for (String key : keys) {
+      if (given(key)) {
+        given.add(key);
+      }
+    }
+    if (given.size() > 1) {
+      fault(given.get(1), "given beside " + given.get(0), "give one of " + String.join(", ", keys));
+    }
+    return given.stream().findFirst();
+  }
+
+  /** The same, but one must be there. */
+  Optional<String> exactlyOneOf(String... keys) {
+    Optional<String> one = oneOf(keys);
+    if (one.isEmpty()) {
+      missing(keys[0], keys.length == 1 ? "this key is needed" : "give one of " + String.join(", ", keys));
+    }
+    return one;
+  }
+}

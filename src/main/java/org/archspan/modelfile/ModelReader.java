@@ -1,0 +1,94 @@
+package org.archspan.modelfile;
+
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import org.archspan.disk.Disk;
+import org.archspan.disk.Gas;
+import org.archspan.gravity.GravityLaw;
+import org.archspan.spacing.Arm;
+
+/** Reads a model file, strictly: everything that is wrong is said at once, and nothing is guessed. */
+public final class ModelReader {
+  private ModelReader() {
+  }
+
+  /**
+   * Reads a file.
+   *
+   * @param file      the model
+   * @param settings  {@code KEY=VALUE} to lay over it
+   * @param tolerance relative error asked of growth rates, dimensionless
+   * @throws UnreadableFileException when the file, or a table it names, cannot be read at all
+   */
+  public static Reading read(Path file, List<String> settings, double tolerance) throws UnreadableFileException {
+    Optional<byte[]> bytes = SourceText.bytes(file, SourceText.LARGEST_MODEL);
+    if (bytes.isEmpty()) {
+      return refused(file.toString(), 0, "larger than " + SourceText.LARGEST_MODEL / 1024 + " kB",
+          "a model is a short text");
+    }
+    Optional<String> text = SourceText.text(bytes.get());
+    if (text.isEmpty()) {
+      return refused(file.toString(), 0, "not UTF-8 text", "save the model as UTF-8");
+    }
+    Path folder = file.toAbsolutePath().getParent();
+    return read(text.get(), file.toString(), folder, settings, tolerance);
+  }
+
+  /**
+   * Reads a text.
+   *
+   * @param text      TOML
+   * @param source    what to call it in messages
+   * @param folder    where tables it names lie
+   * @param settings  {@code KEY=VALUE} to lay over it
+   * @param tolerance relative error asked of growth rates, dimensionless
+   * @throws UnreadableFileException when a table it names cannot be read at all
+   */
+  public static Reading read(String text, String source, Path folder, List<String> settings, double tolerance)
+      throws UnreadableFileException {
+    int overnested = SourceText.overnestedLine(text);
+    if (overnested > 0) {
+      return refused(source, overnested, "brackets nested more deeply than any model", "the model has three levels");
+    }
+    TomlLeaves leaves = TomlLeaves.parse(text, source);
+    List<Diagnostic> faults = new ArrayList<>(leaves.faults());
+    if (!faults.isEmpty()) {
+      return new Reading(Optional.empty(), List.copyOf(faults));
+    }
+    Map<String, Entry> entries = new LinkedHashMap<>(leaves.leaves());
+    new Overrides(entries, faults).apply(settings);
+    Inputs inputs = new Inputs(source, entries, faults);
+    Model model = model(inputs, source, folder, tolerance);
+    return faults.isEmpty() ? new Reading(Optional.of(model), List.of())
+        : new Reading(Optional.empty(), inFileOrder(faults));
+  }
+
+  private static Reading refused(String source, int line, String found, String allowed) {
+    return new Reading(Optional.empty(), List.of(new Diagnostic(source, line, "", found, allowed)));
+  }
+
+  private static List<Diagnostic> inFileOrder(List<Diagnostic> faults) {
+    return faults.stream().distinct().sorted(java.util.Comparator.comparingInt(Diagnostic::line)).toList();
+  }
+
+  private static Model model(Inputs inputs, String source, Path folder, double tolerance)
+      throws UnreadableFileException {
+    Unsolved.refuse(inputs);
+    GasReader gasReader = new GasReader(inputs);
+    Gas gas = gasReader.gas();
+    FieldReader fieldReader = new FieldReader(inputs);
+    List<GravityLaw> gravity = new GravityReader(inputs, folder).laws();
+    SurroundingsReader surroundings = new SurroundingsReader(inputs);
+    Arm arm = surroundings.arm();
+    Disk disk = new Disk(gas, gasReader.closure(), fieldReader.field(gas), fieldReader.cosmicRays(), gravity,
+        surroundings.domain());
+    Map<String, String> given = new LinkedHashMap<>();
+    inputs.entries().forEach((key, entry) -> given.put(key, String.valueOf(entry.value())));
+    return new Model(source, inputs.text("title").orElse(source), disk, surroundings.options(arm, tolerance), arm,
+        surroundings.units(), surroundings.rotation(), given, inputs.uncertainties());
+  }
+}

@@ -1,0 +1,28 @@
+package org.archspan.modelfile;
+
+import java.util.List;
+
+/** Physics that the model file can describe but this version does not solve: refused, never ignored. */
+final class Unsolved {
+  private static final String ALLOWED = "known, but not solved by this version; remove it";
+  private static final List<String> KEYS = List.of("gas.cooling-time", "field.turn", "field.bottom", "field.top",
+      "field.edge", "field.file");
+
+  private Unsolved() {
+  }
+
+  static void refuse(Inputs inputs) {
+    for (String key : KEYS) {
+      if (inputs.given(key)) {
+        inputs.fault(key, "found " + (inputs.entry(key) == null ? "a table" : inputs.entry(key).shown()), ALLOWED);
+      }
+    }
+    if (inputs.tables("gas.layer") > 0) {
+      inputs.fault("gas.layer.1", "found a layered atmosphere", ALLOWED);
+    }
+    inputs.text("gas.self-gravity").filter(word -> !word.equals("off"))
+        .ifPresent(word -> inputs.fault("gas.self-gravity", "found \"" + word + "\"", ALLOWED));
+    inputs.text("field.shape").filter(word -> word.equals("sheet") || word.equals("table"))
+        .ifPresent(word -> inputs.fault("field.shape", "found \"" + word + "\"", ALLOWED));
+  }
+}
