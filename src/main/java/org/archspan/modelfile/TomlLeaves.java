@@ -56,13 +56,17 @@ final class TomlLeaves {
   private void collect(Object value, String key, int line) {
     if (value instanceof TomlTable inner) {
       collect(inner, key + ".", line);
-    } else if (value instanceof TomlArray array && array.containsTables()) {
+    } else if (value instanceof TomlArray array && holdsTables(array)) {
       for (int i = 0; i < array.size(); i++) {
         collect(array.getTable(i), key + "." + (i + 1) + ".", array.inputPositionOf(i).line());
       }
     } else {
       leaves.put(key, new Entry(value, source, line));
     }
+  }
+
+  private static boolean holdsTables(TomlArray array) {
+    return !array.isEmpty() && array.toList().stream().allMatch(TomlTable.class::isInstance);
   }
 
   Map<String, Entry> leaves() {

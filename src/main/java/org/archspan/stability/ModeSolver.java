@@ -172,14 +172,14 @@ final class ModeSolver {
     double start = guess;
     for (int refinement = 0; refinement <= MOST_REFINEMENTS; refinement++) {
       GrowthRoot root = Double.isNaN(start) ? null : warmStart.find(kx, order, floor, ceiling, start);
-      if (root == null) {
+      if (root == null || !goodEnough(root)) {
         double s = RootFinder.find(growthAxis(kx), order, floor, ceiling, start);
         if (Double.isNaN(s)) {
           return Optional.empty();
         }
         root = check(kx, s);
       }
-      if (root.error() <= problem.tolerance() || lostInRounding(root)) {
+      if (goodEnough(root)) {
         return Optional.of(root);
       }
       start = root.growth();
@@ -204,6 +204,10 @@ final class ModeSolver {
     double better = s + change;
     double error = Math.abs(change) / Math.abs(better) + checking.displacement().rounding(s);
     return new GrowthRoot(kx, better, checking.slope(), error);
+  }
+
+  private boolean goodEnough(GrowthRoot root) {
+    return root.error() <= problem.tolerance() || lostInRounding(root);
   }
 
   /** Close to the margin s^2 itself drowns in rounding; a finer mesh does not help, and the error says so. */

@@ -113,7 +113,7 @@ public final class ShortCrossWaves {
 
   private static double maximum(org.apache.commons.math3.analysis.UnivariateFunction function, double low,
       double high) {
-    return new BrentOptimizer(1e-9, 1e-300).optimize(new MaxEval(500), GoalType.MAXIMIZE,
+    return new BrentOptimizer(1e-9, 1e-9 * (high - low)).optimize(new MaxEval(500), GoalType.MAXIMIZE,
         new UnivariateObjectiveFunction(function), new SearchInterval(low, high)).getPoint();
   }
 
