@@ -1,0 +1,93 @@
+package org.archspan.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.LinkedHashMap;
+import org.archspan.closure.CosmicRayClosure;
+import org.archspan.disk.CosmicRays;
+import org.archspan.disk.Disk;
+import org.archspan.disk.Gas;
+import org.archspan.disk.MagneticField;
+import org.archspan.equilibrium.Equilibrium;
+import org.archspan.equilibrium.GasState;
+import org.archspan.gravity.GravityLaw;
+import org.archspan.units.OutputUnits;
+
+/** What a result rests on, in words. */
+public final class Assumptions {
+  private Assumptions() {
+  }
+
+  /** Subject and statement, in the order in which a paper gives them. */
+  public static Map<String, String> of(Disk disk, Equilibrium equilibrium, double crossWavenumber,
+      OutputUnits units) {
+    Map<String, String> lines = new LinkedHashMap<>();
+    GasState bottom = equilibrium.at(equilibrium.bottom());
+    lines.put("gas", gas(disk, equilibrium, units));
+    lines.put("field", field(disk, bottom, units));
+    lines.put("cosmic rays", cosmicRays(disk.cosmicRays(), bottom));
+    lines.put("gravity", gravity(disk.gravity()));
+    lines.put("domain", domain(equilibrium, units));
+    lines.put("waves", crossWavenumber == 0.0 ? "along the field, uniform across it (ky = 0)"
+        : "wavelength across the field " + Numbers.length(2.0 * Math.PI / crossWavenumber, units));
+    return lines;
+  }
+
+  private static String gas(Disk disk, Equilibrium equilibrium, OutputUnits units) {
+    String kind = "isothermal, " + Numbers.plain(equilibrium.dispersion() / 1e5) + " km/s";
+    if (disk.gas() instanceof Gas.Components several) {
+      kind = several.components().size() + " isothermal components in one potential, together "
+          + Numbers.plain(equilibrium.dispersion() / 1e5) + " km/s at the lower end";
+    } else if (disk.gas() instanceof Gas.Stratified prescribed) {
+      kind = "prescribed stratification (" + prescribed.strata().size() + " strata), " + kind
+          + (prescribed.dispersion().isPresent() ? "" : " as the force balance demands");
+    }
+    return kind + "; adiabatic index of the perturbations " + Numbers.plain(disk.gasClosure().adiabaticIndex());
+  }
+
+  private static String field(Disk disk, GasState bottom, OutputUnits units) {
+    if (bottom.magneticPerMass() == 0.0 && !(disk.field() instanceof MagneticField.Balance)) {
+      return "none";
+    }
+    String strength = Numbers.plain(units.field(bottom.fieldStrength())) + " " + units.field() + " at the lower end";
+    if (disk.field() instanceof MagneticField.Balance) {
+      return strength + "; at each height what the force balance leaves over";
+    }
+    return strength + "; magnetic over gas pressure " + Numbers.plain(bottom.magneticPerMass() / bottom.gasPerMass())
+        + " at every height";
+  }
+
+  private static String cosmicRays(CosmicRays cosmicRays, GasState bottom) {
+    if (bottom.cosmicRayPerMass() == 0.0) {
+      return "none";
+    }
+    CosmicRayClosure closure = cosmicRays.closure();
+    String ratio = "pressure " + Numbers.plain(bottom.cosmicRayPerMass() / bottom.gasPerMass()) + " of the gas's; ";
+    if (Double.isInfinite(closure.diffusivity())) {
+      return ratio + "they diffuse along the field at once";
+    }
+    return ratio + "index " + Numbers.plain(closure.adiabaticIndex()) + ", diffusivity along the field "
+        + Numbers.plain(closure.diffusivity()) + " cm^2/s";
+  }
+
+  private static String gravity(List<GravityLaw> laws) {
+    List<String> names = new ArrayList<>();
+    for (GravityLaw law : laws) {
+      String name = law.getClass().getSimpleName().replace("Gravity", "").replaceAll("([a-z])([A-Z])", "$1-$2");
+      names.add(name.toLowerCase(java.util.Locale.ROOT));
+    }
+    return "external: " + String.join(" + ", names) + "; the gas's own gravity is left out";
+  }
+
+  private static String domain(Equilibrium equilibrium, OutputUnits units) {
+    String lower = equilibrium.aboutMidplane() ? "both sides of the midplane"
+        : "above a rigid floor at " + Numbers.length(equilibrium.bottom(), units);
+    String upper = switch (equilibrium.topBoundary()) {
+      case LID -> "a rigid lid at ";
+      case FREE -> "a free surface at ";
+      case OPEN -> "an open top at ";
+    };
+    return lower + ", up to " + upper + Numbers.length(equilibrium.top(), units);
+  }
+}

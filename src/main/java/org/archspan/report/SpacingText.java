@@ -1,0 +1,162 @@
+package org.archspan.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import org.archspan.boundary.Parity;
+import org.archspan.disk.Disk;
+import org.archspan.equilibrium.Equilibrium;
+import org.archspan.spacing.BranchPeak;
+import org.archspan.spacing.CloudComplex;
+import org.archspan.spacing.HeldBy;
+import org.archspan.spacing.SpacingResult;
+import org.archspan.units.OutputUnits;
+
+/** The answer of the main job in words: what was assumed, what was found, how sure, and what limits it. */
+public final class SpacingText {
+  private final SpacingResult result;
+  private final OutputUnits units;
+  private final TextBlock block;
+
+  private SpacingText(SpacingResult result, OutputUnits units, int width) {
+    this.result = result;
+    this.units = units;
+    this.block = new TextBlock(width);
+  }
+
+  /** The whole summary, wrapped to a width in characters. */
+  public static String text(String title, Disk disk, double crossWavenumber, SpacingResult result, OutputUnits units,
+      int width) {
+    SpacingText text = new SpacingText(result, units, width);
+    text.block.heading(title);
+    text.block.heading("Assumed");
+    Assumptions.of(disk, result.equilibrium(), crossWavenumber, units).forEach(text.block::labelled);
+    text.baseState();
+    text.found();
+    text.sure();
+    text.limits();
+    return text.block.text();
+  }
+
+  private void baseState() {
+    Equilibrium equilibrium = result.equilibrium();
+    block.labelled("base state", "scale height " + Numbers.length(equilibrium.scaleHeight(), units)
+        + ", surface density " + Numbers.plain(units.surfaceDensity(equilibrium.surfaceDensity())) + " "
+        + units.surfaceDensity() + "; force balance holds to " + Numbers.error(result.forceBalanceResidual())
+        + " of the weight");
+  }
+
+  private void found() {
+    block.heading("Found");
+    if (result.stable()) {
+      block.sentence("Stable: no wave grows, at any wavelength of the range.");
+      return;
+    }
+    if (!result.branches().isEmpty()) {
+      block.table(branches());
+    }
+    block.sentence("");
+    block.sentence(sentence(result, units));
+    result.complex().ifPresent(this::complex);
+    BranchPeak peak = result.spacingPeak().orElseThrow();
+    if (peak.heldBy() != HeldBy.HALO) {
+      block.sentence("In a domain 1.5 times as tall its wavelength changes by "
+          + Numbers.change(peak.tallerWavelengthChange()) + " and its growth rate by "
+          + Numbers.change(peak.tallerGrowthChange()) + ".");
+    }
+    block.sentence("Infinitely short waves across the field would grow in "
+        + Numbers.time(1.0 / result.acrossLimit().growthRate(), units) + " at a height of "
+        + Numbers.length(result.acrossLimit().height(), units) + ": no ideal wave of this disk is faster.");
+    result.longestStableWavelength().ifPresent(shortest -> block.sentence("Waves along the field shorter than "
+        + Numbers.length(shortest, units) + " are stable."));
+  }
+
+  private List<List<String>> branches() {
+    List<List<String>> rows = new ArrayList<>();
+    rows.add(List.of("", "parity", "order", "wavelength", "growth time", "centroid", "column", "held by"));
+    for (int i = 0; i < result.branches().size(); i++) {
+      BranchPeak peak = result.branches().get(i);
+      boolean chosen = result.spacing().isPresent() && result.spacing().get() == i;
+      rows.add(List.of(chosen ? ">" : "", parity(peak.parity()), Integer.toString(peak.order()),
+          Numbers.length(peak.wavelength(), units), Numbers.time(peak.growthTime(), units),
+          Numbers.length(peak.centroidHeight(), units), Numbers.plain(peak.columnContrast()),
+          peak.heldBy().name().toLowerCase(Locale.ROOT)));
+    }
+    return rows;
+  }
+
+  private static String parity(Parity parity) {
+    return switch (parity) {
+      case MIRROR -> "mirror";
+      case FLEXING -> "flexing";
+      case FLOOR -> "floor";
+    };
+  }
+
+  /** One sentence that can be quoted. */
+  public static String sentence(SpacingResult result, OutputUnits units) {
+    if (result.stable()) {
+      return "The gas is stable against magnetic buoyancy.";
+    }
+    BranchPeak peak = result.spacingPeak().orElseThrow();
+    if (peak.wavenumber() == 0.0) {
+      return "The gas is unstable; growth rises towards infinite wavelength along the field, up to one e-folding in "
+          + Numbers.time(peak.growthTime(), units) + ".";
+    }
+    String who = result.spacing().isPresent() ? "The fastest mode that gathers the disk's own gas"
+        : peak.heldBy() == HeldBy.HALO ? "The continuum edge of the atmosphere above the disk" : "The fastest mode";
+    String parity = peak.heldBy() == HeldBy.HALO || peak.parity() == Parity.FLOOR ? ""
+        : peak.parity() == Parity.MIRROR ? " (mirror-symmetric about the midplane)" : " (flexing the midplane)";
+    return who + parity + " has a wavelength of " + Numbers.length(peak.wavelength(), units)
+        + " along the field and grows e-fold in " + Numbers.time(peak.growthTime(), units) + ".";
+  }
+
+  private void complex(CloudComplex complex) {
+    if (complex.mass().isPresent()) {
+      block.sentence("Gathered along an arm of the given width, one wavelength holds "
+          + Numbers.mass(complex.mass().getAsDouble(), units) + ".");
+    } else {
+      block.sentence("One wavelength holds " + Numbers.mass(complex.massPerWidth() * units.centimetresPerLength(), units)
+          + " for each " + units.length() + " of arm width (no arm is given).");
+    }
+    if (complex.eFoldings().isPresent()) {
+      block.sentence("While the gas crosses the arm the mode grows by " + Numbers.plain(complex.eFoldings().getAsDouble())
+          + " e-foldings.");
+    }
+  }
+
+  private void sure() {
+    block.heading("How sure");
+    if (result.stable()) {
+      block.sentence("The count of unstable modes is zero over the whole range: no mode can have been missed.");
+      return;
+    }
+    block.sentence("Proved by counting the modes on " + result.certificate().intervals() + " intervals of wavenumber that"
+        + " leave no gap: no wave with the given wavelength across the field grows faster than "
+        + Numbers.rate(result.certificate().bound(), units) + range() + ".");
+    BranchPeak peak = result.spacingPeak().orElseThrow();
+    block.sentence("Estimated relative errors: growth rate " + Numbers.error(peak.growthError()) + ", wavelength "
+        + Numbers.error(peak.wavelengthError()) + (peak.unstableModes() < 0 ? "."
+        : "; at that wavelength exactly " + modes(peak.unstableModes()) + " of this parity " + "grow"
+        + (peak.unstableModes() == 1 ? "s." : ".")));
+  }
+
+  private static String modes(int count) {
+    return count == 1 ? "one mode" : count + " modes";
+  }
+
+  private String range() {
+    boolean all = result.certificate().shortest() == 0.0 && Double.isInfinite(result.certificate().longest());
+    return all ? ", at any wavelength along it" : ", at wavelengths along it from "
+        + Numbers.length(result.certificate().shortest(), units) + " to "
+        + Numbers.length(result.certificate().longest(), units);
+  }
+
+  private void limits() {
+    block.heading("What limits it");
+    result.warnings().forEach(block::bullet);
+    block.bullet("Linear theory: growth while the gas moves by much less than a wavelength.");
+    block.bullet("A static base state that varies with height alone; rotation, shear and the gas's own gravity are"
+        + " not in it.");
+  }
+}
