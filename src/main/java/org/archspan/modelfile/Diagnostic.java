@@ -1,5 +1,7 @@
 package org.archspan.modelfile;
 
+import java.util.regex.Pattern;
+
 /**
  * One fault of a model, as a value.
  *
@@ -10,10 +12,14 @@ package org.archspan.modelfile;
  * @param allowed what may stand there, or what to do
  */
 public record Diagnostic(String source, int line, String key, String found, String allowed) {
+  /** Control characters and line breaks, which would let a file write to the terminal. */
+  private static final Pattern INVISIBLE = Pattern.compile("[\\p{Cc}\\p{Cf}\\p{Zl}\\p{Zp}]");
+
   /** One line: {@code file:line: key: found ...; allowed ...}. */
   @Override
   public String toString() {
     String place = line > 0 ? source + ":" + line : source;
-    return place + ": " + (key.isEmpty() ? "" : key + ": ") + found + (allowed.isEmpty() ? "" : "; " + allowed);
+    String text = place + ": " + (key.isEmpty() ? "" : key + ": ") + found + (allowed.isEmpty() ? "" : "; " + allowed);
+    return INVISIBLE.matcher(text).replaceAll("\ufffd");
   }
 }

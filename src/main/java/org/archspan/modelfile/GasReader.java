@@ -62,7 +62,10 @@ final class GasReader {
     } else {
       inputs.oneOf("gas.dispersion", "gas.temperature");
     }
-    if (!inputs.given("gas.temperature")) {
+    if (!inputs.given("gas.temperature") && inputs.given("gas.mean-molecular-weight")) {
+      inputs.fault("gas.mean-molecular-weight", "given without gas.temperature", "remove it, or give a temperature");
+    }
+    if (inputs.given("gas.dispersion") || !inputs.given("gas.temperature")) {
       return inputs.number("gas.dispersion");
     }
     double weight = inputs.required("gas.mean-molecular-weight",

@@ -55,6 +55,11 @@ final class Inputs {
     return entries.containsKey(key) || entries.keySet().stream().anyMatch(name -> name.startsWith(key + "."));
   }
 
+  /** Whether the key is given and its value is allowed. */
+  boolean valid(String key) {
+    return values.containsKey(key);
+  }
+
   OptionalDouble number(String key) {
     return values.get(key) instanceof Double number ? OptionalDouble.of(number) : OptionalDouble.empty();
   }

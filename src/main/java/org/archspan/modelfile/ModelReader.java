@@ -13,6 +13,9 @@ import org.archspan.spacing.Arm;
 
 /** Reads a model file, strictly: everything that is wrong is said at once, and nothing is guessed. */
 public final class ModelReader {
+  /** More than any model has; messages about each of them would help nobody. */
+  private static final int MOST_KEYS = 1000;
+
   private ModelReader() {
   }
 
@@ -55,12 +58,16 @@ public final class ModelReader {
       return refused(source, overnested, "brackets nested more deeply than any model", "the model has three levels");
     }
     TomlLeaves leaves = TomlLeaves.parse(text, source);
+    if (leaves.leaves().size() > MOST_KEYS) {
+      return refused(source, 0, leaves.leaves().size() + " keys", "a model has at most " + MOST_KEYS);
+    }
     List<Diagnostic> faults = new ArrayList<>(leaves.faults());
     if (!faults.isEmpty()) {
       return new Reading(Optional.empty(), List.copyOf(faults));
     }
     Map<String, Entry> entries = new LinkedHashMap<>(leaves.leaves());
     new Overrides(entries, faults).apply(settings);
+    new ArrayNumbers(entries, faults).check();
     Inputs inputs = new Inputs(source, entries, faults);
     Model model = model(inputs, source, folder, tolerance);
     return faults.isEmpty() ? new Reading(Optional.of(model), List.of())

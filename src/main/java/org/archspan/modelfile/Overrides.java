@@ -14,6 +14,9 @@ final class Overrides {
       List.of("field.pressure-ratio", "field.strength"),
       List.of("cosmic-rays.pressure-ratio", "cosmic-rays.pressure"));
 
+  /** The same, where strata are given: the force balance makes either of these from the other. */
+  private static final List<String> OF_STRATA = List.of("gas.dispersion", "gas.temperature", "field.strength");
+
   private final Map<String, Entry> entries;
   private final List<Diagnostic> faults;
 
@@ -40,6 +43,9 @@ final class Overrides {
       if (group.contains(key)) {
         group.forEach(this::remove);
       }
+    }
+    if (OF_STRATA.contains(key) && entries.keySet().stream().anyMatch(name -> name.startsWith("gas.stratum."))) {
+      OF_STRATA.forEach(this::remove);
     }
     remove(key);
     entries.putAll(leaves(key, text));

@@ -27,8 +27,19 @@ final class SurroundingsReader {
       inputs.fault("domain.bottom", "found " + inputs.entry("domain.bottom").shown(),
           "scale heights are counted from the density on the floor; give a length");
     }
-    return new Domain(floor, inputs.height("domain.top"),
+    Optional<Height> top = inputs.height("domain.top");
+    inOrder("domain.bottom", floor, "domain.top", top);
+    return new Domain(floor, top,
         inputs.text("domain.top-boundary").map(word -> TopBoundary.valueOf(word.toUpperCase(Locale.ROOT))));
+  }
+
+  /** Notes a fault when two lengths that can be compared stand in the wrong order. */
+  private void inOrder(String lowerKey, Optional<Height> lower, String upperKey, Optional<Height> upper) {
+    if (lower.isPresent() && upper.isPresent() && lower.get().inScaleHeights() == upper.get().inScaleHeights()
+        && !(lower.get().value() < upper.get().value())) {
+      inputs.fault(upperKey, "found " + inputs.entry(upperKey).shown(), "it must exceed " + lowerKey + ", "
+          + inputs.entry(lowerKey).shown());
+    }
   }
 
   Arm arm() {
@@ -40,6 +51,7 @@ final class SurroundingsReader {
     Set<Parity> parities = inputs.text("waves.parity").filter(word -> !word.equals("both"))
         .<Set<Parity>>map(word -> EnumSet.of(Parity.valueOf(word.toUpperCase(Locale.ROOT))))
         .orElse(standard.parities());
+    inOrder("waves.shortest", inputs.height("waves.shortest"), "waves.longest", inputs.height("waves.longest"));
     return new SearchOptions(crossWavelength(arm), parities, inputs.height("waves.shortest"),
         inputs.height("waves.longest"), inputs.height("waves.gathering-height").orElse(standard.gatheringHeight()),
         tolerance, (int) inputs.number("waves.branches").orElse(standard.branches()));

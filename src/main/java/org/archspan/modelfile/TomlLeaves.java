@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.regex.Pattern;
 import org.tomlj.Toml;
 import org.tomlj.TomlArray;
 import org.tomlj.TomlParseError;
@@ -13,6 +14,8 @@ import org.tomlj.TomlTable;
 /** Flattens a TOML document into dotted keys; tables in arrays are numbered from 1. */
 final class TomlLeaves {
   private static final int MOST_SYNTAX_FAULTS = 20;
+  private static final int LONGEST_KEY = 60;
+  private static final Pattern BARE_KEY = Pattern.compile("[A-Za-z0-9_-]+");
 
   private final Map<String, Entry> leaves = new LinkedHashMap<>();
   private final List<Diagnostic> faults = new ArrayList<>();
@@ -49,8 +52,14 @@ final class TomlLeaves {
     for (String key : table.keySet()) {
       List<String> path = List.of(key);
       int line = table.inputPositionOf(path) == null ? tableLine : table.inputPositionOf(path).line();
-      collect(table.get(path), prefix + key, line);
+      collect(table.get(path), prefix + shown(key), line);
     }
+  }
+
+  /** A key in quotes stays in them when it holds a dot or the like, so that it cannot pass for a path. */
+  private static String shown(String key) {
+    String shortened = key.length() <= LONGEST_KEY ? key : key.substring(0, LONGEST_KEY) + "...";
+    return BARE_KEY.matcher(key).matches() ? shortened : "\"" + shortened + "\"";
   }
 
   private void collect(Object value, String key, int line) {

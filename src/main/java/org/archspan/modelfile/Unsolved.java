@@ -13,7 +13,7 @@ final class Unsolved {
 
   static void refuse(Inputs inputs) {
     for (String key : KEYS) {
-      if (inputs.given(key)) {
+      if (inputs.valid(key)) {
         inputs.fault(key, "found " + (inputs.entry(key) == null ? "a table" : inputs.entry(key).shown()), ALLOWED);
       }
     }

@@ -3,6 +3,7 @@ package org.archspan.modelfile;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.regex.Pattern;
 import org.archspan.disk.Height;
 import org.archspan.units.Dimension;
 import org.archspan.units.NearestName;
@@ -16,7 +17,7 @@ final class ValueReader {
   private static final Dimension LENGTH = new Dimension(2, 0, 0, 0);
   private static final Dimension MASS_DENSITY = new Dimension(-6, 2, 0, 0);
   private static final Dimension NUMBER_DENSITY = new Dimension(-6, 0, 0, 0);
-  private static final String SCALE_HEIGHTS = "scale-heights";
+  private static final Pattern SCALE_HEIGHTS = Pattern.compile("(.*?)\\s*scale-heights?", Pattern.DOTALL);
 
   private final Inputs inputs;
 
@@ -142,7 +143,7 @@ final class ValueReader {
   private void height(String key, Object value, KeySpec spec) {
     if (value instanceof String word && spec.choices().contains(word)) {
       inputs.put(key, word);
-    } else if (value instanceof String text && text.strip().endsWith(SCALE_HEIGHTS)) {
+    } else if (value instanceof String text && SCALE_HEIGHTS.matcher(text.strip()).matches()) {
       scaleHeights(key, text.strip(), spec);
     } else if (value instanceof String text) {
       length(key, text, spec);
@@ -154,9 +155,9 @@ final class ValueReader {
 
   private void scaleHeights(String key, String text, KeySpec spec) {
     try {
-      double number = Quantity.parse(text.substring(0, text.length() - SCALE_HEIGHTS.length())).value();
-      if (spec.range().holds(number)) {
-        inputs.put(key, Height.scaleHeights(number));
+      Quantity number = Quantity.parse(SCALE_HEIGHTS.matcher(text).replaceFirst("$1"));
+      if (number.dimension().equals(Dimension.NONE) && spec.range().holds(number.value())) {
+        inputs.put(key, Height.scaleHeights(number.value()));
         return;
       }
     } catch (UnitException notANumber) {

@@ -6,11 +6,16 @@ import java.util.Optional;
 
 /** Finds the name that somebody probably meant. */
 public final class NearestName {
+  private static final int LONGEST = 100;
+
   private NearestName() {
   }
 
   /** The nearest of the known names, if one is near enough; ties go to the alphabetically first. */
   public static Optional<String> of(String found, Collection<String> known) {
+    if (found.length() > LONGEST) {
+      return Optional.empty();
+    }
     int allowed = Math.max(1, Math.min(4, found.length() / 2));
     return known.stream().sorted().filter(name -> distance(found, name) <= allowed)
         .min(Comparator.comparingInt(name -> distance(found, name)));
