@@ -1,5 +1,6 @@
 package org.archspan.modelfile;
 
+import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
@@ -79,6 +80,11 @@ final class GravityReader {
       inputs.missing(key, "the law \"table\" needs a file of height and acceleration");
     }
     Optional<String> name = inputs.text(key);
-    return name.isEmpty() ? Optional.empty() : new GravityTable(inputs.faults()).read(folder.resolve(name.get()));
+    try {
+      return name.isEmpty() ? Optional.empty() : new GravityTable(inputs.faults()).read(folder.resolve(name.get()));
+    } catch (InvalidPathException noPath) {
+      inputs.fault(key, "found " + inputs.entry(key).shown(), "the name of a file is needed");
+      return Optional.empty();
+    }
   }
 }

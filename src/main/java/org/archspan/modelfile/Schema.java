@@ -38,6 +38,12 @@ public final class Schema {
     return Optional.ofNullable(KEYS.get(pattern(key)));
   }
 
+  /** Whether a key as it stands in a file is that of a table. */
+  static boolean isTable(String key) {
+    String prefix = pattern(key + ".");
+    return KEYS.keySet().stream().anyMatch(known -> known.startsWith(prefix));
+  }
+
   /** The key with numbers of tables replaced; a single gravity table counts as the first of several. */
   static String pattern(String key) {
     String numbered = key.replaceAll("\\.[0-9]+(?=\\.)", ".#");

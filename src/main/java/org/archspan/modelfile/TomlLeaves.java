@@ -63,11 +63,13 @@ final class TomlLeaves {
   }
 
   private void collect(Object value, String key, int line) {
-    if (value instanceof TomlTable inner) {
+    if (value instanceof TomlTable empty && empty.isEmpty()) {
+      leaves.put(key, new Entry(Map.of(), source, line));
+    } else if (value instanceof TomlTable inner) {
       collect(inner, key + ".", line);
     } else if (value instanceof TomlArray array && holdsTables(array)) {
       for (int i = 0; i < array.size(); i++) {
-        collect(array.getTable(i), key + "." + (i + 1) + ".", array.inputPositionOf(i).line());
+        collect((Object) array.getTable(i), key + "." + (i + 1), array.inputPositionOf(i).line());
       }
     } else {
       leaves.put(key, new Entry(value, source, line));

@@ -2,6 +2,7 @@ package org.archspan.modelfile;
 
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Optional;
 import java.util.regex.Pattern;
 import org.archspan.disk.Height;
@@ -27,6 +28,9 @@ final class ValueReader {
 
   /** Reads the value of a key of the file. */
   void read(String key) {
+    if (inputs.entry(key).value() instanceof Map<?, ?> && Schema.isTable(key)) {
+      return;
+    }
     Optional<KeySpec> spec = Schema.of(key);
     if (spec.isPresent()) {
       read(key, spec.get());
@@ -59,6 +63,10 @@ final class ValueReader {
 
   private void read(String key, KeySpec spec) {
     Object value = inputs.entry(key).value();
+    if (value instanceof Map<?, ?>) {
+      inputs.fault(key, "found an empty table", "give it a value");
+      return;
+    }
     switch (spec.kind()) {
       case TEXT -> text(key, value);
       case CHOICE -> choice(key, value, spec);

@@ -124,6 +124,16 @@ class ModelReaderTest {
   }
 
   @Test
+  void emptyTables() {
+    assertThat(read(PLAIN + "[domain]\n[waves]\n[arm]\n").model()).isPresent();
+    assertThat(messages(read(PLAIN + "[domian]\n"))).contains("model.toml:11: domian: unknown key").doesNotContain("\n");
+    assertThat(messages(read(PLAIN.replace("\"6.4 km/s\"", "{}"))))
+        .isEqualTo("model.toml:3: gas.dispersion: found an empty table; give it a value");
+    assertThat(messages(read(PLAIN.replaceAll("(?m)^(law|strength|height).*\n", ""))))
+        .startsWith("model.toml: gravity.law: missing").doesNotContain("\n");
+  }
+
+  @Test
   void temperatureWithMolecularWeightIsADispersion() {
     Model model = model(PLAIN.replace("dispersion = \"6.4 km/s\"",
         "temperature = \"8000 K\"\nmean-molecular-weight = 0.6"));
