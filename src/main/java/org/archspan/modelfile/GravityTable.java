@@ -25,7 +25,9 @@ import org.archspan.units.UnitParser;
 final class GravityTable {
   private static final Pattern BRACKETED = Pattern.compile("[^\\[]*\\[([^\\]]+)\\]\\s*");
   private static final Pattern ECSV_COLUMN = Pattern.compile("#\\s*-\\s*\\{.*\\bunit:\\s*([^,}]+?)\\s*[,}].*");
+  private static final Pattern ECSV_COMMA = Pattern.compile("(?m)^#\\s*delimiter:\\s*['\"],['\"]");
   private static final int MOST_FAULTS = 20;
+  private static final int MOST_ROWS = 2000;
 
   private final List<Diagnostic> faults;
 
@@ -43,6 +45,10 @@ final class GravityTable {
     }
     int before = faults.size();
     List<double[]> rows = rows(file.toString(), text.get());
+    if (rows.size() > MOST_ROWS) {
+      faults.add(new Diagnostic(file.toString(), 0, "", rows.size() + " rows", "at most " + MOST_ROWS
+          + " are allowed, for every row is an edge of the mesh; thin the table"));
+    }
     if (faults.size() > before) {
       return Optional.empty();
     }
@@ -60,7 +66,8 @@ final class GravityTable {
         .filter(Matcher::matches).map(matcher -> matcher.group(1).replace("'", "").replace("\"", "")).toList();
     List<double[]> rows = new ArrayList<>();
     double[] factors = null;
-    CSVFormat format = CSVFormat.DEFAULT.builder().setCommentMarker('#').setIgnoreEmptyLines(true).setTrim(true).get();
+    CSVFormat format = CSVFormat.DEFAULT.builder().setCommentMarker('#').setIgnoreEmptyLines(true).setTrim(true)
+        .setDelimiter(text.startsWith("# %ECSV") && !ECSV_COMMA.matcher(text).find() ? ' ' : ',').get();
     try (CSVParser parser = CSVParser.parse(text, format)) {
       for (CSVRecord row : parser) {
         if (factors == null) {
@@ -69,7 +76,8 @@ final class GravityTable {
             return rows;
           }
         } else if (faults.size() < MOST_FAULTS) {
-          row(file, (int) parser.getCurrentLineNumber(), row, factors).ifPresent(rows::add);
+          double above = rows.isEmpty() ? Double.NEGATIVE_INFINITY : rows.get(rows.size() - 1)[0];
+          row(file, (int) parser.getCurrentLineNumber(), row, factors, above).ifPresent(rows::add);
         }
       }
     } catch (IOException | UncheckedIOException broken) {
@@ -107,7 +115,7 @@ final class GravityTable {
     return factors;
   }
 
-  private Optional<double[]> row(String file, int line, CSVRecord row, double[] factors) {
+  private Optional<double[]> row(String file, int line, CSVRecord row, double[] factors, double above) {
     if (row.size() != 2) {
       faults.add(new Diagnostic(file, line, "", "found " + row.size() + " values", "each row needs two"));
       return Optional.empty();
@@ -124,6 +132,11 @@ final class GravityTable {
             : "\"" + row.get(i) + "\" is not a finite number", "fill it or remove the row"));
         return Optional.empty();
       }
+    }
+    if (values[0] < 0.0 || values[0] <= above) {
+      faults.add(new Diagnostic(file, line, "", "the height \"" + row.get(0) + "\" "
+          + (values[0] < 0.0 ? "is negative" : "does not exceed the one before"), "heights must ascend from 0 or above"));
+      return Optional.empty();
     }
     return Optional.of(values);
   }

@@ -3,7 +3,8 @@ package org.archspan.units;
 /**
  * Physical constants in CGS-Gaussian units.
  *
- * <p>Sources: IAU 2015 Resolution B3 (nominal solar mass parameter, parsec through the astronomical unit), IAU 2012
+ * <p>Sources: IAU 2015 Resolution B3 (nominal solar mass parameter and radius, parsec through the astronomical
+ * unit), IAU 2012
  * Resolution B2 (astronomical unit), CODATA 2022 (G, k_B, atomic mass constant), Julian year of 365.25 days.
  */
 public final class Constants {
@@ -27,6 +28,12 @@ public final class Constants {
 
   /** Mass of the Sun, g: nominal GM (IAU 2015 B3: 1.3271244e20 m^3 s^-2) over G. */
   public static final double SOLAR_MASS = 1.3271244e26 / GRAVITATIONAL_CONSTANT;
+
+  /** Nominal radius of the Sun, cm (IAU 2015 B3, exact). */
+  public static final double SOLAR_RADIUS = 6.957e10;
+
+  /** Electronvolt, erg (exact in the SI since 2019). */
+  public static final double ELECTRON_VOLT = 1.602176634e-12;
 
   /** Julian year, s. */
   public static final double YEAR = 365.25 * 86400.0;

@@ -7,11 +7,11 @@ import java.util.regex.Pattern;
 /**
  * Reads composite units such as {@code km/s/kpc}, {@code g/cm^3}, {@code 1/Myr}, {@code cm^-3}. Division binds to the one
  * factor that follows and goes left to right, as astronomers write it: {@code km/s/kpc} is km s^-1 kpc^-1. Products are
- * written with a space, {@code *} or a dot.
+ * written with a space, {@code *} or a dot, powers with {@code ^}, {@code **} or nothing ({@code km s-1}, as in tables).
  */
 public final class UnitParser {
   private static final Pattern FACTOR =
-      Pattern.compile("\\G\\s*([/*.]?)\\s*(1(?![0-9])|[A-Za-z\u00b5\u03bc]+)(?:(?:\\^|\\*\\*)(-?[0-9]{1,2}))?");
+      Pattern.compile("\\G\\s*([/*.]?)\\s*(1(?![-0-9])|[A-Za-z\u00b5\u03bc]+)(?:(?:\\^|\\*\\*)?(-?[0-9]{1,2}))?");
   private static final int LONGEST = 100;
 
   private UnitParser() {

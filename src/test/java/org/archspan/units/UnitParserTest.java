@@ -23,7 +23,8 @@ class UnitParserTest {
       "km/s/kpc; 3.2407792894443e-17; s^-1", "km s^-1 kpc^-1; 3.2407792894443e-17; s^-1",
       "cm/s^2/kpc; 3.2407792894443e-22; s^-2", "km^2/s^2/pc; 3.2407792894443e-9; cm s^-2", "cm^2/s; 1; cm^2 s^-1",
       "1/Myr; 3.168808781402895e-14; s^-1", "1/s; 1; s^-1", "rad/kpc; 3.2407792894443e-22; cm^-1",
-      "deg/kpc; 5.656226e-24; cm^-1", "g*cm**-3; 1; g cm^-3", "km.s^-1; 1e5; cm s^-1"})
+      "deg/kpc; 5.656226e-24; cm^-1", "g*cm**-3; 1; g cm^-3", "km s-1; 1e5; cm s^-1", "cm / s2; 1; cm s^-2", "Rsun; 6.957e10; cm",
+      "eV/cm^3; 1.602176634e-12; g cm^-1 s^-2", "km.s^-1; 1e5; cm s^-1"})
   void compositeUnits(String text, double factor, String dimension) throws UnitException {
     Unit unit = UnitParser.parse(text);
     // 3e-7: the shortest factors above are given with seven digits
@@ -46,7 +47,7 @@ class UnitParserTest {
   }
 
   @ParameterizedTest
-  @ValueSource(strings = {"", "km/", "/", "km//s", "km^x", "km^", "furlong", "km s-1", "3 km", "k m", "km^1.5", "(km)"})
+  @ValueSource(strings = {"", "km/", "/", "km//s", "km^x", "km^", "furlong", "1-3", "km-", "km123", "3 km", "k m", "km^1.5", "(km)"})
   void refusesWhatIsNotAUnit(String text) {
     assertThatThrownBy(() -> UnitParser.parse(text)).isInstanceOf(UnitException.class);
   }
