@@ -54,7 +54,7 @@ final class BranchSearch {
     }
   }
 
-  private static List<Parity> parities(Set<Parity> asked, Equilibrium equilibrium) {
+  static List<Parity> parities(Set<Parity> asked, Equilibrium equilibrium) {
     if (!equilibrium.aboutMidplane()) {
       return List.of(Parity.FLOOR);
     }

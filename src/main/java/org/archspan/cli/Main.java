@@ -1,0 +1,75 @@
+package org.archspan.cli;
+
+import org.archspan.disk.RefusedModelException;
+import org.archspan.modelfile.UnreadableFileException;
+import org.archspan.stability.UnsolvedException;
+import org.archspan.table.WriteException;
+import picocli.CommandLine;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.IVersionProvider;
+
+/** The command line. */
+@Command(name = "archspan", mixinStandardHelpOptions = true, versionProvider = Main.Version.class,
+    description = "Magnetic buoyancy of gas disks and stellar atmospheres: which wave wins, how fast it grows, how far"
+        + " apart the clouds stand.",
+    subcommands = {SpacingCommand.class, EquilibriumCommand.class, DispersionCommand.class, ModeCommand.class,
+        PlaneCommand.class, CheckCommand.class, ModelsCommand.class})
+public final class Main {
+  private Main() {
+  }
+
+  /** The version in the manifest of the jar. */
+  static final class Version implements IVersionProvider {
+    @Override
+    public String[] getVersion() {
+      String version = Main.class.getPackage().getImplementationVersion();
+      return new String[] {"Archspan " + (version == null ? "(not packaged)" : version)};
+    }
+  }
+
+  /** Runs a command and exits with its status. */
+  public static void main(String[] arguments) {
+    System.setProperty("java.awt.headless", "true");
+    System.exit(commandLine().execute(arguments));
+  }
+
+  /** The configured parser, for {@link #main} and for tests. */
+  static CommandLine commandLine() {
+    CommandLine commandLine = new CommandLine(new Main());
+    commandLine.setUsageHelpAutoWidth(true);
+    commandLine.setExecutionExceptionHandler(Main::report);
+    commandLine.setParameterExceptionHandler((fault, arguments) -> {
+      fault.getCommandLine().getErr().println(fault.getMessage());
+      fault.getCommandLine().getErr().println("See archspan "
+          + (fault.getCommandLine().getParent() == null ? "" : fault.getCommandLine().getCommandName() + " ")
+          + "--help.");
+      return ExitStatus.USAGE;
+    });
+    return commandLine;
+  }
+
+  /** One clear message and the status that belongs to it; only a fault of the program shows a trace. */
+  private static int report(Exception fault, CommandLine commandLine, CommandLine.ParseResult parsed)
+      throws Exception {
+    int status = status(fault);
+    if (status < 0) {
+      throw fault;
+    }
+    commandLine.getErr().println(fault.getMessage());
+    commandLine.getErr().flush();
+    return status;
+  }
+
+  private static int status(Exception fault) {
+    if (fault instanceof ModelFault || fault instanceof RefusedModelException) {
+      return ExitStatus.MODEL;
+    }
+    if (fault instanceof UnsolvedException) {
+      return ExitStatus.UNSOLVED;
+    }
+    if (fault instanceof UnreadableFileException || fault instanceof WriteException) {
+      return ExitStatus.FILE;
+    }
+    return -1;
+  }
+}

@@ -1,0 +1,34 @@
+package org.archspan.cli;
+
+import java.io.IOException;
+import org.archspan.modelfile.Model;
+import org.archspan.report.SpacingJson;
+import org.archspan.report.SpacingText;
+import org.archspan.report.SpacingFiles;
+import org.archspan.spacing.SpacingResult;
+import org.archspan.spacing.SpacingStudy;
+import org.archspan.spacing.WaveRange;
+import picocli.CommandLine.Command;
+
+/** The main job. */
+@Command(name = "spacing", mixinStandardHelpOptions = true,
+    description = "The main job: equilibrium, growth rate against wavelength, fastest mode, its spacing, growth time and"
+        + " mass per complex, with the proof that no faster mode was missed.")
+final class SpacingCommand extends ModelCommand {
+  @Override
+  void solve(Model model) throws IOException {
+    SpacingResult result = new SpacingStudy(model.disk(), model.options(), model.arm()).solve();
+    double across = WaveRange.of(model.options(), result.equilibrium()).crossWavenumber();
+    String json = SpacingJson.text(echo(model), result, model.units());
+    if (common.out != null) {
+      String text = SpacingText.text(model.title(), model.disk(), across, result, model.units(), 88);
+      new SpacingFiles(result, model.disk(), model.options(), model.units()).write(common.out, json, text,
+          echo(model), common.overwrite);
+    }
+    print(() -> json,
+        () -> SpacingText.text(model.title(), model.disk(), across, result, model.units(), width()));
+    if (model.rotation().isPresent() && !common.quiet) {
+      err().println("[rotation] is given, but rotation is not solved by this version: it is not in this result.");
+    }
+  }
+}

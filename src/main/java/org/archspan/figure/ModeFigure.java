@@ -1,0 +1,173 @@
+package org.archspan.figure;
+
+import java.awt.BasicStroke;
+import java.awt.Graphics2D;
+import java.awt.geom.Path2D;
+import java.awt.geom.Rectangle2D;
+import java.awt.image.BufferedImage;
+import java.util.Arrays;
+import java.util.Locale;
+import org.archspan.boundary.Parity;
+import org.archspan.stability.EigenMode;
+import org.archspan.units.OutputUnits;
+import org.jfree.chart.annotations.XYDataImageAnnotation;
+import org.jfree.chart.annotations.XYShapeAnnotation;
+import org.jfree.chart.axis.NumberAxis;
+import org.jfree.chart.plot.XYPlot;
+
+/** A mode: bent field lines over the density change, two wavelengths wide, and its amplitudes against height. */
+public final class ModeFigure implements Figure {
+  private static final int COLUMNS = 240;
+  private static final int ROWS = 240;
+  private static final int LINES = 9;
+  private static final double LARGEST_BEND = 0.09;
+
+  private final EigenMode mode;
+  private final ModeProfile profile;
+  private final OutputUnits units;
+  private final FigureStyle style;
+  private final double lowest;
+  private final double highest;
+
+  /** The figure of a mode. */
+  public ModeFigure(EigenMode mode, OutputUnits units, FigureStyle style) {
+    this.mode = mode;
+    this.profile = new ModeProfile(mode);
+    this.units = units;
+    this.style = style;
+    highest = profile.visibleTop();
+    lowest = mode.parity() == Parity.FLOOR ? profile.bottom() : -highest;
+  }
+
+  @Override
+  public double width() {
+    return FigureStyle.PAGE;
+  }
+
+  @Override
+  public double height() {
+    return 0.42 * FigureStyle.PAGE;
+  }
+
+  @Override
+  public String description() {
+    return String.format(Locale.ROOT, "Field lines bent by the %s mode of order %d over its density change, two"
+        + " wavelengths of %.4g %s wide; beside it displacement amplitudes and kinetic energy against height",
+        mode.parity().name().toLowerCase(Locale.ROOT), mode.order(), units.length(2.0 * Math.PI / mode.wavenumber()),
+        units.length());
+  }
+
+  @Override
+  public void draw(Graphics2D graphics, Rectangle2D area) {
+    graphics.setPaint(style.background());
+    graphics.fill(area);
+    double greatest = greatestContrast();
+    double w = area.getWidth();
+    double h = area.getHeight();
+    XYPlot map = map(greatest);
+    Plots.chart(map, false, style).draw(graphics, new Rectangle2D.Double(area.getX(), area.getY(), 0.53 * w, h));
+    ColourBar.draw(graphics, new Rectangle2D.Double(area.getX() + 0.535 * w, area.getY() + 3.0, 0.105 * w, h - 21.0),
+        ColourMap.DIVERGING, -1.0, 1.0, "density change \u03b4\u03c1/\u03c1 (of its greatest)", style);
+    Plots.chart(amplitudes(), true, style).draw(graphics,
+        new Rectangle2D.Double(area.getX() + 0.66 * w, area.getY(), 0.34 * w, h));
+  }
+
+  private double greatestContrast() {
+    double greatest = 0.0;
+    for (int j = 0; j < ROWS; j++) {
+      greatest = Math.max(greatest, Math.abs(profile.density(height(j))));
+    }
+    return greatest > 0.0 ? greatest : 1.0;
+  }
+
+  private double height(int row) {
+    return lowest + (highest - lowest) * (row + 0.5) / ROWS;
+  }
+
+  private double wavelength() {
+    return 2.0 * Math.PI / mode.wavenumber();
+  }
+
+  private XYPlot map(double greatest) {
+    BufferedImage image = new BufferedImage(COLUMNS, ROWS, BufferedImage.TYPE_INT_RGB);
+    for (int j = 0; j < ROWS; j++) {
+      double contrast = profile.density(height(j)) / greatest;
+      for (int i = 0; i < COLUMNS; i++) {
+        double phase = 4.0 * Math.PI * (i + 0.5) / COLUMNS;
+        image.setRGB(i, ROWS - 1 - j, ColourMap.DIVERGING.colour(0.5 + 0.5 * contrast * Math.cos(phase)));
+      }
+    }
+    NumberAxis along = Plots.axis("along the field (" + units.length() + ")", style);
+    NumberAxis up = Plots.axis("height (" + units.length() + ")", style);
+    double width = units.length(2.0 * wavelength());
+    along.setRange(0.0, width);
+    up.setRange(units.length(lowest), units.length(highest));
+    XYPlot plot = Plots.plot(along, up, style);
+    plot.addAnnotation(new XYDataImageAnnotation(image, 0.0, units.length(lowest), width,
+        units.length(highest - lowest)));
+    addFieldLines(plot);
+    return plot;
+  }
+
+  /** Lines that were horizontal before: (x + X sin kx, z + Z cos kx), for a greatest bend that can be seen. */
+  private void addFieldLines(XYPlot plot) {
+    double greatest = 0.0;
+    for (int j = 0; j < ROWS; j++) {
+      greatest = Math.max(greatest, Math.abs(profile.vertical(height(j))));
+    }
+    double bend = greatest > 0.0 ? LARGEST_BEND * (highest - lowest) / greatest : 0.0;
+    double steepest = 0.0;
+    for (int j = 0; j < ROWS; j++) {
+      steepest = Math.max(steepest, Math.abs(profile.along(height(j))) * bend * mode.wavenumber());
+    }
+    double amplitude = bend * Math.min(1.0, 0.8 / Math.max(0.8, steepest));
+    for (int line = 1; line <= LINES; line++) {
+      double z = lowest + (highest - lowest) * line / (LINES + 1.0);
+      Path2D path = new Path2D.Double();
+      for (int i = -20; i <= COLUMNS + 20; i++) {
+        double x = 2.0 * wavelength() * i / COLUMNS;
+        double px = x + amplitude * profile.along(z) * Math.sin(mode.wavenumber() * x);
+        double pz = z + amplitude * profile.vertical(z) * Math.cos(mode.wavenumber() * x);
+        if (i == -20) {
+          path.moveTo(units.length(px), units.length(pz));
+        } else {
+          path.lineTo(units.length(px), units.length(pz));
+        }
+      }
+      plot.addAnnotation(new XYShapeAnnotation(path, new BasicStroke(0.8f), new java.awt.Color(0x1A1C20)));
+    }
+  }
+
+  private XYPlot amplitudes() {
+    NumberAxis share = Plots.axis("amplitude, of the greatest", style);
+    share.setRange(-1.05, 1.05);
+    NumberAxis up = Plots.axis("height (" + units.length() + ")", style);
+    up.setRange(units.length(mode.parity() == Parity.FLOOR ? lowest : 0.0), units.length(highest));
+    XYPlot plot = Plots.plot(share, up, style);
+    double greatest = greatest(mode.along(), greatest(mode.across(), greatest(mode.vertical(), 1e-300)));
+    double[] heights = Arrays.stream(mode.height()).map(units::length).toArray();
+    add(plot, "vertical", 0, heights, mode.vertical(), greatest);
+    add(plot, "along", 1, heights, mode.along(), greatest);
+    if (mode.crossWavenumber() > 0.0) {
+      add(plot, "across", 2, heights, mode.across(), greatest);
+    }
+    add(plot, "kinetic energy", 3, heights, mode.kineticEnergy(), 1.0);
+    return plot;
+  }
+
+  private double greatest(double[] values, double atLeast) {
+    double greatest = atLeast;
+    for (int i = 0; i < values.length && mode.height()[i] <= highest; i++) {
+      greatest = Math.max(greatest, Math.abs(values[i]));
+    }
+    return greatest;
+  }
+
+  private void add(XYPlot plot, String name, int look, double[] heights, double[] values, double scale) {
+    int index = plot.getDataset(0) == null ? 0 : plot.getDatasetCount();
+    org.jfree.data.xy.DefaultXYDataset data = Plots.curve(name, Arrays.stream(values).map(v -> v / scale).toArray(),
+        heights);
+    plot.setDataset(index, data);
+    plot.setRenderer(index, new CurveRenderer(style, look, 1.2));
+  }
+}

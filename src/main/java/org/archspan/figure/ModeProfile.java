@@ -1,0 +1,76 @@
+package org.archspan.figure;
+
+import org.apache.commons.math3.analysis.interpolation.AkimaSplineInterpolator;
+import org.apache.commons.math3.analysis.polynomials.PolynomialSplineFunction;
+import org.archspan.boundary.Parity;
+import org.archspan.stability.EigenMode;
+
+/** A mode as a smooth function of height, continued to the other side of the midplane. Lengths cm. */
+final class ModeProfile {
+  private final EigenMode mode;
+  private final double bottom;
+  private final double top;
+  private final PolynomialSplineFunction along;
+  private final PolynomialSplineFunction vertical;
+  private final PolynomialSplineFunction density;
+
+  ModeProfile(EigenMode mode) {
+    this.mode = mode;
+    int[] distinct = distinct(mode.height());
+    double[] height = pick(mode.height(), distinct);
+    bottom = height[0];
+    top = height[height.length - 1];
+    AkimaSplineInterpolator interpolator = new AkimaSplineInterpolator();
+    along = interpolator.interpolate(height, pick(mode.along(), distinct));
+    vertical = interpolator.interpolate(height, pick(mode.vertical(), distinct));
+    density = interpolator.interpolate(height, pick(mode.densityContrast(), distinct));
+  }
+
+  /** Nodes without the repeated ends of elements. */
+  private static int[] distinct(double[] height) {
+    return java.util.stream.IntStream.range(0, height.length)
+        .filter(i -> i == 0 || height[i] > height[i - 1] + 1e-9 * (height[height.length - 1] - height[0])).toArray();
+  }
+
+  private static double[] pick(double[] values, int[] indices) {
+    return java.util.Arrays.stream(indices).mapToDouble(i -> values[i]).toArray();
+  }
+
+  private double inside(double z) {
+    return Math.max(bottom, Math.min(top, Math.abs(z)));
+  }
+
+  private double sign(double z, Parity odd) {
+    return z < 0.0 && mode.parity() == odd ? -1.0 : 1.0;
+  }
+
+  /** X: even about the midplane for mirror-symmetric modes, odd for flexing ones. */
+  double along(double z) {
+    return sign(z, Parity.FLEXING) * along.value(inside(z));
+  }
+
+  /** Z: odd for mirror-symmetric modes, even for flexing ones. */
+  double vertical(double z) {
+    return sign(z, Parity.MIRROR) * vertical.value(inside(z));
+  }
+
+  /** rho_1/rho: even for mirror-symmetric modes, odd for flexing ones. */
+  double density(double z) {
+    return sign(z, Parity.FLEXING) * density.value(inside(z));
+  }
+
+  /** Height above which the mode carries less than a hundredth of its greatest kinetic-energy density, at most the top. */
+  double visibleTop() {
+    double visible = bottom;
+    for (int i = 0; i < mode.height().length; i++) {
+      if (mode.kineticEnergy()[i] > 0.01) {
+        visible = mode.height()[i];
+      }
+    }
+    return Math.max(visible, bottom + 0.2 * (top - bottom));
+  }
+
+  double bottom() {
+    return bottom;
+  }
+}

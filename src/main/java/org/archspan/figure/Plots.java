@@ -1,0 +1,84 @@
+package org.archspan.figure;
+
+import java.awt.BasicStroke;
+import org.jfree.chart.JFreeChart;
+import org.jfree.chart.axis.NumberAxis;
+import org.jfree.chart.axis.ValueAxis;
+import org.jfree.chart.plot.Plot;
+import org.jfree.chart.plot.XYPlot;
+import org.jfree.chart.title.LegendTitle;
+import org.jfree.chart.ui.RectangleEdge;
+import org.jfree.chart.ui.RectangleInsets;
+import org.jfree.data.xy.DefaultXYDataset;
+
+/** Axes, plots and charts in the common style. */
+final class Plots {
+  private Plots() {
+  }
+
+  static NumberAxis axis(String label, FigureStyle style) {
+    NumberAxis axis = new NumberAxis(label);
+    axis.setAutoRangeIncludesZero(false);
+    dress(axis, style);
+    return axis;
+  }
+
+  static DecadeAxis logAxis(String label, FigureStyle style) {
+    DecadeAxis axis = new DecadeAxis(label);
+    dress(axis, style);
+    axis.setMinorTickMarksVisible(true);
+    axis.setMinorTickMarkInsideLength(1.6f);
+    axis.setMinorTickMarkOutsideLength(0f);
+    return axis;
+  }
+
+  private static void dress(ValueAxis axis, FigureStyle style) {
+    axis.setLabelFont(style.font());
+    axis.setTickLabelFont(style.font());
+    axis.setLabelPaint(style.ink());
+    axis.setTickLabelPaint(style.ink());
+    axis.setAxisLinePaint(style.ink());
+    axis.setTickMarkPaint(style.ink());
+    axis.setAxisLineStroke(new BasicStroke(0.6f));
+    axis.setTickMarkStroke(new BasicStroke(0.6f));
+    axis.setTickMarkInsideLength(3f);
+    axis.setTickMarkOutsideLength(0f);
+    axis.setLabelInsets(new RectangleInsets(1.5, 1.5, 1.5, 1.5));
+    axis.setTickLabelInsets(new RectangleInsets(1.5, 2.5, 1.5, 2.5));
+  }
+
+  static XYPlot plot(ValueAxis horizontal, ValueAxis vertical, FigureStyle style) {
+    XYPlot plot = new XYPlot(null, horizontal, vertical, null);
+    plot.setBackgroundPaint(style.background());
+    plot.setDomainGridlinesVisible(false);
+    plot.setRangeGridlinesVisible(false);
+    plot.setOutlinePaint(style.ink());
+    plot.setOutlineStroke(new BasicStroke(0.6f));
+    plot.setAxisOffset(RectangleInsets.ZERO_INSETS);
+    return plot;
+  }
+
+  static JFreeChart chart(Plot plot, boolean legend, FigureStyle style) {
+    JFreeChart chart = new JFreeChart(null, style.font(), plot, false);
+    chart.setBackgroundPaint(style.background());
+    chart.setPadding(new RectangleInsets(3.0, 3.0, 3.0, 6.0));
+    if (legend) {
+      LegendTitle title = new LegendTitle(plot);
+      title.setItemFont(style.smallFont());
+      title.setItemPaint(style.ink());
+      title.setBackgroundPaint(style.background());
+      title.setPosition(RectangleEdge.TOP);
+      title.setLegendItemGraphicPadding(new RectangleInsets(1.0, 3.0, 1.0, 3.0));
+      title.setItemLabelPadding(new RectangleInsets(0.5, 0.5, 0.5, 5.0));
+      chart.addLegend(title);
+    }
+    return chart;
+  }
+
+  /** One curve. */
+  static DefaultXYDataset curve(String name, double[] x, double[] y) {
+    DefaultXYDataset data = new DefaultXYDataset();
+    data.addSeries(name, new double[][] {x, y});
+    return data;
+  }
+}

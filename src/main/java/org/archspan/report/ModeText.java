@@ -1,0 +1,51 @@
+package org.archspan.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.archspan.boundary.Parity;
+import org.archspan.equilibrium.Equilibrium;
+import org.archspan.stability.EigenMode;
+import org.archspan.units.OutputUnits;
+
+/** One mode in words and a short table. */
+public final class ModeText {
+  private static final int ROWS = 12;
+
+  private ModeText() {
+  }
+
+  /** The summary, wrapped to a width in characters. */
+  public static String text(String title, EigenMode mode, Equilibrium equilibrium, OutputUnits units, int width) {
+    TextBlock block = new TextBlock(width).heading(title).heading("Mode");
+    String parity = switch (mode.parity()) {
+      case MIRROR -> "mirror-symmetric about the midplane";
+      case FLEXING -> "flexing the midplane";
+      case FLOOR -> "above a rigid floor";
+    };
+    block.labelled("symmetry", parity + ", order " + mode.order())
+        .labelled("wavelength", Numbers.length(2.0 * Math.PI / mode.wavenumber(), units) + " along the field")
+        .labelled("growth time", Numbers.time(1.0 / mode.growthRate(), units))
+        .labelled("centroid", Numbers.length(mode.centroidHeight(), units) + " (kinetic energy)")
+        .labelled("column", mode.parity() == Parity.FLEXING
+            ? "unchanged to first order: what one side gains the other loses"
+            : "contrast " + Numbers.plain(mode.columnContrast())
+                + " when the midplane layer moves by one scale height");
+    block.heading("Amplitudes, for a midplane layer that moves by one scale height ("
+        + Numbers.length(equilibrium.scaleHeight(), units) + ")").table(rows(mode, units));
+    return block.text();
+  }
+
+  private static List<List<String>> rows(EigenMode mode, OutputUnits units) {
+    List<List<String>> rows = new ArrayList<>();
+    rows.add(List.of("height", "along", "across", "vertical", "density", "energy"));
+    rows.add(List.of(units.length(), units.length(), units.length(), units.length(), "contrast", "of maximum"));
+    int last = mode.height().length - 1;
+    for (int row = 0; row < ROWS; row++) {
+      int i = Math.round((float) last * row / (ROWS - 1));
+      rows.add(List.of(Numbers.plain(units.length(mode.height()[i])), Numbers.plain(units.length(mode.along()[i])),
+          Numbers.plain(units.length(mode.across()[i])), Numbers.plain(units.length(mode.vertical()[i])),
+          Numbers.plain(mode.densityContrast()[i]), Numbers.plain(mode.kineticEnergy()[i])));
+    }
+    return rows;
+  }
+}
