@@ -25,11 +25,11 @@ public final class EquilibriumFigure implements Figure {
   /** The figure of an equilibrium. */
   public EquilibriumFigure(Equilibrium equilibrium, OutputUnits units, FigureStyle style) {
     this.equilibrium = equilibrium;
-    this.units = units;
+    this.units = units.suiting(equilibrium.top());
     this.style = style;
     for (int i = 0; i < POINTS; i++) {
       double z = equilibrium.bottom() + (equilibrium.top() - equilibrium.bottom()) * i / (POINTS - 1);
-      height[i] = units.length(z);
+      height[i] = this.units.length(z);
       states[i] = equilibrium.at(z);
     }
   }
@@ -48,6 +48,11 @@ public final class EquilibriumFigure implements Figure {
   public String description() {
     return "Base state against height: density and pressures relative to their values at the lower end, field strength"
         + " and Alfven speed, gravity";
+  }
+
+  @Override
+  public java.awt.Color background() {
+    return style.background();
   }
 
   @Override

@@ -1,5 +1,6 @@
 package org.archspan.figure;
 
+import java.awt.Color;
 import java.awt.Graphics2D;
 import java.awt.geom.Rectangle2D;
 
@@ -13,6 +14,9 @@ public interface Figure {
 
   /** What the figure shows, for those who cannot see it. */
   String description();
+
+  /** Colour of the page. */
+  Color background();
 
   /** Draws into an area. */
   void draw(Graphics2D graphics, Rectangle2D area);

@@ -44,6 +44,8 @@ public final class FigureImage {
     graphics.setRenderingHint(RenderingHints.KEY_STROKE_CONTROL, RenderingHints.VALUE_STROKE_PURE);
     graphics.setRenderingHint(RenderingHints.KEY_INTERPOLATION, RenderingHints.VALUE_INTERPOLATION_BICUBIC);
     graphics.scale(scale, scale);
+    graphics.setPaint(figure.background());
+    graphics.fill(new Rectangle2D.Double(0.0, 0.0, figure.width() + 1.0, figure.height() + 1.0));
     figure.draw(graphics, area(figure));
     graphics.dispose();
     try {
@@ -89,6 +91,7 @@ public final class FigureImage {
     SVGGeneratorContext context = SVGGeneratorContext.createDefault(document);
     context.setComment(null);
     context.setPrecision(4);
+    context.setImageHandler(new EmbeddedImages());
     SVGGraphics2D graphics = new SVGGraphics2D(context, false);
     graphics.setSVGCanvasSize(new java.awt.Dimension((int) Math.ceil(figure.width()), (int) Math.ceil(figure.height())));
     figure.draw(graphics, area(figure));

@@ -4,7 +4,6 @@ import java.awt.BasicStroke;
 import java.awt.Graphics2D;
 import java.awt.geom.Ellipse2D;
 import java.awt.geom.Rectangle2D;
-import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Locale;
@@ -15,8 +14,8 @@ import org.archspan.boundary.Parity;
 import org.archspan.stability.GrowthCurve;
 import org.archspan.stability.GrowthPoint;
 import org.archspan.units.OutputUnits;
-import org.jfree.chart.annotations.XYTextAnnotation;
 import org.jfree.chart.axis.NumberAxis;
+import org.jfree.chart.plot.DatasetRenderingOrder;
 import org.jfree.chart.plot.IntervalMarker;
 import org.jfree.chart.plot.ValueMarker;
 import org.jfree.chart.plot.XYPlot;
@@ -49,7 +48,8 @@ public final class GrowthFigure implements Figure {
     this.marked = marked;
     this.limit = limit;
     this.longestStable = longestStable;
-    this.units = units;
+    this.units = units.suiting(curves.stream().flatMap(curve -> curve.points().stream())
+        .mapToDouble(GrowthPoint::wavelength).min().orElse(0.0) * 4.0);
     this.style = style;
   }
 
@@ -71,6 +71,11 @@ public final class GrowthFigure implements Figure {
   }
 
   @Override
+  public java.awt.Color background() {
+    return style.background();
+  }
+
+  @Override
   public void draw(Graphics2D graphics, Rectangle2D area) {
     DecadeAxis wavelength = Plots.logAxis("wavelength along the field (" + units.length() + ")", style);
     NumberAxis growth = Plots.axis("growth rate (" + units.time() + "\u207b\u00b9)", style);
@@ -79,7 +84,7 @@ public final class GrowthFigure implements Figure {
     shadeStable(plot, wavelength);
     markLimit(plot);
     addCurves(plot);
-    mark(plot, wavelength, growth);
+    mark(plot);
     Plots.chart(plot, true, style).draw(graphics, area);
   }
 
@@ -119,6 +124,7 @@ public final class GrowthFigure implements Figure {
     line.setLabel("infinitely short waves across");
     line.setLabelFont(style.smallFont());
     line.setLabelPaint(style.ink());
+    line.setLabelBackgroundColor(new java.awt.Color(0, 0, 0, 0));
     line.setLabelAnchor(RectangleAnchor.TOP_RIGHT);
     line.setLabelTextAnchor(TextAnchor.BOTTOM_RIGHT);
     plot.addRangeMarker(line, Layer.BACKGROUND);
@@ -156,41 +162,25 @@ public final class GrowthFigure implements Figure {
         units.length(2.0 * Math.PI / ky), units.length());
   }
 
-  private void mark(XYPlot plot, DecadeAxis wavelength, NumberAxis growth) {
+  private void mark(XYPlot plot) {
     if (marked.isEmpty() || marked.get().wavenumber() == 0.0) {
       return;
     }
     double x = units.length(marked.get().wavelength());
     double y = units.rate(marked.get().growthRate());
-    XYSeries series = new XYSeries("sets the spacing");
+    XYSeries series = new XYSeries(text(x, y));
     series.add(x, y);
     XYLineAndShapeRenderer dot = new XYLineAndShapeRenderer(false, true);
     dot.setSeriesShape(0, new Ellipse2D.Double(-2.6, -2.6, 5.2, 5.2));
     dot.setSeriesPaint(0, style.ink());
-    dot.setDefaultSeriesVisibleInLegend(false);
     int index = curves.isEmpty() ? 0 : plot.getDatasetCount();
     plot.setDataset(index, new XYSeriesCollection(series));
     plot.setRenderer(index, dot);
-    boolean left = x > Math.sqrt(wavelength.getLowerBound() * wavelength.getUpperBound());
-    XYTextAnnotation label = new XYTextAnnotation(text(x, y), x * (left ? 0.94 : 1.06),
-        Math.max(0.06 * growth.getUpperBound(), y - 0.1 * growth.getUpperBound() * (limit.isPresent() ? 1.0 : 0.0)));
-    label.setFont(style.smallFont());
-    label.setPaint(style.ink());
-    label.setTextAnchor(left ? TextAnchor.CENTER_RIGHT : TextAnchor.CENTER_LEFT);
-    label.setBackgroundPaint(style.background());
-    plot.addAnnotation(label);
+    plot.setDatasetRenderingOrder(DatasetRenderingOrder.FORWARD);
   }
 
   private String text(double x, double y) {
-    String length = units.length().equals("pc") && x >= 1000.0
-        ? String.format(Locale.ROOT, "%.2f kpc", x / 1000.0) : String.format(Locale.ROOT, "%.3g %s", x, units.length());
-    return length + String.format(Locale.ROOT, ", %.3g %s", 1.0 / y, units.time());
-  }
-
-  /** Curves whose order is 0 come last, so that they are drawn on top. */
-  static List<GrowthCurve> strongestLast(List<GrowthCurve> curves) {
-    List<GrowthCurve> ordered = new ArrayList<>(curves);
-    ordered.sort((a, b) -> Integer.compare(b.order(), a.order()));
-    return ordered;
+    return String.format(Locale.ROOT, "sets the spacing: %.3g %s, growth time %.3g %s", x, units.length(), 1.0 / y,
+        units.time());
   }
 }

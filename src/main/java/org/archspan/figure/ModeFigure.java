@@ -7,6 +7,7 @@ import java.awt.geom.Rectangle2D;
 import java.awt.image.BufferedImage;
 import java.util.Arrays;
 import java.util.Locale;
+import java.util.function.DoubleUnaryOperator;
 import org.archspan.boundary.Parity;
 import org.archspan.stability.EigenMode;
 import org.archspan.units.OutputUnits;
@@ -33,7 +34,7 @@ public final class ModeFigure implements Figure {
   public ModeFigure(EigenMode mode, OutputUnits units, FigureStyle style) {
     this.mode = mode;
     this.profile = new ModeProfile(mode);
-    this.units = units;
+    this.units = units.suiting(profile.visibleTop());
     this.style = style;
     highest = profile.visibleTop();
     lowest = mode.parity() == Parity.FLOOR ? profile.bottom() : -highest;
@@ -55,6 +56,11 @@ public final class ModeFigure implements Figure {
         + " wavelengths of %.4g %s wide; beside it displacement amplitudes and kinetic energy against height",
         mode.parity().name().toLowerCase(Locale.ROOT), mode.order(), units.length(2.0 * Math.PI / mode.wavenumber()),
         units.length());
+  }
+
+  @Override
+  public java.awt.Color background() {
+    return style.background();
   }
 
   @Override
@@ -144,30 +150,30 @@ public final class ModeFigure implements Figure {
     NumberAxis up = Plots.axis("height (" + units.length() + ")", style);
     up.setRange(units.length(mode.parity() == Parity.FLOOR ? lowest : 0.0), units.length(highest));
     XYPlot plot = Plots.plot(share, up, style);
-    double greatest = greatest(mode.along(), greatest(mode.across(), greatest(mode.vertical(), 1e-300)));
-    double[] heights = Arrays.stream(mode.height()).map(units::length).toArray();
-    add(plot, "vertical", 0, heights, mode.vertical(), greatest);
-    add(plot, "along", 1, heights, mode.along(), greatest);
-    if (mode.crossWavenumber() > 0.0) {
-      add(plot, "across", 2, heights, mode.across(), greatest);
+    double from = Math.max(lowest, profile.bottom());
+    double[] heights = new double[ROWS + 1];
+    for (int i = 0; i <= ROWS; i++) {
+      heights[i] = from + (highest - from) * i / ROWS;
     }
-    add(plot, "kinetic energy", 3, heights, mode.kineticEnergy(), 1.0);
+    double greatest = Math.max(greatest(profile::vertical, heights),
+        Math.max(greatest(profile::along, heights), greatest(profile::across, heights)));
+    add(plot, "vertical", 0, heights, profile::vertical, greatest);
+    add(plot, "along", 1, heights, profile::along, greatest);
+    if (mode.crossWavenumber() > 0.0) {
+      add(plot, "across", 2, heights, profile::across, greatest);
+    }
+    add(plot, "kinetic energy", 3, heights, profile::kineticEnergy, 1.0);
     return plot;
   }
 
-  private double greatest(double[] values, double atLeast) {
-    double greatest = atLeast;
-    for (int i = 0; i < values.length && mode.height()[i] <= highest; i++) {
-      greatest = Math.max(greatest, Math.abs(values[i]));
-    }
-    return greatest;
+  private static double greatest(DoubleUnaryOperator value, double[] heights) {
+    return Arrays.stream(heights).map(value).map(Math::abs).max().orElse(1.0);
   }
 
-  private void add(XYPlot plot, String name, int look, double[] heights, double[] values, double scale) {
+  private void add(XYPlot plot, String name, int look, double[] heights, DoubleUnaryOperator value, double scale) {
     int index = plot.getDataset(0) == null ? 0 : plot.getDatasetCount();
-    org.jfree.data.xy.DefaultXYDataset data = Plots.curve(name, Arrays.stream(values).map(v -> v / scale).toArray(),
-        heights);
-    plot.setDataset(index, data);
+    plot.setDataset(index, Plots.curve(name, Arrays.stream(heights).map(z -> value.applyAsDouble(z) / scale).toArray(),
+        Arrays.stream(heights).map(units::length).toArray()));
     plot.setRenderer(index, new CurveRenderer(style, look, 1.2));
   }
 }

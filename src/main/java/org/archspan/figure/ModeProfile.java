@@ -13,6 +13,8 @@ final class ModeProfile {
   private final PolynomialSplineFunction along;
   private final PolynomialSplineFunction vertical;
   private final PolynomialSplineFunction density;
+  private final PolynomialSplineFunction across;
+  private final PolynomialSplineFunction energy;
 
   ModeProfile(EigenMode mode) {
     this.mode = mode;
@@ -23,6 +25,8 @@ final class ModeProfile {
     AkimaSplineInterpolator interpolator = new AkimaSplineInterpolator();
     along = interpolator.interpolate(height, pick(mode.along(), distinct));
     vertical = interpolator.interpolate(height, pick(mode.vertical(), distinct));
+    across = interpolator.interpolate(height, pick(mode.across(), distinct));
+    energy = interpolator.interpolate(height, pick(mode.kineticEnergy(), distinct));
     density = interpolator.interpolate(height, pick(mode.densityContrast(), distinct));
   }
 
@@ -52,6 +56,16 @@ final class ModeProfile {
   /** Z: odd for mirror-symmetric modes, even for flexing ones. */
   double vertical(double z) {
     return sign(z, Parity.MIRROR) * vertical.value(inside(z));
+  }
+
+  /** Y on this side of the midplane. */
+  double across(double z) {
+    return across.value(inside(z));
+  }
+
+  /** Kinetic-energy density over its greatest value, dimensionless. */
+  double kineticEnergy(double z) {
+    return energy.value(inside(z));
   }
 
   /** rho_1/rho: even for mirror-symmetric modes, odd for flexing ones. */

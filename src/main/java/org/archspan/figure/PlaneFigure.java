@@ -71,6 +71,11 @@ public final class PlaneFigure implements Figure {
   }
 
   @Override
+  public java.awt.Color background() {
+    return style.background();
+  }
+
+  @Override
   public void draw(Graphics2D graphics, Rectangle2D area) {
     graphics.setPaint(style.background());
     graphics.fill(area);

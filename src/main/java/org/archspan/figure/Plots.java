@@ -1,6 +1,9 @@
 package org.archspan.figure;
 
 import java.awt.BasicStroke;
+import java.text.DecimalFormat;
+import java.text.DecimalFormatSymbols;
+import java.util.Locale;
 import org.jfree.chart.JFreeChart;
 import org.jfree.chart.axis.NumberAxis;
 import org.jfree.chart.axis.ValueAxis;
@@ -19,6 +22,9 @@ final class Plots {
   static NumberAxis axis(String label, FigureStyle style) {
     NumberAxis axis = new NumberAxis(label);
     axis.setAutoRangeIncludesZero(false);
+    DecimalFormat format = new DecimalFormat("0.######", DecimalFormatSymbols.getInstance(Locale.ROOT));
+    format.setNegativePrefix("\u2212");
+    axis.setNumberFormatOverride(format);
     dress(axis, style);
     return axis;
   }

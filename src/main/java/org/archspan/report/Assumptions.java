@@ -43,18 +43,18 @@ public final class Assumptions {
       kind = "prescribed stratification (" + prescribed.strata().size() + " strata), " + kind
           + (prescribed.dispersion().isPresent() ? "" : " as the force balance demands");
     }
-    return kind + "; adiabatic index of the perturbations " + Numbers.plain(disk.gasClosure().adiabaticIndex());
+    return kind + "; adiabatic index of the perturbations " + Numbers.given(disk.gasClosure().adiabaticIndex());
   }
 
   private static String field(Disk disk, GasState bottom, OutputUnits units) {
     if (bottom.magneticPerMass() == 0.0 && !(disk.field() instanceof MagneticField.Balance)) {
       return "none";
     }
-    String strength = Numbers.plain(units.field(bottom.fieldStrength())) + " " + units.field() + " at the lower end";
+    String strength = Numbers.given(units.field(bottom.fieldStrength())) + " " + units.field() + " at the lower end";
     if (disk.field() instanceof MagneticField.Balance) {
       return strength + "; at each height what the force balance leaves over";
     }
-    return strength + "; magnetic over gas pressure " + Numbers.plain(bottom.magneticPerMass() / bottom.gasPerMass())
+    return strength + "; magnetic over gas pressure " + Numbers.given(bottom.magneticPerMass() / bottom.gasPerMass())
         + " at every height";
   }
 
@@ -63,12 +63,12 @@ public final class Assumptions {
       return "none";
     }
     CosmicRayClosure closure = cosmicRays.closure();
-    String ratio = "pressure " + Numbers.plain(bottom.cosmicRayPerMass() / bottom.gasPerMass()) + " of the gas's; ";
+    String ratio = "pressure " + Numbers.given(bottom.cosmicRayPerMass() / bottom.gasPerMass()) + " of the gas's; ";
     if (Double.isInfinite(closure.diffusivity())) {
       return ratio + "they diffuse along the field at once";
     }
-    return ratio + "index " + Numbers.plain(closure.adiabaticIndex()) + ", diffusivity along the field "
-        + Numbers.plain(closure.diffusivity()) + " cm^2/s";
+    return ratio + "index " + Numbers.given(closure.adiabaticIndex()) + ", diffusivity along the field "
+        + Numbers.given(closure.diffusivity()) + " cm^2/s";
   }
 
   private static String gravity(List<GravityLaw> laws) {

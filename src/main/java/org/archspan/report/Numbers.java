@@ -18,15 +18,23 @@ public final class Numbers {
     }
     double size = Math.abs(value);
     if (size != 0.0 && (size >= 1e5 || size < 1e-3)) {
-      return String.format(Locale.ROOT, "%.3e", value);
+      return String.format(Locale.ROOT, "%.3e", value).replace("e+0", "e").replace("e+", "e").replace("e-0", "e-");
     }
     int decimals = size == 0.0 ? 0 : (int) Math.max(0, 3 - Math.floor(Math.log10(size)));
     return String.format(Locale.ROOT, "%." + decimals + "f", value);
   }
 
+  /** A number as it was given, without trailing zeros; dimensionless. */
+  public static String given(double value) {
+    if (!Double.isFinite(value) || value == 0.0 || Math.abs(value) >= 1e5 || Math.abs(value) < 1e-3) {
+      return value == 0.0 ? "0" : plain(value);
+    }
+    return new java.math.BigDecimal(value).round(new java.math.MathContext(6)).stripTrailingZeros().toPlainString();
+  }
+
   /** A small relative error with one digit. */
   public static String error(double value) {
-    return Double.isNaN(value) ? "not known" : String.format(Locale.ROOT, "%.0e", value);
+    return Double.isNaN(value) ? "not known" : String.format(Locale.ROOT, "%.0e", value).replace("e-0", "e-").replace("e+00", "");
   }
 
   /** A length (cm) with unit; kiloparsecs where parsecs would be thousands. */

@@ -1,6 +1,7 @@
 package org.archspan.report;
 
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.archspan.disk.Disk;
@@ -10,10 +11,12 @@ import org.archspan.figure.GrowthFigure;
 import org.archspan.figure.ModeFigure;
 import org.archspan.spacing.Arm;
 import org.archspan.spacing.BranchPeak;
+import org.archspan.spacing.GrowthCurves;
 import org.archspan.spacing.ModeStudy;
 import org.archspan.spacing.SearchOptions;
 import org.archspan.spacing.SpacingResult;
 import org.archspan.stability.EigenMode;
+import org.archspan.stability.GrowthCurve;
 import org.archspan.stability.GrowthPoint;
 import org.archspan.table.BranchTable;
 import org.archspan.table.EquilibriumTable;
@@ -46,12 +49,13 @@ public final class SpacingFiles {
     OutputFolder output = new OutputFolder().text("summary.json", json).text("summary.txt", summary)
         .table("equilibrium", EquilibriumTable.of(result.equilibrium(), ROWS, units))
         .figure("equilibrium", new EquilibriumFigure(result.equilibrium(), units, style));
-    if (!result.curves().isEmpty()) {
-      output.table("growth", GrowthTable.of(result.curves(), units));
+    List<GrowthCurve> curves = GrowthCurves.of(result, disk, options);
+    if (!curves.isEmpty()) {
+      output.table("growth", GrowthTable.of(curves, units));
       output.table("branches", BranchTable.of(result.branches(), units));
     }
     if (!result.stable()) {
-      output.figure("growth", growthFigure(style));
+      output.figure("growth", growthFigure(curves, style));
     }
     Optional<EigenMode> mode = new ModeStudy(disk, result.equilibrium(), options, Arm.unknown()).spacingMode(result);
     mode.ifPresent(shape -> output.table("mode", ModeTable.of(shape, units))
@@ -62,10 +66,10 @@ public final class SpacingFiles {
     output.write(folder, overwrite);
   }
 
-  private GrowthFigure growthFigure(FigureStyle style) {
+  private GrowthFigure growthFigure(List<GrowthCurve> curves, FigureStyle style) {
     Optional<GrowthPoint> marked = result.spacingPeak().filter(peak -> peak.wavenumber() > 0.0)
         .map(SpacingFiles::point);
-    return new GrowthFigure(result.curves(), marked, OptionalDouble.of(result.acrossLimit().growthRate()),
+    return new GrowthFigure(curves, marked, OptionalDouble.of(result.acrossLimit().growthRate()),
         result.longestStableWavelength(), units, style);
   }
 

@@ -55,11 +55,10 @@ public final class SpacingText {
     if (!result.branches().isEmpty()) {
       block.table(branches());
     }
-    block.sentence("");
-    block.sentence(sentence(result, units));
+    block.gap().sentence(sentence(result, units));
     result.complex().ifPresent(this::complex);
     BranchPeak peak = result.spacingPeak().orElseThrow();
-    if (peak.heldBy() != HeldBy.HALO) {
+    if (peak.heldBy() == HeldBy.DISK) {
       block.sentence("In a domain 1.5 times as tall its wavelength changes by "
           + Numbers.change(peak.tallerWavelengthChange()) + " and its growth rate by "
           + Numbers.change(peak.tallerGrowthChange()) + ".");
@@ -108,7 +107,7 @@ public final class SpacingText {
     String parity = peak.heldBy() == HeldBy.HALO || peak.parity() == Parity.FLOOR ? ""
         : peak.parity() == Parity.MIRROR ? " (mirror-symmetric about the midplane)" : " (flexing the midplane)";
     return who + parity + " has a wavelength of " + Numbers.length(peak.wavelength(), units)
-        + " along the field and grows e-fold in " + Numbers.time(peak.growthTime(), units) + ".";
+        + " along the field; its growth time is " + Numbers.time(peak.growthTime(), units) + ".";
   }
 
   private void complex(CloudComplex complex) {
@@ -137,7 +136,7 @@ public final class SpacingText {
     BranchPeak peak = result.spacingPeak().orElseThrow();
     block.sentence("Estimated relative errors: growth rate " + Numbers.error(peak.growthError()) + ", wavelength "
         + Numbers.error(peak.wavelengthError()) + (peak.unstableModes() < 0 ? "."
-        : "; at that wavelength exactly " + modes(peak.unstableModes()) + " of this parity " + "grow"
+        : "; at that wavelength exactly " + modes(peak.unstableModes()) + " of this parity grow"
         + (peak.unstableModes() == 1 ? "s." : ".")));
   }
 

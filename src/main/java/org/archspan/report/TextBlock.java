@@ -19,6 +19,11 @@ final class TextBlock {
     return this;
   }
 
+  TextBlock gap() {
+    text.append('\n');
+    return this;
+  }
+
   TextBlock sentence(String words) {
     wrap(words, "  ", "  ");
     return this;

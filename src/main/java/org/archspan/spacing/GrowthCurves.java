@@ -1,9 +1,14 @@
 package org.archspan.spacing;
 
 import java.util.ArrayList;
+import java.util.EnumMap;
 import java.util.List;
+import java.util.Map;
+import org.archspan.boundary.Parity;
+import org.archspan.disk.Disk;
 import org.archspan.stability.BranchSolver;
 import org.archspan.stability.GrowthCurve;
+import org.archspan.stability.ModeProblem;
 
 /** Growth against wavelength of the branches that are reported. */
 public final class GrowthCurves {
@@ -13,16 +18,21 @@ public final class GrowthCurves {
   private GrowthCurves() {
   }
 
-  /** One curve for each branch, from the shortest wave that grows to well beyond the fastest. */
-  static List<GrowthCurve> of(BranchSearch search, WaveRange range) {
+  /** One curve for each branch of a result, from the shortest wave that grows to well beyond the fastest. */
+  public static List<GrowthCurve> of(SpacingResult result, Disk disk, SearchOptions options) {
+    WaveRange range = WaveRange.of(options, result.equilibrium());
+    double slowest = result.branches().stream().mapToDouble(BranchPeak::wavenumber).filter(k -> k > 0.0).min()
+        .orElse(0.0);
+    Map<Parity, BranchSolver> solvers = new EnumMap<>(Parity.class);
     List<GrowthCurve> curves = new ArrayList<>();
-    double slowest = search.found().stream().mapToDouble(branch -> branch.peak().wavenumber()).filter(k -> k > 0.0)
-        .min().orElse(search.marginalWavenumber());
-    for (BranchSearch.Found branch : search.found()) {
-      double highest = Math.min(range.highest(), branch.solver().marginalWavenumber(branch.peak().order()));
+    for (BranchPeak peak : result.branches()) {
+      BranchSolver solver = solvers.computeIfAbsent(peak.parity(), parity -> new BranchSolver(new ModeProblem(
+          result.equilibrium(), disk.gasClosure(), disk.cosmicRays().closure(), parity, range.crossWavenumber(),
+          options.tolerance())));
+      double highest = Math.min(range.highest(), solver.marginalWavenumber(peak.order()));
       double lowest = Math.max(range.lowest(), slowest / LONGEST_OVER_FASTEST);
-      if (lowest < highest && Double.isFinite(highest)) {
-        curves.add(branch.solver().curve(branch.peak().order(), wavenumbers(lowest, highest, POINTS), false));
+      if (lowest > 0.0 && lowest < highest && Double.isFinite(highest)) {
+        curves.add(of(solver, peak.order(), lowest, highest, POINTS, false));
       }
     }
     return curves;

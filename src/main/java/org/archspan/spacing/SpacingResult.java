@@ -4,7 +4,6 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.archspan.equilibrium.Equilibrium;
-import org.archspan.stability.GrowthCurve;
 
 /**
  * The answer of the main job, CGS.
@@ -18,15 +17,13 @@ import org.archspan.stability.GrowthCurve;
  * @param acrossLimit             limit of short waves across the field
  * @param longestStableWavelength shorter waves along the field than this are stable, cm; absent when all are
  * @param complex                 what one spacing gathers; empty when stable
- * @param curves                  growth against wavelength, for the branches reported
  * @param certificate             proof that nothing faster was missed
  * @param gatheringHeight         greatest centroid height that counts as gathering the disk's own gas, cm
  * @param warnings                what a reader of the result must know, one sentence each
  */
 public record SpacingResult(Equilibrium equilibrium, double forceBalanceResidual, List<BranchPeak> branches,
     Optional<BranchPeak> fastest, Optional<Integer> spacing, AcrossLimit acrossLimit,
-    OptionalDouble longestStableWavelength, Optional<CloudComplex> complex, List<GrowthCurve> curves,
-    Certificate certificate, double gatheringHeight, List<String> warnings) {
+    OptionalDouble longestStableWavelength, Optional<CloudComplex> complex, Certificate certificate, double gatheringHeight, List<String> warnings) {
 
   /** Whether no wave grows. */
   public boolean stable() {

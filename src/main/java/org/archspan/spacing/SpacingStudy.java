@@ -42,8 +42,7 @@ public final class SpacingStudy {
     Optional<CloudComplex> complex = spacing.map(branches::get).or(() -> fastest)
         .filter(peak -> peak.wavenumber() > 0.0).map(peak -> complex(equilibrium, peak));
     return new SpacingResult(equilibrium, ForceBalance.residual(equilibrium), branches, fastest, spacing,
-        acrossLimit(equilibrium), longestStable(search), complex, GrowthCurves.of(search, range),
-        search.certificate(), gatheringHeight,
+        acrossLimit(equilibrium), longestStable(search), complex, search.certificate(), gatheringHeight,
         Findings.of(equilibrium, branches, fastest, spacing, options));
   }
 

@@ -9,6 +9,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.nio.file.StandardOpenOption;
+import java.util.UUID;
 
 /** Writes files that are whole or absent: into a temporary file beside, flushed to the disk, then moved into place. */
 public final class WholeFile {
@@ -29,8 +30,9 @@ public final class WholeFile {
       if (!overwrite && Files.exists(file)) {
         throw exists(file);
       }
-      temporary = Files.createTempFile(folder, "." + file.getFileName(), ".part");
-      try (FileChannel channel = FileChannel.open(temporary, StandardOpenOption.WRITE)) {
+      temporary = folder.resolve("." + file.getFileName() + "." + UUID.randomUUID() + ".part");
+      try (FileChannel channel =
+          FileChannel.open(temporary, StandardOpenOption.WRITE, StandardOpenOption.CREATE_NEW)) {
         ByteBuffer buffer = ByteBuffer.wrap(content);
         while (buffer.hasRemaining()) {
           channel.write(buffer);

@@ -37,6 +37,12 @@ public record OutputUnits(String length, double centimetresPerLength, String tim
     return unit.factor();
   }
 
+  /** The same, with kiloparsecs where a length (cm) would be thousands of parsecs. */
+  public OutputUnits suiting(double centimetres) {
+    boolean large = length.equals("pc") && centimetres > 2e3 * centimetresPerLength;
+    return large ? new OutputUnits("kpc", 1e3 * centimetresPerLength, time, secondsPerTime) : this;
+  }
+
   /** Whether lengths are of the size of stars rather than of galaxies. */
   public boolean stellar() {
     return centimetresPerLength < 0.01 * Constants.ASTRONOMICAL_UNIT;
