@@ -11,11 +11,13 @@ final class HydrogenMass {
   private HydrogenMass() {
   }
 
-  /** In g. */
+  /** Whether a key of the file decides it, whole or as part of an uncertain value. */
+  static boolean decidedBy(String key) {
+    return key.equals(KEY) || key.startsWith(KEY + ".");
+  }
+
+  /** In g, once the keys that decide it are read. */
   static double perNucleus(Inputs inputs) {
-    Entry entry = inputs.entry(KEY);
-    Object given = entry == null ? null : entry.value();
-    double masses = given instanceof Long whole ? whole.doubleValue() : given instanceof Double real ? real : STANDARD;
-    return masses * Constants.HYDROGEN_MASS;
+    return inputs.number(KEY).orElse(STANDARD) * Constants.HYDROGEN_MASS;
   }
 }

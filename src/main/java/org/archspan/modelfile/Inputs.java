@@ -21,9 +21,9 @@ final class Inputs {
     this.entries = entries;
     this.faults = faults;
     ValueReader reader = new ValueReader(this);
-    for (String key : entries.keySet()) {
-      reader.read(key);
-    }
+    // densities of nuclei need the mass of each, wherever it stands
+    entries.keySet().stream().filter(HydrogenMass::decidedBy).forEach(reader::read);
+    entries.keySet().stream().filter(key -> !HydrogenMass.decidedBy(key)).forEach(reader::read);
   }
 
   Entry entry(String key) {

@@ -127,6 +127,17 @@ class GasAndGravityTest {
     assertThat(density.spread()).isEqualTo(2.0);
   }
 
+  /** An uncertain mass for each nucleus counts with its middle wherever it stands, never with the standard instead. */
+  @ParameterizedTest
+  @CsvSource(delimiter = '|', value = {"{ low = 1.2, high = 1.3 }|1.25", "{ value = 1.3, normal = 0.1 }|1.3",
+      "{ value = 2, factor = 1.5 }|2"})
+  void anUncertainMassOfNuclei(String mass, double hydrogenMasses) {
+    Model model = model(PLAIN.replace("[field]", "mass-per-hydrogen = " + mass + "\n[field]"));
+    assertThat(((Gas.Isothermal) model.disk().gas()).bottomDensity().getAsDouble() / Constants.HYDROGEN_MASS)
+        .isCloseTo(hydrogenMasses, within(1e-14)); // rounding
+    assertThat(model.uncertainties()).containsOnlyKeys("gas.mass-per-hydrogen");
+  }
+
   @ParameterizedTest
   @CsvSource(delimiter = '|', quoteCharacter = '`', value = {
       "{ value = \"6 km/s\" } | gas.dispersion: found an incomplete uncertainty; allowed are { value, normal }",
