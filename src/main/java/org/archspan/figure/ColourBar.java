@@ -9,7 +9,7 @@ import org.jfree.chart.axis.AxisLocation;
 import org.jfree.chart.plot.XYPlot;
 import org.jfree.chart.ui.RectangleInsets;
 
-/** The scale that belongs to a colour map, as a narrow plot of its own. */
+/** The scale that belongs to a colour map, as a narrow plot of its own, laid out like the map beside it. */
 final class ColourBar {
   private static final int STEPS = 256;
 
@@ -24,15 +24,14 @@ final class ColourBar {
     }
     NumberAxis value = Plots.axis(label, style);
     value.setRange(low, high);
-    NumberAxis none = Plots.axis(null, style);
+    NumberAxis none = Plots.axis(" ", style);
     none.setRange(0.0, 1.0);
-    none.setTickLabelsVisible(false);
+    none.setTickLabelPaint(style.background());
     none.setTickMarksVisible(false);
     XYPlot plot = Plots.plot(none, value, style);
+    plot.setInsets(new RectangleInsets(4.0, 0.0, 4.0, 0.0));
     plot.setRangeAxisLocation(AxisLocation.BOTTOM_OR_RIGHT);
-    plot.getRenderer();
     plot.addAnnotation(new XYDataImageAnnotation(image, 0.0, low, 1.0, high - low));
-    plot.setInsets(RectangleInsets.ZERO_INSETS);
-    plot.draw(graphics, area, null, null, null);
+    Plots.chart(plot, false, style).draw(graphics, area);
   }
 }

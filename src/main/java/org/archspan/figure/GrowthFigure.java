@@ -4,6 +4,7 @@ import java.awt.BasicStroke;
 import java.awt.Graphics2D;
 import java.awt.geom.Ellipse2D;
 import java.awt.geom.Rectangle2D;
+import java.util.Comparator;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Locale;
@@ -44,7 +45,7 @@ public final class GrowthFigure implements Figure {
    */
   public GrowthFigure(List<GrowthCurve> curves, Optional<GrowthPoint> marked, OptionalDouble limit,
       OptionalDouble longestStable, OutputUnits units, FigureStyle style) {
-    this.curves = curves;
+    this.curves = drawingOrder(curves);
     this.marked = marked;
     this.limit = limit;
     this.longestStable = longestStable;
@@ -134,6 +135,7 @@ public final class GrowthFigure implements Figure {
     Set<String> named = new HashSet<>();
     List<Double> across = curves.stream().map(GrowthCurve::crossWavenumber).distinct().toList();
     int index = 0;
+    plot.setDatasetRenderingOrder(DatasetRenderingOrder.FORWARD);
     for (GrowthCurve curve : curves) {
       int group = across.indexOf(curve.crossWavenumber());
       int look = across.size() > 1 ? group : curve.parity() == Parity.FLEXING ? 1 : 0;
@@ -142,24 +144,34 @@ public final class GrowthFigure implements Figure {
       String name = name(curve, across.size() > 1);
       plot.setDataset(index, Plots.curve(name, x, y));
       CurveRenderer renderer = new CurveRenderer(style, look, curve.order() == 0 ? 1.5 : 0.6);
-      renderer.setDefaultSeriesVisibleInLegend(named.add(name));
+      renderer.setDefaultSeriesVisibleInLegend(curve.order() == 0 && named.add(name));
       plot.setRenderer(index++, renderer);
     }
   }
 
+  /** Higher orders below, and the dashed flexing curves above the solid ones. */
+  private static List<GrowthCurve> drawingOrder(List<GrowthCurve> curves) {
+    return curves.stream().sorted(Comparator.comparingInt((GrowthCurve curve) -> -curve.order())
+        .thenComparing(GrowthCurve::parity)).toList();
+  }
+
   private String name(GrowthCurve curve, boolean severalAcross) {
-    String parity = switch (curve.parity()) {
+    double ky = curve.crossWavenumber();
+    if (severalAcross) {
+      return ky == 0.0 ? "uniform across" : String.format(Locale.ROOT, "%.4g %s across",
+          units.length(2.0 * Math.PI / ky), units.length());
+    }
+    String thin = curves.stream().anyMatch(other -> other.parity() == curve.parity() && other.order() > 0)
+        ? " (thin: higher orders)" : "";
+    return thin.isEmpty() ? parity(curve) : parity(curve) + thin;
+  }
+
+  private static String parity(GrowthCurve curve) {
+    return switch (curve.parity()) {
       case MIRROR -> "mirror-symmetric";
       case FLEXING -> "flexing the midplane";
       case FLOOR -> "above the floor";
     };
-    String order = curve.order() == 0 ? "" : ", higher orders";
-    if (!severalAcross) {
-      return parity + order;
-    }
-    double ky = curve.crossWavenumber();
-    return ky == 0.0 ? "uniform across" : String.format(Locale.ROOT, "%.4g %s across",
-        units.length(2.0 * Math.PI / ky), units.length());
   }
 
   private void mark(XYPlot plot) {
@@ -176,7 +188,6 @@ public final class GrowthFigure implements Figure {
     int index = curves.isEmpty() ? 0 : plot.getDatasetCount();
     plot.setDataset(index, new XYSeriesCollection(series));
     plot.setRenderer(index, dot);
-    plot.setDatasetRenderingOrder(DatasetRenderingOrder.FORWARD);
   }
 
   private String text(double x, double y) {

@@ -22,6 +22,8 @@ public final class ModeFigure implements Figure {
   private static final int ROWS = 240;
   private static final int LINES = 9;
   private static final double LARGEST_BEND = 0.09;
+  /** Greatest horizontal strain drawn: beyond 1 the lines would cross themselves. */
+  private static final double STEEPEST = 0.45;
 
   private final EigenMode mode;
   private final ModeProfile profile;
@@ -72,7 +74,7 @@ public final class ModeFigure implements Figure {
     double h = area.getHeight();
     XYPlot map = map(greatest);
     Plots.chart(map, false, style).draw(graphics, new Rectangle2D.Double(area.getX(), area.getY(), 0.53 * w, h));
-    ColourBar.draw(graphics, new Rectangle2D.Double(area.getX() + 0.535 * w, area.getY() + 3.0, 0.105 * w, h - 21.0),
+    ColourBar.draw(graphics, new Rectangle2D.Double(area.getX() + 0.535 * w, area.getY(), 0.115 * w, h),
         ColourMap.DIVERGING, -1.0, 1.0, "density change \u03b4\u03c1/\u03c1 (of its greatest)", style);
     Plots.chart(amplitudes(), true, style).draw(graphics,
         new Rectangle2D.Double(area.getX() + 0.66 * w, area.getY(), 0.34 * w, h));
@@ -126,7 +128,7 @@ public final class ModeFigure implements Figure {
     for (int j = 0; j < ROWS; j++) {
       steepest = Math.max(steepest, Math.abs(profile.along(height(j))) * bend * mode.wavenumber());
     }
-    double amplitude = bend * Math.min(1.0, 0.8 / Math.max(0.8, steepest));
+    double amplitude = bend * Math.min(1.0, STEEPEST / Math.max(STEEPEST, steepest));
     for (int line = 1; line <= LINES; line++) {
       double z = lowest + (highest - lowest) * line / (LINES + 1.0);
       Path2D path = new Path2D.Double();

@@ -11,6 +11,7 @@ import org.archspan.units.OutputUnits;
 import org.jfree.chart.annotations.XYDataImageAnnotation;
 import org.jfree.chart.annotations.XYShapeAnnotation;
 import org.jfree.chart.axis.NumberAxis;
+import org.jfree.chart.axis.NumberTickUnit;
 import org.jfree.chart.plot.XYPlot;
 import org.jfree.chart.renderer.xy.XYLineAndShapeRenderer;
 import org.jfree.data.xy.XYSeries;
@@ -84,7 +85,7 @@ public final class PlaneFigure implements Figure {
     Plots.chart(map(), false, style).draw(graphics, new Rectangle2D.Double(area.getX(), area.getY(), 0.56 * w, h));
     Plots.chart(limit(), false, style).draw(graphics,
         new Rectangle2D.Double(area.getX() + 0.56 * w, area.getY(), 0.27 * w, h));
-    ColourBar.draw(graphics, new Rectangle2D.Double(area.getX() + 0.84 * w, area.getY() + 3.0, 0.155 * w, h - 21.0),
+    ColourBar.draw(graphics, new Rectangle2D.Double(area.getX() + 0.83 * w, area.getY(), 0.17 * w, h),
         ColourMap.SEQUENTIAL, 0.0, greatest, "growth rate (" + units.time() + "\u207b\u00b9)", style);
   }
 
@@ -94,9 +95,7 @@ public final class PlaneFigure implements Figure {
     BufferedImage image = new BufferedImage(m, n, BufferedImage.TYPE_INT_RGB);
     for (int i = 0; i < n; i++) {
       for (int j = 0; j < m; j++) {
-        int colour = growth[i][j] > 0.0 ? ColourMap.SEQUENTIAL.colour(growth[i][j] / greatest)
-            : style.shade().getRGB();
-        image.setRGB(j, n - 1 - i, colour);
+        image.setRGB(j, n - 1 - i, ColourMap.SEQUENTIAL.colour(growth[i][j] / greatest));
       }
     }
     double halfAcross = 0.5 * (across[1] - across[0]);
@@ -144,13 +143,21 @@ public final class PlaneFigure implements Figure {
     }
     double rx = 0.012 * (across[across.length - 1] - across[0]);
     double ry = 0.012 * along[along.length - 1];
-    plot.addAnnotation(new XYShapeAnnotation(new Ellipse2D.Double(across[bestAcross] - rx, along[bestAlong] - ry,
+    double centre = Math.max(across[0] + rx, Math.min(across[across.length - 1] - rx, across[bestAcross]));
+    plot.addAnnotation(new XYShapeAnnotation(new Ellipse2D.Double(centre - rx, along[bestAlong] - ry,
         2.0 * rx, 2.0 * ry), new BasicStroke(0.8f), java.awt.Color.BLACK, java.awt.Color.WHITE));
+  }
+
+  /** The next smaller 1, 2 or 5 times a power of ten. */
+  private static double roundDown(double value) {
+    double decade = Math.pow(10.0, Math.floor(Math.log10(value)));
+    return decade * (value >= 5.0 * decade ? 5.0 : value >= 2.0 * decade ? 2.0 : 1.0);
   }
 
   private XYPlot limit() {
     NumberAxis rate = Plots.axis("limit (" + units.time() + "\u207b\u00b9)", style);
     rate.setRange(0.0, 1.1 * greatest);
+    rate.setTickUnit(new NumberTickUnit(roundDown(greatest)));
     NumberAxis vertical = alongAxis();
     vertical.setLabel(null);
     vertical.setTickLabelsVisible(false);

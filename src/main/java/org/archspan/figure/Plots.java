@@ -6,6 +6,8 @@ import java.text.DecimalFormatSymbols;
 import java.util.Locale;
 import org.jfree.chart.JFreeChart;
 import org.jfree.chart.axis.NumberAxis;
+import org.jfree.chart.axis.NumberTickUnit;
+import org.jfree.chart.axis.TickUnits;
 import org.jfree.chart.axis.ValueAxis;
 import org.jfree.chart.plot.Plot;
 import org.jfree.chart.plot.XYPlot;
@@ -16,15 +18,29 @@ import org.jfree.data.xy.DefaultXYDataset;
 
 /** Axes, plots and charts in the common style. */
 final class Plots {
+  private static final TickUnits TICKS = ticks();
+
   private Plots() {
+  }
+
+  /** 1, 2 and 5 times every power of ten, each with as many decimals as it needs. */
+  private static TickUnits ticks() {
+    TickUnits units = new TickUnits();
+    for (int power = -12; power <= 12; power++) {
+      String pattern = power < 0 ? "0." + "0".repeat(-power) : "0";
+      DecimalFormat format = new DecimalFormat(pattern, DecimalFormatSymbols.getInstance(Locale.ROOT));
+      format.setNegativePrefix("\u2212");
+      for (int digit : new int[] {1, 2, 5}) {
+        units.add(new NumberTickUnit(digit * Math.pow(10.0, power), format));
+      }
+    }
+    return units;
   }
 
   static NumberAxis axis(String label, FigureStyle style) {
     NumberAxis axis = new NumberAxis(label);
     axis.setAutoRangeIncludesZero(false);
-    DecimalFormat format = new DecimalFormat("0.######", DecimalFormatSymbols.getInstance(Locale.ROOT));
-    format.setNegativePrefix("\u2212");
-    axis.setNumberFormatOverride(format);
+    axis.setStandardTickUnits(TICKS);
     dress(axis, style);
     return axis;
   }
