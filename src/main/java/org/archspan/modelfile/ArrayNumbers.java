@@ -11,8 +11,6 @@ import java.util.regex.Pattern;
  * setting such as {@code gas.component.4.dispersion} beside three components. Takes the entries that have no place away.
  */
 final class ArrayNumbers {
-  private static final List<String> ARRAYS = List.of("gas.component", "gas.stratum", "gas.layer", "gravity");
-
   private final Map<String, Entry> entries;
   private final List<Diagnostic> faults;
 
@@ -22,7 +20,7 @@ final class ArrayNumbers {
   }
 
   void check() {
-    ARRAYS.forEach(this::check);
+    Schema.ARRAYS.forEach(this::check);
     oneFormOfGravity();
   }
 

@@ -23,6 +23,8 @@ import org.archspan.gravity.LawInput;
 
 /** Every key of the model file. */
 public final class Schema {
+  /** Arrays of tables; a single gravity table may stand without a number. */
+  static final List<String> ARRAYS = List.of("gas.component", "gas.stratum", "gas.layer", "gravity");
   private static final Map<String, KeySpec> KEYS = keys();
 
   private Schema() {
@@ -42,6 +44,17 @@ public final class Schema {
   static boolean isTable(String key) {
     String prefix = pattern(key + ".");
     return KEYS.keySet().stream().anyMatch(known -> known.startsWith(prefix));
+  }
+
+  /** The header of the table that a key names. */
+  static String header(String key) {
+    return ARRAYS.contains(key) && !key.equals("gravity") ? "[[" + key + "]]" : "[" + key + "]";
+  }
+
+  /** The array whose number a key lacks: {@code gas.component} for {@code gas.component.name}. */
+  static Optional<String> arrayOf(String key) {
+    return ARRAYS.stream().filter(array -> key.startsWith(array + ".")
+        && KEYS.containsKey(array + ".#" + key.substring(array.length()))).findFirst();
   }
 
   /** The key with numbers of tables replaced; a single gravity table counts as the first of several. */

@@ -54,9 +54,17 @@ final class ValueReader {
   }
 
   private void unknown(String key) {
+    Optional<String> array = Schema.arrayOf(key);
+    if (array.isPresent()) {
+      inputs.fault(key, array.get() + " stands as a single table", "write [[" + array.get() + "]] once for each");
+      return;
+    }
+    if (Schema.isTable(key)) {
+      inputs.fault(key, "found " + inputs.entry(key).shown(), "it is a table of keys: write " + Schema.header(key));
+      return;
+    }
     List<String> known = Schema.all().stream().map(KeySpec::key).toList();
-    String pattern = Schema.pattern(key);
-    String hint = NearestName.of(pattern, known).map(near -> "did you mean " + near.replace(".#", "") + "?")
+    String hint = NearestName.of(Schema.pattern(key), known).map(near -> "did you mean " + near.replace(".#", "") + "?")
         .orElse("see `archspan check --keys` for all keys");
     inputs.fault(key, "unknown key", hint);
   }
@@ -120,8 +128,8 @@ final class ValueReader {
   /** A number with unit in CGS, checked; number densities become mass densities of so many hydrogen masses later. */
   Optional<Double> parse(String key, Object value, KeySpec spec, String at) {
     if (!(value instanceof String text)) {
-      inputs.fault(at, "found " + inputs.entry(at).shown(), "a unit is missing: write a string such as \""
-          + inputs.entry(at).value() + " " + spec.unit() + "\"");
+      inputs.fault(at, "found " + inputs.entry(at).shown(), "a unit is missing: write a string such as "
+          + inputs.entry(at).withUnit(spec.unit()));
       return Optional.empty();
     }
     try {
@@ -156,8 +164,8 @@ final class ValueReader {
     } else if (value instanceof String text) {
       length(key, text, spec);
     } else {
-      inputs.fault(key, "found " + inputs.entry(key).shown(), "a unit is missing: write a string such as \""
-          + inputs.entry(key).value() + " pc\" or \"" + inputs.entry(key).value() + " scale-heights\"");
+      inputs.fault(key, "found " + inputs.entry(key).shown(), "a unit is missing: write a string such as "
+          + inputs.entry(key).withUnit("pc") + " or " + inputs.entry(key).withUnit("scale-heights"));
     }
   }
 

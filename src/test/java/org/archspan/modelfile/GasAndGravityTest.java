@@ -127,6 +127,20 @@ class GasAndGravityTest {
     assertThat(density.spread()).isEqualTo(2.0);
   }
 
+  /** A table that stands as a value, or alone where an array is meant, is told how to be written. */
+  @ParameterizedTest
+  @CsvSource(delimiter = '|', quoteCharacter = '`', value = {
+      "gas = 3 | model.toml:1: gas: found 3; it is a table of keys: write [gas]",
+      "gravity = [] | model.toml:1: gravity: found an empty array; it is a table of keys: write [gravity]",
+      "gravity = \"tanh\" | model.toml:1: gravity: found \"tanh\"; it is a table of keys: write [gravity]",
+      "gas.component = 1 | model.toml:1: gas.component: found 1; it is a table of keys: write [[gas.component]]",
+      "gas.component.dispersion = \"6 km/s\" | model.toml:1: gas.component.dispersion: gas.component stands as a single"
+          + " table; write [[gas.component]] once for each",
+      "[gas.stratum]\\nheight = 7 | model.toml:2: gas.stratum.height: gas.stratum stands as a single table"})
+  void tablesInTheWrongForm(String text, String message) {
+    assertThat(messages(read(text.replace("\\n", "\n") + "\n")).lines()).anyMatch(line -> line.startsWith(message));
+  }
+
   /** An uncertain mass for each nucleus counts with its middle wherever it stands, never with the standard instead. */
   @ParameterizedTest
   @CsvSource(delimiter = '|', value = {"{ low = 1.2, high = 1.3 }|1.25", "{ value = 1.3, normal = 0.1 }|1.3",
