@@ -33,7 +33,7 @@ final class FieldReader {
     if (!shapeIsBalance) {
       String allowed = "with gas.stratum the field follows from the balance: set field.shape = \"balance\"";
       if (inputs.given("field.shape")) {
-        inputs.fault("field.shape", "found " + inputs.entry("field.shape").shown(), allowed);
+        inputs.fault("field.shape", "found " + inputs.shown("field.shape"), allowed);
       } else {
         inputs.missing("field.shape", allowed);
       }

@@ -83,7 +83,7 @@ final class GravityReader {
     try {
       return name.isEmpty() ? Optional.empty() : new GravityTable(inputs.faults()).read(folder.resolve(name.get()));
     } catch (InvalidPathException noPath) {
-      inputs.fault(key, "found " + inputs.entry(key).shown(), "the name of a file is needed");
+      inputs.fault(key, "found " + inputs.shown(key), "the name of a file is needed");
       return Optional.empty();
     }
   }

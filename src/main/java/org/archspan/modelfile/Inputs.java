@@ -30,6 +30,11 @@ final class Inputs {
     return entries.get(key);
   }
 
+  /** What stands at a key, for messages; an uncertain value is a table. */
+  String shown(String key) {
+    return entries.containsKey(key) ? entries.get(key).shown() : "a table";
+  }
+
   Map<String, Entry> entries() {
     return entries;
   }

@@ -24,7 +24,7 @@ final class SurroundingsReader {
   Domain domain() {
     Optional<Height> floor = inputs.height("domain.bottom");
     if (floor.filter(Height::inScaleHeights).isPresent()) {
-      inputs.fault("domain.bottom", "found " + inputs.entry("domain.bottom").shown(),
+      inputs.fault("domain.bottom", "found " + inputs.shown("domain.bottom"),
           "scale heights are counted from the density on the floor; give a length");
     }
     Optional<Height> top = inputs.height("domain.top");
@@ -37,8 +37,8 @@ final class SurroundingsReader {
   private void inOrder(String lowerKey, Optional<Height> lower, String upperKey, Optional<Height> upper) {
     if (lower.isPresent() && upper.isPresent() && lower.get().inScaleHeights() == upper.get().inScaleHeights()
         && !(lower.get().value() < upper.get().value())) {
-      inputs.fault(upperKey, "found " + inputs.entry(upperKey).shown(), "it must exceed " + lowerKey + ", "
-          + inputs.entry(lowerKey).shown());
+      inputs.fault(upperKey, "found " + inputs.shown(upperKey), "it must exceed " + lowerKey + ", "
+          + inputs.shown(lowerKey));
     }
   }
 

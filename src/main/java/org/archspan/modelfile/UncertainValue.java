@@ -1,6 +1,7 @@
 package org.archspan.modelfile;
 
 import java.util.Optional;
+import org.archspan.disk.Height;
 
 /** Reads {@code { value, normal }}, {@code { value, factor }} and {@code { low, high }}. */
 final class UncertainValue {
@@ -18,7 +19,7 @@ final class UncertainValue {
 
   void read() {
     boolean numeric = spec.kind() == KeySpec.Kind.QUANTITY || spec.kind() == KeySpec.Kind.DENSITY
-        || spec.kind() == KeySpec.Kind.NUMBER;
+        || spec.kind() == KeySpec.Kind.NUMBER || spec.kind() == KeySpec.Kind.HEIGHT;
     boolean range = has("low") && has("high") && !has("value") && !has("normal") && !has("factor");
     boolean spread = has("value") && (has("normal") != has("factor")) && !has("low") && !has("high");
     if (!numeric || !range && !spread) {
@@ -43,7 +44,7 @@ final class UncertainValue {
     if (low.isPresent() && high.isPresent()) {
       if (low.get() < high.get()) {
         double middle = 0.5 * (low.get() + high.get());
-        inputs.put(key, middle);
+        put(middle);
         inputs.put(key, new Uncertainty(Uncertainty.Shape.RANGE, middle, high.get() - middle));
       } else {
         inputs.fault(key + ".high", "the upper end does not exceed the lower one", "low must be less than high");
@@ -56,10 +57,14 @@ final class UncertainValue {
     boolean normal = has("normal");
     Optional<Double> spread = normal ? part("normal") : factor();
     if (value.isPresent() && spread.isPresent()) {
-      inputs.put(key, value.get());
+      put(value.get());
       inputs.put(key, new Uncertainty(normal ? Uncertainty.Shape.NORMAL : Uncertainty.Shape.FACTOR, value.get(),
           spread.get()));
     }
+  }
+
+  private void put(double value) {
+    inputs.put(key, spec.kind() == KeySpec.Kind.HEIGHT ? Height.centimetres(value) : (Object) value);
   }
 
   private Optional<Double> part(String part) {

@@ -14,7 +14,7 @@ final class Unsolved {
   static void refuse(Inputs inputs) {
     for (String key : KEYS) {
       if (inputs.valid(key)) {
-        inputs.fault(key, "found " + (inputs.entry(key) == null ? "a table" : inputs.entry(key).shown()), ALLOWED);
+        inputs.fault(key, "found " + inputs.shown(key), ALLOWED);
       }
     }
     if (inputs.tables("gas.layer") > 0) {

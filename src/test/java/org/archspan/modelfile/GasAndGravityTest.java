@@ -9,6 +9,7 @@ import static org.assertj.core.api.Assertions.within;
 
 import org.archspan.disk.Gas;
 import org.archspan.disk.GasStratum;
+import org.archspan.disk.Height;
 import org.archspan.disk.MagneticField;
 import org.archspan.gravity.LinearGravity;
 import org.archspan.gravity.UniformGravity;
@@ -98,6 +99,7 @@ class GasAndGravityTest {
   @ParameterizedTest
   @CsvSource(delimiter = '|', quoteCharacter = '`', value = {
       "shape = \"sech2\" | shape = \"sech\" | gas.stratum.2.shape: found \"sech\"; allowed are \"gaussian\", \"exponential\"",
+      "shape = \"balance\" | shape = { value = \"balance\" } | field.shape: found a table",
       "shape = \"balance\" | | field.shape: missing; with gas.stratum the field follows from the balance",
       "strength = \"5 uG\" | | field.strength: missing; with gas.stratum give exactly one of gas.dispersion and",
       "strength = \"5 uG\" | pressure-ratio = 1.0 | field.pressure-ratio: given beside gas.stratum",
@@ -150,6 +152,22 @@ class GasAndGravityTest {
     assertThat(((Gas.Isothermal) model.disk().gas()).bottomDensity().getAsDouble() / Constants.HYDROGEN_MASS)
         .isCloseTo(hydrogenMasses, within(1e-14)); // rounding
     assertThat(model.uncertainties()).containsOnlyKeys("gas.mass-per-hydrogen");
+  }
+
+  /** The lid matters, so the top may be uncertain like every dimensional value; in units of length only. */
+  @Test
+  void anUncertainTop() {
+    String top = PLAIN + "[domain]\nbottom = \"2 kpc\"\ntop = ";
+    Model model = model(top + "{ low = \"3 kpc\", high = \"5 kpc\" }\n");
+    assertThat(model.disk().domain().top()).contains(Height.centimetres(4e3 * Constants.PARSEC));
+    Uncertainty uncertainty = model.uncertainties().get("domain.top");
+    assertThat(uncertainty.shape()).isEqualTo(Uncertainty.Shape.RANGE);
+    // 4e6 cm: the last binary digit of 5 kpc is worth 2e6 cm
+    assertThat(uncertainty.spread()).isCloseTo(1e3 * Constants.PARSEC, within(4e6));
+    assertThat(messages(read(top + "{ low = \"1 kpc\", high = \"2 kpc\" }\n")))
+        .contains("domain.top: found a table; it must exceed domain.bottom, \"2 kpc\"").doesNotContain("\n");
+    assertThat(messages(read(top + "{ value = \"12 scale-heights\", factor = 2 }\n")))
+        .contains("domain.top.value: ").doesNotContain("\n");
   }
 
   @ParameterizedTest
