@@ -16,6 +16,8 @@ final class HeightPanels {
   private static final double FAR_EFOLDINGS = 45.0;
   private static final double WIDEST_EFOLDINGS = 2.0;
   private static final double GROWTH = 1.5;
+  /** Of the floor's height: a smaller scale of the gas would lose the digits that eigenvalues need. */
+  private static final double FINEST_FOLD = 1e-6;
   private static final int MOST_PANELS = 2000;
   private static final ReferenceElement RULE = ReferenceElement.ofDegree(16);
 
@@ -39,6 +41,9 @@ final class HeightPanels {
       double greatestHeight) {
     double start = logDensity.applyAsDouble(bottom);
     double fold = heightOfFall(logDensity, bottom, 1.0, greatestHeight);
+    if (fold < FINEST_FOLD * bottom) {
+      throw tooHigh(bottom, fold);
+    }
     double width = 0.5 * fold;
     for (double landmark : landmarks) {
       width = Math.min(width, 0.5 * landmark);
@@ -72,6 +77,12 @@ final class HeightPanels {
       }
     }
     return Double.POSITIVE_INFINITY;
+  }
+
+  private static RefusedModelException tooHigh(double bottom, double fold) {
+    return new RefusedModelException(String.format(Locale.ROOT, "the floor stands at %.4g pc, but there the density falls"
+        + " by an e-folding within %.3g pc: too little of that height for rounding; count heights from the floor",
+        bottom / org.archspan.units.Constants.PARSEC, fold / org.archspan.units.Constants.PARSEC));
   }
 
   private static RefusedModelException unbound(double z, double fallen) {

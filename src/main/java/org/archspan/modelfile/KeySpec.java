@@ -41,10 +41,18 @@ public record KeySpec(String key, Kind kind, String unit, Range range, List<Stri
     POSITIVE("greater than 0", 0.0, false, Double.POSITIVE_INFINITY),
     /** 0 or greater. */
     NOT_NEGATIVE("0 or greater", 0.0, true, Double.POSITIVE_INFINITY),
+    /** Greater than 0 and slower than light: the theory is not relativistic. */
+    SPEED("greater than 0 and below the speed of light", 0.0, false, 2.99792458e10),
+    /** An adiabatic index; far below 1 the stiffness of the gas would be lost in rounding. */
+    INDEX("between 0.001 and 1000", 1e-3, true, 1e3),
     /** Between 0 and 1. */
     FRACTION("between 0 and 1", 0.0, true, 1.0),
     /** A small count. */
     COUNT("between 1 and 30", 1.0, true, 30.0);
+
+    /** Sizes in CGS beyond which products of several values would leave the range of the computer's numbers. */
+    private static final double LARGEST = 1e60;
+    private static final double SMALLEST = 1e-60;
 
     private final String words;
     private final double lowest;
@@ -63,8 +71,21 @@ public record KeySpec(String key, Kind kind, String unit, Range range, List<Stri
       return words;
     }
 
+    /** In words why a value is not allowed. */
+    String wordsFor(double value) {
+      return within(value) && !ordinary(value) ? words + ", of a size between 1e-60 and 1e60 in CGS" : words;
+    }
+
     boolean holds(double value) {
+      return within(value) && ordinary(value);
+    }
+
+    private boolean within(double value) {
       return Double.isFinite(value) && value <= highest && (lowestAllowed ? value >= lowest : value > lowest);
+    }
+
+    private static boolean ordinary(double value) {
+      return value == 0.0 || Math.abs(value) >= SMALLEST && Math.abs(value) <= LARGEST;
     }
   }
 }

@@ -9,8 +9,10 @@ import static org.archspan.modelfile.KeySpec.Kind.QUANTITY;
 import static org.archspan.modelfile.KeySpec.Kind.TEXT;
 import static org.archspan.modelfile.KeySpec.Range.ANY;
 import static org.archspan.modelfile.KeySpec.Range.COUNT;
+import static org.archspan.modelfile.KeySpec.Range.INDEX;
 import static org.archspan.modelfile.KeySpec.Range.NOT_NEGATIVE;
 import static org.archspan.modelfile.KeySpec.Range.POSITIVE;
+import static org.archspan.modelfile.KeySpec.Range.SPEED;
 
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
@@ -98,24 +100,24 @@ public final class Schema {
   }
 
   private static void gas(List<KeySpec> specs) {
-    specs.add(quantity("gas.dispersion", "km/s", POSITIVE, "none", "isothermal speed, thermal and turbulent"));
+    specs.add(quantity("gas.dispersion", "km/s", SPEED, "none", "isothermal speed, thermal and turbulent"));
     specs.add(quantity("gas.temperature", "K", POSITIVE, "none", "instead of the dispersion"));
     specs.add(number("gas.mean-molecular-weight", POSITIVE, "none", "mean mass of a particle in atomic mass units"));
-    specs.add(number("gas.adiabatic-index", POSITIVE, "1", "of the perturbations"));
+    specs.add(number("gas.adiabatic-index", INDEX, "1", "of the perturbations"));
     specs.add(density("gas.midplane-density"));
     specs.add(quantity("gas.surface-density", "Msun/pc^2", POSITIVE, "none", "instead of the midplane density"));
     specs.add(number("gas.mass-per-hydrogen", POSITIVE, "1.4", "mass for each hydrogen nucleus, in hydrogen masses"));
     specs.add(quantity("gas.cooling-time", "Myr", POSITIVE, "none", "Newtonian cooling"));
     specs.add(choice("gas.self-gravity", "off", "the gas's own gravity", "off", "equilibrium", "full"));
     specs.add(new KeySpec("gas.component.#.name", TEXT, "", ANY, List.of(), "none", "name of a component"));
-    specs.add(quantity("gas.component.#.dispersion", "km/s", POSITIVE, "none", "of the component"));
+    specs.add(quantity("gas.component.#.dispersion", "km/s", SPEED, "none", "of the component"));
     specs.add(density("gas.component.#.midplane-density"));
     specs.add(choice("gas.stratum.#.shape", "none", "law of a prescribed stratum", "gaussian", "exponential", "sech2"));
     specs.add(density("gas.stratum.#.midplane-density"));
     specs.add(quantity("gas.stratum.#.height", "pc", POSITIVE, "none", "scale of the stratum"));
     specs.add(quantity("gas.layer.#.from", "Mm", ANY, "none", "lower end of a layer"));
     specs.add(quantity("gas.layer.#.temperature", "K", POSITIVE, "none", "of the layer"));
-    specs.add(quantity("gas.layer.#.dispersion", "km/s", POSITIVE, "none", "of the layer"));
+    specs.add(quantity("gas.layer.#.dispersion", "km/s", SPEED, "none", "of the layer"));
     specs.add(quantity("gas.layer.#.blend", "Mm", POSITIVE, "none", "tanh half-width to the layer below"));
   }
 

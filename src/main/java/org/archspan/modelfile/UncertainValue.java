@@ -77,7 +77,8 @@ final class UncertainValue {
     if (spec.range().holds(number)) {
       return Optional.of(number);
     }
-    inputs.fault(at, "found " + inputs.entry(at).shown(), "allowed is a number " + spec.range().words());
+    inputs.fault(at, "found " + inputs.entry(at).shown(), "allowed is a number "
+        + spec.range().wordsFor(number));
     return Optional.empty();
   }
 

@@ -111,7 +111,8 @@ final class ValueReader {
           + spec.range().words());
     } else if (!whole || !spec.range().holds(number)) {
       inputs.fault(key, "found " + inputs.entry(key).shown(), "allowed is a "
-          + (spec.kind() == KeySpec.Kind.INTEGER ? "whole " : "finite ") + "number " + spec.range().words());
+          + (spec.kind() == KeySpec.Kind.INTEGER ? "whole " : "finite ") + "number "
+          + spec.range().wordsFor(number));
     } else {
       inputs.put(key, number);
     }
@@ -138,7 +139,8 @@ final class ValueReader {
         inputs.fault(at, "found \"" + text + "\", whose dimension is " + quantity.dimension(),
             "a unit such as " + spec.unit() + " is needed");
       } else if (!spec.range().holds(quantity.value())) {
-        inputs.fault(at, "found \"" + text + "\"", "allowed is a value " + spec.range().words());
+        inputs.fault(at, "found \"" + text + "\"", "allowed is a value "
+            + spec.range().wordsFor(quantity.value()));
       } else {
         boolean nuclei = quantity.dimension().equals(NUMBER_DENSITY) && spec.kind() == KeySpec.Kind.DENSITY;
         return Optional.of(quantity.value() * (nuclei ? HydrogenMass.perNucleus(inputs) : 1.0));
@@ -190,7 +192,8 @@ final class ValueReader {
         inputs.put(key, Height.centimetres(quantity.value()));
       } else {
         inputs.fault(key, "found \"" + text + "\"", String.format(Locale.ROOT,
-            "a length %s such as \"500 pc\" or \"12 scale-heights\" is needed%s", spec.range().words(), words));
+            "a length %s such as \"500 pc\" or \"12 scale-heights\" is needed%s",
+            spec.range().wordsFor(quantity.value()), words));
       }
     } catch (UnitException fault) {
       inputs.fault(key, fault.getMessage(), "a length such as \"500 pc\" or \"12 scale-heights\" is needed" + words);
