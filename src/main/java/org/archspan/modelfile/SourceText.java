@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.nio.ByteBuffer;
 import java.nio.charset.CharacterCodingException;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.AccessDeniedException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Optional;
@@ -30,6 +31,8 @@ final class SourceText {
     try (var stream = Files.newInputStream(file)) {
       byte[] bytes = stream.readNBytes(limit + 1);
       return bytes.length > limit ? Optional.empty() : Optional.of(bytes);
+    } catch (AccessDeniedException denied) {
+      throw new UnreadableFileException(file + " cannot be read: permission denied");
     } catch (IOException reason) {
       throw new UnreadableFileException(file + " cannot be read: " + reason.getMessage());
     }

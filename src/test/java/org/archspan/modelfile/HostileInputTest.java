@@ -106,6 +106,28 @@ class HostileInputTest {
         .isInstanceOf(UnreadableFileException.class).hasMessageEndingWith("none.toml does not exist");
   }
 
+  static List<String> keys() {
+    return Schema.all().stream().map(spec -> spec.key().replace("gravity.#", "gravity").replace("#", "1")).toList();
+  }
+
+  /** Each key with values of every type, laid over each of three models: a model or faults, and nothing else. */
+  @ParameterizedTest
+  @MethodSource("keys")
+  void valuesOfEveryType(String key) {
+    String[] values = {"1", "-1", "0", "1.5", "inf", "nan", "true", "2026-12-01", "\"\"", "\"x\"", "\"1 pc\"", "1 km/s",
+        "1 cm^-3", "1 scale-heights", "[]", "[1]", "[[1]]", "[{}]", "[{a = 1}, 2]", "{}", "{value = \"1 pc\"}",
+        "{low = 1, high = 2}", "{low = \"1 pc\", high = \"2 pc\"}", "{value = [], normal = {}}", "{a.b.c = 1}",
+        "{value = {value = 1}}", "balance", "table", "infinite", "arm-width", "full"};
+    String[] models = {PLAIN, ShippedModels.text("thick-disk-near-the-sun"), ShippedModels.text("outer-disk")};
+    for (String model : models) {
+      for (String value : values) {
+        Reading reading = ModelTexts.read(model, key + "=" + value);
+        assertThat(reading.model().isPresent()).as("%s = %s", key, value).isEqualTo(reading.faults().isEmpty());
+        assertThat(messages(reading)).doesNotContain("@");
+      }
+    }
+  }
+
   /** A correct model with bytes changed, removed and doubled at random: the repetition is the seed. */
   @RepeatedTest(300)
   void damagedModels(RepetitionInfo repetition) throws IOException {
