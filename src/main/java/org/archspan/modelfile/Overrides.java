@@ -39,16 +39,40 @@ final class Overrides {
   }
 
   private void set(String key, String text) {
+    String input = inputOf(key);
     for (List<String> group : ALTERNATIVES) {
-      if (group.contains(key)) {
-        group.forEach(this::remove);
-      }
+      dropOthers(group, input);
     }
-    if (OF_STRATA.contains(key) && entries.keySet().stream().anyMatch(name -> name.startsWith("gas.stratum."))) {
-      OF_STRATA.forEach(this::remove);
+    if (entries.keySet().stream().anyMatch(name -> name.startsWith("gas.stratum."))) {
+      dropOthers(OF_STRATA, input);
+    }
+    if (!input.equals(key)) {
+      makeRoom(input, key.substring(input.length() + 1));
     }
     remove(key);
     entries.putAll(leaves(key, text));
+  }
+
+  /** The input that a key belongs to: the key itself, or that of which it sets one part of an uncertain value. */
+  private static String inputOf(String key) {
+    int dot = key.lastIndexOf('.');
+    boolean part = dot > 0 && UncertainValue.PARTS.contains(key.substring(dot + 1))
+        && Schema.of(key).isEmpty() && Schema.of(key.substring(0, dot)).isPresent();
+    return part ? key.substring(0, dot) : key;
+  }
+
+  private void dropOthers(List<String> group, String input) {
+    if (group.contains(input)) {
+      group.stream().filter(other -> !other.equals(input)).forEach(this::remove);
+    }
+  }
+
+  /** A plain value becomes the middle of a spread, and gives way to the ends of a range. */
+  private void makeRoom(String input, String part) {
+    Entry plain = entries.remove(input);
+    if (plain != null && (part.equals("normal") || part.equals("factor"))) {
+      entries.put(input + ".value", plain);
+    }
   }
 
   private void remove(String key) {

@@ -1,10 +1,13 @@
 package org.archspan.modelfile;
 
+import java.util.List;
 import java.util.Optional;
 import org.archspan.disk.Height;
 
 /** Reads {@code { value, normal }}, {@code { value, factor }} and {@code { low, high }}. */
 final class UncertainValue {
+  static final List<String> PARTS = List.of("value", "normal", "factor", "low", "high");
+
   private final Inputs inputs;
   private final ValueReader reader;
   private final String key;

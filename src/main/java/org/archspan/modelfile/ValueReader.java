@@ -14,7 +14,6 @@ import org.archspan.units.UnitParser;
 
 /** Reads one key after another by its specification; what does not fit becomes a fault. */
 final class ValueReader {
-  private static final List<String> UNCERTAIN = List.of("value", "normal", "factor", "low", "high");
   private static final Dimension LENGTH = new Dimension(2, 0, 0, 0);
   private static final Dimension MASS_DENSITY = new Dimension(-6, 2, 0, 0);
   private static final Dimension NUMBER_DENSITY = new Dimension(-6, 0, 0, 0);
@@ -40,7 +39,7 @@ final class ValueReader {
     String parent = dot < 0 ? "" : key.substring(0, dot);
     String part = key.substring(dot + 1);
     Optional<KeySpec> uncertain = Schema.of(parent);
-    if (uncertain.isPresent() && UNCERTAIN.contains(part)) {
+    if (uncertain.isPresent() && UncertainValue.PARTS.contains(part)) {
       if (firstPart(parent).equals(key)) {
         new UncertainValue(inputs, this, parent, uncertain.get()).read();
       }

@@ -37,6 +37,26 @@ class OverridesTest {
     assertThat(((Gas.Isothermal) model.disk().gas()).bottomDensity()).isEmpty();
   }
 
+  /** Uncertainties can be laid over plain values: the value becomes the middle, or gives way to a range. */
+  @Test
+  void addsAnUncertaintyToAPlainValue() {
+    assertThat(model(PLAIN, "gas.dispersion.normal=1km/s").uncertainties().get("gas.dispersion"))
+        .isEqualTo(new Uncertainty(Uncertainty.Shape.NORMAL, 6.4e5, 1e5));
+    assertThat(model(PLAIN, "field.pressure-ratio.factor=2").uncertainties().get("field.pressure-ratio"))
+        .isEqualTo(new Uncertainty(Uncertainty.Shape.FACTOR, 1.0, 2.0));
+    assertThat(model(PLAIN, "gas.dispersion.low=5km/s", "gas.dispersion.high=9km/s").uncertainties()
+        .get("gas.dispersion")).isEqualTo(new Uncertainty(Uncertainty.Shape.RANGE, 7e5, 2e5));
+    assertThat(model(PLAIN, "gas.dispersion.normal=1km/s", "gas.dispersion=7km/s").uncertainties()).isEmpty();
+    assertThat(messages(read(PLAIN, "gas.dispersion.low=5km/s"))).contains("gas.dispersion: found an incomplete");
+  }
+
+  @Test
+  void aPartOfAnUncertainAlternativeDropsTheOtherOne() {
+    Model model = model(PLAIN, "field.strength.value=3uG", "field.strength.normal=1uG");
+    assertThat(model.disk().field()).isEqualTo(new MagneticField.BottomStrength(3e-6));
+    assertThat(model.inputs()).doesNotContainKey("field.pressure-ratio");
+  }
+
   @Test
   void replacesAWholeTable() {
     assertThat(model(PLAIN, "gravity={law=\"uniform\", strength=\"1e-9 cm/s^2\"}").disk().gravity())
