@@ -10,6 +10,8 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import org.archspan.gravity.GravityLaw;
+import org.archspan.spacing.SpacingResult;
+import org.archspan.spacing.SpacingStudy;
 import org.archspan.units.Constants;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -97,6 +99,31 @@ class GravityTableTest {
     assertThat(messages(read(",".repeat(5_000_000)))).contains("found 5000001 columns").doesNotContain("\n");
     Files.write(folder.resolve("g.csv"), "z [pc], g [cm/s^2]\n0,0\n".getBytes(StandardCharsets.UTF_16));
     assertThat(messages(ModelTexts.read(MODEL, folder))).contains("g.csv: not UTF-8 text");
+  }
+
+  /** The growth of a sampled tanh law tends to that of the law itself, as the fourth power of the step. */
+  @ParameterizedTest
+  @CsvSource({"20, 2e-3", "80, 1e-5"})
+  void aSampledLawTendsToTheLaw(int rows, double tolerance) throws IOException {
+    StringBuilder table = new StringBuilder("z [pc], g [cm/s^2]\n");
+    for (int i = 0; i < rows; i++) {
+      double z = 2000.0 * i / (rows - 1);
+      table.append(z).append(',').append(2e-9 * Math.tanh(z / 160.0)).append('\n');
+    }
+    Files.writeString(folder.resolve("g.csv"), table);
+    SpacingResult sampled = solve(MODEL + "[field]\npressure-ratio = 1.0\n");
+    SpacingResult law = solve(ModelTexts.PLAIN);
+    // 1e-10: asked of every equilibrium, the kinks of a table included
+    assertThat(sampled.forceBalanceResidual()).isLessThan(1e-10);
+    // errors fall 250 times from 20 to 80 rows; the tolerances are four times the errors found
+    double rate = law.fastest().orElseThrow().growthRate();
+    assertThat(sampled.fastest().orElseThrow().growthRate()).isCloseTo(rate, within(tolerance * rate));
+  }
+
+  private SpacingResult solve(String text) {
+    Reading reading = ModelTexts.read(text, folder, "domain.top=1.2 kpc", "domain.top-boundary=lid");
+    Model model = reading.model().orElseThrow(() -> new AssertionError(messages(reading)));
+    return new SpacingStudy(model.disk(), model.options(), model.arm()).solve();
   }
 
   @Test
