@@ -12,8 +12,11 @@ final class Findings {
   private final List<String> sentences = new ArrayList<>();
 
   static List<String> of(Equilibrium equilibrium, List<BranchPeak> branches, Optional<BranchPeak> fastest,
-      Optional<Integer> spacing, SearchOptions options) {
+      Optional<Integer> spacing, SearchOptions options, WaveRange range) {
     Findings findings = new Findings();
+    if (range.limited()) {
+      findings.aboutRange(fastest, range);
+    }
     fastest.ifPresent(peak -> {
       findings.aboutFastest(peak, equilibrium);
       findings.aboutSpacing(branches, peak, spacing, options);
@@ -33,6 +36,16 @@ final class Findings {
     }
     if (peak.heldBy() != HeldBy.HALO && peak.centroidHeight() > 0.8 * equilibrium.top()) {
       sentences.add("The fastest mode has its kinetic energy in the uppermost fifth of the domain.");
+    }
+  }
+
+  private void aboutRange(Optional<BranchPeak> fastest, WaveRange range) {
+    if (fastest.isEmpty()) {
+      sentences.add("Only waves between waves.shortest and waves.longest were searched: the gas is stable there, and may"
+          + " be unstable to others.");
+    } else if (range.endsAt(fastest.get().wavenumber())) {
+      sentences.add("The fastest wave lies at the end of the range between waves.shortest and waves.longest: growth"
+          + " rises beyond it.");
     }
   }
 

@@ -43,7 +43,7 @@ public final class SpacingStudy {
         .filter(peak -> peak.wavenumber() > 0.0).map(peak -> complex(equilibrium, peak));
     return new SpacingResult(equilibrium, ForceBalance.residual(equilibrium), branches, fastest, spacing,
         acrossLimit(equilibrium), longestStable(search), complex, search.certificate(), gatheringHeight,
-        Findings.of(equilibrium, branches, fastest, spacing, options));
+        Findings.of(equilibrium, branches, fastest, spacing, options, range));
   }
 
   /** The fastest branch, or the continuum of the atmosphere above where that is faster. */

@@ -27,4 +27,14 @@ public record WaveRange(double lowest, double highest, double crossWavenumber) {
     }
     return new WaveRange(lowest, highest, cross);
   }
+
+  /** Whether some waves along the field are left out. */
+  boolean limited() {
+    return lowest > 0.0 || Double.isFinite(highest);
+  }
+
+  /** Whether a wavenumber (cm^-1) is an end of the range, to a millionth. */
+  boolean endsAt(double wavenumber) {
+    return Math.abs(wavenumber / lowest - 1.0) <= 1e-6 || Math.abs(wavenumber / highest - 1.0) <= 1e-6;
+  }
 }

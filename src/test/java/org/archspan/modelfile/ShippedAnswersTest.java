@@ -92,6 +92,16 @@ class ShippedAnswersTest {
     assertThat(edge.growthRate() * height / 6.4e5).isCloseTo(rate, within(1e-6 * rate));
   }
 
+  /** A range that the user sets too narrow is never mistaken for an answer about the gas. */
+  @ParameterizedTest
+  @CsvSource({"waves.longest=500 pc, the gas is stable there", "waves.shortest=20 kpc, growth rises beyond it",
+      "waves.longest=2 kpc, growth rises beyond it"})
+  void narrowRangesAreNamed(String setting, String warning) {
+    assertThat(String.join(" ", solve("thick-disk-near-the-sun", setting).warnings())).contains(warning);
+    assertThat(String.join(" ", solve("thick-disk-near-the-sun", "waves.longest=9 kpc").warnings()))
+        .doesNotContain(warning);
+  }
+
   /** Newcomb (1961) and Parker (1967): stable when gamma exceeds 1 + alpha + beta, unstable when it does not. */
   @ParameterizedTest
   @CsvSource({"1.6666666666666667, true", "1.51, true", "1.0, false"})
