@@ -18,7 +18,10 @@ final class HeightPanels {
   private static final double GROWTH = 1.5;
   /** Of the floor's height: a smaller scale of the gas would lose the digits that eigenvalues need. */
   private static final double FINEST_FOLD = 1e-6;
-  private static final int MOST_PANELS = 2000;
+  /** Where the potential levels off, as around a point mass, the density stops falling; the gas is bound if by then
+   * exp(-20) of it is left, and is counted up to there. */
+  private static final double BOUND_EFOLDINGS = 20.0;
+  private static final double FARTHEST_FOLDS = 1e4;
   private static final ReferenceElement RULE = ReferenceElement.ofDegree(16);
 
   private final double[] edges;
@@ -63,8 +66,11 @@ final class HeightPanels {
       fallen += fall;
       edges.add(z);
       width *= GROWTH;
-      if (edges.size() > MOST_PANELS) {
-        throw unbound(z, fallen);
+      if (z - bottom > FARTHEST_FOLDS * fold) {
+        if (fallen < BOUND_EFOLDINGS) {
+          throw unbound(z, fallen);
+        }
+        break;
       }
     }
     return new HeightPanels(edges.stream().mapToDouble(Double::doubleValue).toArray());

@@ -6,10 +6,10 @@ import java.awt.geom.Rectangle2D;
 
 /** Something that can be drawn at a fixed size. */
 public interface Figure {
-  /** Width, points. */
+  /** Width, in units of 1/72 inch. */
   double width();
 
-  /** Height, points. */
+  /** Height, in units of 1/72 inch. */
   double height();
 
   /** What the figure shows, for those who cannot see it. */

@@ -29,6 +29,11 @@ public final class FigureImage {
   private static final int DOTS_PER_INCH = 300;
   private static final String SVG = "http://www.w3.org/2000/svg";
 
+  static {
+    // otherwise vertical axis labels become outlines instead of text
+    org.jfree.chart.text.TextUtils.setUseDrawRotatedStringWorkaround(false);
+  }
+
   private FigureImage() {
   }
 

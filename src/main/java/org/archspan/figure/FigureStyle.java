@@ -8,7 +8,7 @@ import java.awt.Font;
  * The one hand that draws all figures. Lengths are in points, 1/72 inch.
  *
  * @param dark     light on dark instead of dark on light
- * @param fontSize size of labels, points
+ * @param fontSize size of labels, in units of 1/72 inch
  */
 public record FigureStyle(boolean dark, double fontSize) {
   /** Width of one column of a journal, points (88 mm). */

@@ -74,7 +74,7 @@ public final class ModeFigure implements Figure {
     double h = area.getHeight();
     XYPlot map = map(greatest);
     Plots.chart(map, false, style).draw(graphics, new Rectangle2D.Double(area.getX(), area.getY(), 0.53 * w, h));
-    ColourBar.draw(graphics, new Rectangle2D.Double(area.getX() + 0.535 * w, area.getY(), 0.115 * w, h),
+    ColourBar.draw(graphics, new Rectangle2D.Double(area.getX() + 0.535 * w, area.getY(), 0.12 * w, h),
         ColourMap.DIVERGING, -1.0, 1.0, "density change \u03b4\u03c1/\u03c1 (of its greatest)", style);
     Plots.chart(amplitudes(), true, style).draw(graphics,
         new Rectangle2D.Double(area.getX() + 0.66 * w, area.getY(), 0.34 * w, h));

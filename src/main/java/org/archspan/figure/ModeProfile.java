@@ -1,6 +1,6 @@
 package org.archspan.figure;
 
-import org.apache.commons.math3.analysis.interpolation.AkimaSplineInterpolator;
+import org.apache.commons.math3.analysis.interpolation.SplineInterpolator;
 import org.apache.commons.math3.analysis.polynomials.PolynomialSplineFunction;
 import org.archspan.boundary.Parity;
 import org.archspan.stability.EigenMode;
@@ -22,7 +22,7 @@ final class ModeProfile {
     double[] height = pick(mode.height(), distinct);
     bottom = height[0];
     top = height[height.length - 1];
-    AkimaSplineInterpolator interpolator = new AkimaSplineInterpolator();
+    SplineInterpolator interpolator = new SplineInterpolator();
     along = interpolator.interpolate(height, pick(mode.along(), distinct));
     vertical = interpolator.interpolate(height, pick(mode.vertical(), distinct));
     across = interpolator.interpolate(height, pick(mode.across(), distinct));

@@ -50,7 +50,7 @@ public final class TwistedTridiagonal {
   }
 
   /**
-   * After {@link #count} with the same arguments: finds x with {@code T x = r e_k}, x_k = 1 and the smallest |r|.
+   * After {@link #count} with the same arguments: finds x with {@code T x = r e_k}, x_k = 1 and the smallest relative |r|.
    * O(n), no allocation.
    *
    * @param x receives the vector, shape [from + n]; entries from {@code from} on are written
@@ -75,12 +75,14 @@ public final class TwistedTridiagonal {
     }
   }
 
+  /** The row that is nearest to singular relative to its own diagonal entry: rows differ in scale. */
   private void chooseTwist(double[] diagonal, int from) {
-    twist = 0;
-    residual = Double.POSITIVE_INFINITY;
+    double least = Double.POSITIVE_INFINITY;
     for (int i = 0; i < size; i++) {
       double candidate = forward[i] + backward[i] - diagonal[from + i];
-      if (Math.abs(candidate) < Math.abs(residual)) {
+      double relative = Math.abs(candidate) / (Math.abs(forward[i]) + Math.abs(backward[i]) + Math.abs(diagonal[from + i]));
+      if (relative < least) {
+        least = relative;
         residual = candidate;
         twist = i;
       }

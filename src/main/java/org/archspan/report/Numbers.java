@@ -16,11 +16,14 @@ public final class Numbers {
     if (Double.isInfinite(value)) {
       return "infinite";
     }
+    if (value == 0.0) {
+      return "0";
+    }
     double size = Math.abs(value);
-    if (size != 0.0 && (size >= 1e5 || size < 1e-3)) {
+    if (size >= 1e5 || size < 1e-3) {
       return String.format(Locale.ROOT, "%.3e", value).replace("e+0", "e").replace("e+", "e").replace("e-0", "e-");
     }
-    int decimals = size == 0.0 ? 0 : (int) Math.max(0, 3 - Math.floor(Math.log10(size)));
+    int decimals = (int) Math.max(0, 3 - Math.floor(Math.log10(size)));
     return String.format(Locale.ROOT, "%." + decimals + "f", value);
   }
 

@@ -127,7 +127,8 @@ public final class SpacingText {
   private void sure() {
     block.heading("How sure");
     if (result.stable()) {
-      block.sentence("The count of unstable modes is zero over the whole range: no mode can have been missed.");
+      block.sentence("No displacement lowers the energy: the count of unstable modes, which cannot rise towards shorter waves, is"
+          + " zero already for the longest.");
       return;
     }
     block.sentence("Proved by counting the modes on " + result.certificate().intervals() + " intervals of wavenumber that"

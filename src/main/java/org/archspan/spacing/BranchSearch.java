@@ -31,6 +31,8 @@ final class BranchSearch {
   private final List<Found> found = new ArrayList<>();
   private final WaveRange range;
   private final Optional<GrowthPoint> halo;
+  private double bound;
+  private int intervals;
 
   /**
    * Searches.
@@ -65,6 +67,10 @@ final class BranchSearch {
     double haloGrowth = halo.map(GrowthPoint::growthRate).orElse(0.0);
     for (int order = 0; order < branches; order++) {
       Optional<Peak> peak = solver.fastest(order, range.lowest(), range.highest(), haloGrowth);
+      if (order == 0) {
+        bound = Math.max(bound, solver.provedBound());
+        intervals += solver.provedIntervals();
+      }
       if (peak.isEmpty()) {
         return;
       }
@@ -92,14 +98,6 @@ final class BranchSearch {
 
   /** What the proofs of the branches of order 0 add up to. */
   Certificate certificate() {
-    double bound = halo.map(GrowthPoint::growthRate).orElse(0.0);
-    int intervals = 0;
-    for (Found branch : found) {
-      if (branch.peak().order() == 0) {
-        bound = Math.max(bound, branch.peak().bound());
-        intervals += branch.peak().intervals();
-      }
-    }
     long spent = solvers.stream().mapToLong(BranchSolver::factorisations).sum();
     return new Certificate(bound, 2.0 * Math.PI / range.highest(), 2.0 * Math.PI / range.lowest(), intervals, spent);
   }

@@ -14,6 +14,8 @@ public final class BranchSolver {
   private final ModeSolver solver;
   private final double length;
   private final double time;
+  private double provedBound;
+  private int provedIntervals;
 
   /** A solver for a problem. */
   public BranchSolver(ModeProblem problem) {
@@ -96,17 +98,28 @@ public final class BranchSolver {
    * @param haloPeak greatest growth rate of the continuum above an open top, s^-1; 0 where there is none
    */
   public Optional<Peak> fastest(int order, double lowest, double highest, double haloPeak) {
-    return FastestMode.find(solver, order, lowest * length, highest * length, haloPeak * time)
-        .map(found -> peak(order, found));
+    FastestMode found = FastestMode.find(solver, order, lowest * length, highest * length, haloPeak * time);
+    provedBound = found.bound() / time;
+    provedIntervals = found.intervals();
+    return found.root().map(root -> peak(order, found, root));
   }
 
-  private Peak peak(int order, FastestMode found) {
-    GrowthRoot root = found.root();
+  /** Growth rate that the branch of the latest {@link #fastest} exceeds nowhere, s^-1. */
+  public double provedBound() {
+    return provedBound;
+  }
+
+  /** Intervals of wavenumber that this proof took. */
+  public int provedIntervals() {
+    return provedIntervals;
+  }
+
+  private Peak peak(int order, FastestMode found, GrowthRoot root) {
     double wavenumber = root.wavenumber() / length;
     EigenMode mode = new ModeShape(solver).mode(order, wavenumber, root.growth() / time);
     return new Peak(order, wavenumber, root.growth() / time, root.error(), found.wavelengthError(),
         root.wavenumber() > 0.0 ? unstableModes(wavenumber) : -1, mode,
-        found.bound() / time, found.intervals());
+        provedBound, provedIntervals);
   }
 
   /** The shape of the mode of an order at a wavenumber (cm^-1); empty when fewer modes grow. */

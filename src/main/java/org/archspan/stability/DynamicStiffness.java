@@ -32,6 +32,7 @@ final class DynamicStiffness {
   private final double[] diagonal;
   private final double[] offDiagonal;
   private final double[] ends;
+  private final boolean[] crowded;
   private final TwistedTridiagonal tridiagonal;
   private long factorisations;
 
@@ -53,6 +54,7 @@ final class DynamicStiffness {
     this.diagonal = new double[elements + 1];
     this.offDiagonal = new double[elements];
     this.ends = new double[elements + 1];
+    this.crowded = new boolean[elements];
     this.tridiagonal = new TwistedTridiagonal(elements + 1);
   }
 
@@ -115,13 +117,33 @@ final class DynamicStiffness {
       int offset = e * pairs;
       ElementAssembly.assemble(form.a, form.b, form.c, e * n, n, element.slopeProducts(), element.pairFirst(),
           element.pairSecond(), element.pairSlope(), element.pairSlopeReversed(), packed, offset);
-      negative += PackedElimination.eliminate(packed, offset, n, n - 2);
+      int inside = PackedElimination.eliminate(packed, offset, n, n - 2);
+      crowded[e] = inside > 0;
+      negative += inside;
       diagonal[e] += packed[offset + pairs - 3];
       offDiagonal[e] = packed[offset + pairs - 2];
       diagonal[e + 1] = packed[offset + pairs - 1];
     }
     diagonal[elements] += top.entry();
     return negative;
+  }
+
+  /**
+   * The elements that held a whole mode between fixed ends at the last count. There the Schur complement has a pole
+   * beside its root, and the root's vector is lost in rounding: such elements must be split.
+   */
+  boolean[] crowded() {
+    return crowded;
+  }
+
+  /** Whether any element is {@link #crowded()}. */
+  boolean anyCrowded() {
+    for (boolean full : crowded) {
+      if (full) {
+        return true;
+      }
+    }
+    return false;
   }
 
   private void weigh() {

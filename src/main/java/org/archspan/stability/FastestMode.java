@@ -6,12 +6,13 @@ import java.util.OptionalDouble;
 /**
  * The fastest mode of one branch over a range of wavenumbers, with its proof. Works in {@link Scales}.
  *
- * @param root            the peak, on the checking mesh
+ * @param root            the peak, on the checking mesh; empty when the branch grows nowhere, or nowhere faster than the
+ *                        continuum
  * @param wavelengthError estimated relative error of its wavelength
  * @param bound           growth rate that the branch exceeds nowhere in the range
  * @param intervals       intervals of wavenumber that the proof took
  */
-record FastestMode(GrowthRoot root, double wavelengthError, double bound, int intervals) {
+record FastestMode(Optional<GrowthRoot> root, double wavelengthError, double bound, int intervals) {
   /** The proof leaves this relative gap above the peak of order 0; its cost rises as the logarithm of it. */
   private static final double GAP = 1e-6;
   /** For higher orders, whose interval bound is of first order, the cost rises as its inverse square root. */
@@ -26,13 +27,12 @@ record FastestMode(GrowthRoot root, double wavelengthError, double bound, int in
    * @param lowest   lowest wavenumber of the range, 0 or more
    * @param highest  highest; infinite for the marginal one
    * @param haloPeak greatest growth rate of the continuum above an open top, 0 where there is none
-   * @return empty when the branch grows nowhere in the range, or nowhere faster than the continuum
    * @throws UnsolvedException when a tolerance is missed
    */
-  static Optional<FastestMode> find(ModeSolver solver, int order, double lowest, double highest, double haloPeak) {
+  static FastestMode find(ModeSolver solver, int order, double lowest, double highest, double haloPeak) {
     double end = Math.min(highest, solver.marginalWavenumber(order));
     if (end <= lowest) {
-      return Optional.empty();
+      return new FastestMode(Optional.empty(), 0.0, 0.0, 0);
     }
     PeakSearch search = new PeakSearch(solver, order, lowest, end);
     WavenumberCover cover = new WavenumberCover(solver, order);
@@ -40,12 +40,13 @@ record FastestMode(GrowthRoot root, double wavelengthError, double bound, int in
     for (int climb = 0; climb < MOST_CLIMBS; climb++) {
       double known = Math.max(haloPeak, peak.map(GrowthRoot::growth).orElse(0.0));
       if (known == 0.0) {
-        return Optional.empty();
+        return new FastestMode(Optional.empty(), 0.0, 0.0, 0);
       }
       double bound = known * (1.0 + (order == 0 ? GAP : HIGHER_GAP));
       OptionalDouble better = cover.violation(bound, lowest, end);
       if (better.isEmpty()) {
-        return peak.map(root -> polished(solver, order, root, bound, cover.intervals(), lowest, end));
+        return peak.isEmpty() ? new FastestMode(peak, 0.0, bound, cover.intervals())
+            : polished(solver, order, peak.get(), bound, cover.intervals(), lowest, end);
       }
       peak = solver.growth(better.getAsDouble(), order, bound).map(search::climb);
     }
@@ -67,20 +68,20 @@ record FastestMode(GrowthRoot root, double wavelengthError, double bound, int in
       double lowest, double end) {
     double k = peak.wavenumber();
     if (k <= lowest || k >= end) {
-      return new FastestMode(peak, 0.0, bound, intervals);
+      return new FastestMode(Optional.of(peak), 0.0, bound, intervals);
     }
     double step = 1e-3 * k;
     Optional<GrowthRoot> beside = solver.growth(k - step, order, peak.growth());
     GrowthRoot here = solver.growth(k, order, peak.growth()).orElse(peak);
     double workingSlope = solver.workingSlope();
     if (beside.isEmpty()) {
-      return new FastestMode(here, Double.NaN, bound, intervals);
+      return new FastestMode(Optional.of(here), Double.NaN, bound, intervals);
     }
     double curvature = (here.slope() - beside.get().slope()) / step;
     double shift = -here.slope() / curvature;
     double error = Math.abs((workingSlope - here.slope()) / curvature) / k + Math.abs(shift) / k
         + here.error() * here.growth() / Math.abs(curvature * k * k);
     GrowthRoot polished = new GrowthRoot(k + shift, here.growth() + 0.5 * shift * here.slope(), 0.0, here.error());
-    return new FastestMode(polished, error, bound, intervals);
+    return new FastestMode(Optional.of(polished), error, bound, intervals);
   }
 }

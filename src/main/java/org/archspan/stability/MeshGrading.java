@@ -58,15 +58,24 @@ final class MeshGrading {
       energy[e] = tailEnergy(resolved, zeta, e);
       greatest = Math.max(greatest, energy[e]);
     }
-    double[] edges = new double[2 * elements + 1];
-    int count = 0;
+    boolean[] chosen = new boolean[elements];
     for (int e = 0; e < elements; e++) {
-      edges[count++] = resolved.mesh.edges()[e];
-      if (energy[e] >= SPLIT_SHARE * greatest) {
-        edges[count++] = 0.5 * (resolved.mesh.edges()[e] + resolved.mesh.edges()[e + 1]);
+      chosen[e] = energy[e] >= SPLIT_SHARE * greatest;
+    }
+    return split(resolved.mesh, chosen);
+  }
+
+  /** The edges after cutting the chosen elements in two. */
+  static double[] split(Mesh mesh, boolean[] chosen) {
+    double[] edges = new double[2 * mesh.elements() + 1];
+    int count = 0;
+    for (int e = 0; e < mesh.elements(); e++) {
+      edges[count++] = mesh.edges()[e];
+      if (chosen[e]) {
+        edges[count++] = 0.5 * (mesh.edges()[e] + mesh.edges()[e + 1]);
       }
     }
-    edges[count++] = resolved.mesh.edges()[elements];
+    edges[count++] = mesh.edges()[mesh.elements()];
     return Arrays.copyOf(edges, count);
   }
 

@@ -75,25 +75,33 @@ final class ModeShape {
     return displacement.centroid() * solver.scales().length();
   }
 
+  /** All nodes, each shared end of two elements once. */
+  private int[] distinctNodes() {
+    int perElement = atmosphere.mesh.degree() + 1;
+    return java.util.stream.IntStream.range(0, atmosphere.nodes()).filter(i -> i == 0 || i % perElement != 0).toArray();
+  }
+
   EigenMode mode(int order, double wavenumber, double growthRate) {
     double length = solver.scales().length();
-    int n = atmosphere.nodes();
+    int[] nodes = distinctNodes();
+    int n = nodes.length;
     double norm = length / layerDisplacement() * (halfColumn() < 0.0 ? -1.0 : 1.0);
     double[][] values = new double[7][n];
     double greatest = 0.0;
-    for (int i = 0; i < n; i++) {
+    for (int to = 0; to < n; to++) {
+      int i = nodes[to];
       double scale = norm / rootDensity[i];
-      values[0][i] = atmosphere.height[i] * length;
-      values[1][i] = scale * displacement.along[i];
-      values[2][i] = scale * displacement.across[i];
-      values[3][i] = scale * displacement.zeta[i];
-      values[4][i] = scale * displacement.divergence[i] / length;
-      values[5][i] = scale * densityChange(i) / length;
+      values[0][to] = atmosphere.height[i] * length;
+      values[1][to] = scale * displacement.along[i];
+      values[2][to] = scale * displacement.across[i];
+      values[3][to] = scale * displacement.zeta[i];
+      values[4][to] = scale * displacement.divergence[i] / length;
+      values[5][to] = scale * densityChange(i) / length;
       double x = displacement.along[i];
       double y = displacement.across[i];
       double z = displacement.zeta[i];
-      values[6][i] = x * x + y * y + z * z;
-      greatest = Math.max(greatest, values[6][i]);
+      values[6][to] = x * x + y * y + z * z;
+      greatest = Math.max(greatest, values[6][to]);
     }
     for (int i = 0; i < n; i++) {
       values[6][i] /= greatest;

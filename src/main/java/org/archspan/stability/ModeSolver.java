@@ -18,6 +18,8 @@ final class ModeSolver {
   private static final int MOST_REFINEMENTS = 24;
   private static final int NODES_PER_HALF_WAVE = 4;
   private static final double HAIR = 1e-9;
+  private static final double CROWDING_MARGIN = 0.8;
+  private static final double SMALL_CORRECTION = 1e-4;
   private static final double ROUNDING_OF_SQUARE = 1e-12;
 
   private final ModeProblem problem;
@@ -173,11 +175,15 @@ final class ModeSolver {
     for (int refinement = 0; refinement <= MOST_REFINEMENTS; refinement++) {
       GrowthRoot root = Double.isNaN(start) ? null : warmStart.find(kx, order, floor, ceiling, start);
       if (root == null || !goodEnough(root)) {
-        double s = RootFinder.find(growthAxis(kx), order, floor, ceiling, start);
+        double s = RootFinder.find(growthAxis(working, kx), order, floor, ceiling, start);
         if (Double.isNaN(s)) {
           return Optional.empty();
         }
-        root = check(kx, s);
+        if (uncrowded(kx, s)) {
+          start = s;
+          continue;
+        }
+        root = check(kx, order, floor, ceiling, s);
       }
       if (goodEnough(root)) {
         return Optional.of(root);
@@ -194,15 +200,33 @@ final class ModeSolver {
         + mesh().elements() + " elements; ask for a larger --tolerance");
   }
 
-  /** The Newton correction that the checking mesh asks for is the error of the working mesh; its result is kept. */
-  private GrowthRoot check(double kx, double s) {
-    int count = checking.stiffness().count(s, kx, ky);
-    if (count == DynamicStiffness.INFINITE) {
-      return new GrowthRoot(kx, s, Double.NaN, 1.0);
+  /** Splits elements that could hold a mode of their own nearly as fast as s; whether there were any. */
+  private boolean uncrowded(double kx, double s) {
+    if (working.stiffness().count(CROWDING_MARGIN * s, kx, ky) == DynamicStiffness.INFINITE) {
+      working.stiffness().count(s, kx, ky);
     }
-    double change = checking.newtonStep(s, kx, ky);
+    if (!working.stiffness().anyCrowded()) {
+      return false;
+    }
+    discretise(new Mesh(MeshGrading.split(mesh(), working.stiffness().crowded()), DEGREE));
+    return true;
+  }
+
+  /**
+   * The Newton correction that the checking mesh asks for is the error of the working mesh; its result is kept. Where the
+   * correction is too large to be one, the root is sought on the checking mesh itself.
+   */
+  private GrowthRoot check(double kx, int order, double floor, double ceiling, double s) {
+    int count = checking.stiffness().count(s, kx, ky);
+    double change = count == DynamicStiffness.INFINITE ? Double.NaN : checking.newtonStep(s, kx, ky);
     double better = s + change;
-    double error = Math.abs(change) / Math.abs(better) + checking.displacement().rounding(s);
+    if (!(Math.abs(change) < SMALL_CORRECTION * s)) {
+      better = RootFinder.find(growthAxis(checking, kx), order, floor, ceiling, s);
+      if (Double.isNaN(better)) {
+        return new GrowthRoot(kx, s, Double.NaN, 1.0);
+      }
+    }
+    double error = Math.abs(better - s) / better + checking.displacement().rounding(better);
     return new GrowthRoot(kx, better, checking.slope(), error);
   }
 
@@ -216,16 +240,16 @@ final class ModeSolver {
     return squareError <= ROUNDING_OF_SQUARE * fastestPossible * fastestPossible;
   }
 
-  private RootFinder.Axis growthAxis(double kx) {
+  private RootFinder.Axis growthAxis(Discretisation mesh, double kx) {
     return new RootFinder.Axis() {
       @Override
       public int count(double s) {
-        return working.stiffness().count(s, kx, ky);
+        return mesh.stiffness().count(s, kx, ky);
       }
 
       @Override
       public double newtonStep(double s) {
-        return working.newtonStep(s, kx, ky);
+        return mesh.newtonStep(s, kx, ky);
       }
     };
   }

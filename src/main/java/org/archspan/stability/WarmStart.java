@@ -38,7 +38,7 @@ final class WarmStart {
         return null;
       }
       int count = working.stiffness().count(x, kx, ky);
-      if (count == DynamicStiffness.INFINITE) {
+      if (count == DynamicStiffness.INFINITE || working.stiffness().anyCrowded()) {
         return null;
       }
       double change = working.newtonStep(x, kx, ky);

@@ -9,7 +9,6 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.nio.file.StandardOpenOption;
-import java.util.UUID;
 
 /** Writes files that are whole or absent: into a temporary file beside, flushed to the disk, then moved into place. */
 public final class WholeFile {
@@ -30,7 +29,7 @@ public final class WholeFile {
       if (!overwrite && Files.exists(file)) {
         throw exists(file);
       }
-      temporary = folder.resolve("." + file.getFileName() + "." + UUID.randomUUID() + ".part");
+      temporary = folder.resolve("." + file.getFileName() + "." + ProcessHandle.current().pid() + "-" + Thread.currentThread().getId() + ".part");
       try (FileChannel channel =
           FileChannel.open(temporary, StandardOpenOption.WRITE, StandardOpenOption.CREATE_NEW)) {
         ByteBuffer buffer = ByteBuffer.wrap(content);
