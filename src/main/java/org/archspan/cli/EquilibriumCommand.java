@@ -3,6 +3,7 @@ package org.archspan.cli;
 import java.io.IOException;
 import org.archspan.equilibrium.Equilibrium;
 import org.archspan.equilibrium.EquilibriumBuilder;
+import org.archspan.equilibrium.ForceBalance;
 import org.archspan.modelfile.Model;
 import org.archspan.report.EquilibriumText;
 import org.archspan.report.FigureFiles;
@@ -27,6 +28,7 @@ final class EquilibriumCommand extends ModelCommand {
       throw new ParameterException(spec.commandLine(), "--rows " + rows + ": allowed is 2 to 100000");
     }
     Equilibrium equilibrium = EquilibriumBuilder.build(model.disk(), common.tolerance);
+    ForceBalance.required(equilibrium);
     Table table = EquilibriumTable.of(equilibrium, rows, model.units());
     if (common.out != null) {
       new FigureFiles(common.out, common.overwrite).equilibrium(equilibrium, table, model.units());

@@ -17,7 +17,7 @@ import picocli.CommandLine.Command;
 final class SpacingCommand extends ModelCommand {
   @Override
   void solve(Model model) throws IOException {
-    SpacingResult result = new SpacingStudy(model.disk(), model.options(), model.arm()).solve();
+    SpacingResult result = solved(model);
     double across = WaveRange.of(model.options(), result.equilibrium()).crossWavenumber();
     String json = SpacingJson.text(echo(model), result, model.units());
     if (common.out != null) {
@@ -27,8 +27,12 @@ final class SpacingCommand extends ModelCommand {
     }
     print(() -> json,
         () -> SpacingText.text(model.title(), model.disk(), across, result, model.units(), width()));
-    if (model.rotation().isPresent() && !common.quiet) {
-      err().println("[rotation] is given, but rotation is not solved by this version: it is not in this result.");
-    }
+  }
+
+  private static SpacingResult solved(Model model) {
+    SpacingResult result = new SpacingStudy(model.disk(), model.options(), model.arm()).solve();
+    return model.rotation().isEmpty() ? result
+        : result.warned("Rotation is given in the model but is not solved by this version: it is not in this result,"
+            + " and it would slow long waves along the field.");
   }
 }

@@ -22,6 +22,7 @@ final class HeightPanels {
    * exp(-20) of it is left, and is counted up to there. */
   private static final double BOUND_EFOLDINGS = 20.0;
   private static final double FARTHEST_FOLDS = 1e4;
+  private static final int MOST_PANELS = 2000;
   private static final ReferenceElement RULE = ReferenceElement.ofDegree(16);
 
   private final double[] edges;
@@ -71,6 +72,10 @@ final class HeightPanels {
           throw unbound(z, fallen);
         }
         break;
+      }
+      if (edges.size() > MOST_PANELS + kinks.length) {
+        throw new RefusedModelException("the shortest length over which gravity bends is too small beside the height of"
+            + " the gas: no number of panels resolves both");
       }
     }
     return new HeightPanels(edges.stream().mapToDouble(Double::doubleValue).toArray());

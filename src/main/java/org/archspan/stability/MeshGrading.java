@@ -10,6 +10,8 @@ final class MeshGrading {
   private static final double FIRST_LENGTH = 1.5;
   private static final double GROWTH = 2.0;
   private static final double SPLIT_SHARE = 0.2;
+  /** The kinks of a table with more entries than this are too faint to need edges of their own. */
+  private static final int MOST_KINKS = 200;
 
   private MeshGrading() {
   }
@@ -26,7 +28,8 @@ final class MeshGrading {
       length = Math.min(length, landmark / scales.length());
     }
     length *= FIRST_LENGTH;
-    double[] kinks = Arrays.stream(equilibrium.kinks()).map(z -> z / scales.length()).toArray();
+    double[] kinks = equilibrium.kinks().length > MOST_KINKS ? new double[0]
+        : Arrays.stream(equilibrium.kinks()).map(z -> z / scales.length()).toArray();
     double[] edges = new double[kinks.length + 2 + (int) Math.ceil(4.0 + Math.log1p((top - bottom) / length) * 2.0)];
     int count = 0;
     edges[count++] = bottom;

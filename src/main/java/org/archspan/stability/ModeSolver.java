@@ -40,6 +40,19 @@ final class ModeSolver {
     discretise(MeshGrading.initial(problem.equilibrium(), scales, DEGREE));
   }
 
+  private void discretise(double[] edges) {
+    if (edges.length > MOST_ELEMENTS) {
+      throw tooFine();
+    }
+    discretise(new Mesh(edges, DEGREE));
+  }
+
+  private UnsolvedException tooFine() {
+    return new UnsolvedException("a growth rate could not be brought to the tolerance " + problem.tolerance() + " with "
+        + mesh().elements() + " elements: the mode varies over lengths far shorter than the domain; lower domain.top, or"
+        + " ask for a larger --tolerance");
+  }
+
   private void discretise(Mesh mesh) {
     spentBefore = factorisations();
     working = new Discretisation(problem, scales, mesh);
@@ -189,15 +202,9 @@ final class ModeSolver {
         return Optional.of(root);
       }
       start = root.growth();
-      double[] edges = MeshGrading.split(checking.stiffness().atmosphere(), checking.displacement().zeta);
-      if (edges.length > MOST_ELEMENTS) {
-        break;
-      }
-      discretise(new Mesh(edges, DEGREE));
+      discretise(MeshGrading.split(checking.stiffness().atmosphere(), checking.displacement().zeta));
     }
-    throw new UnsolvedException("the growth rate at wavenumber " + kx + " per scale height is " + start
-        + " in units of the crossing rate, but its tolerance " + problem.tolerance() + " was not reached with "
-        + mesh().elements() + " elements; ask for a larger --tolerance");
+    throw tooFine();
   }
 
   /** Splits elements that could hold a mode of their own nearly as fast as s; whether there were any. */
@@ -208,7 +215,7 @@ final class ModeSolver {
     if (!working.stiffness().anyCrowded()) {
       return false;
     }
-    discretise(new Mesh(MeshGrading.split(mesh(), working.stiffness().crowded()), DEGREE));
+    discretise(MeshGrading.split(mesh(), working.stiffness().crowded()));
     return true;
   }
 
