@@ -136,4 +136,20 @@ class InvariantsTest {
     assertThat(s).isFinite().isPositive();
     assertThat(thin.growth(0.6, 0, Double.NaN).orElseThrow().growth()).isCloseTo(s, within(1e-11 * s));
   }
+
+  /**
+   * Growth rises steadily with the diffusivity of cosmic rays along the field, and at 3e28 cm^2/s is close to the limit of
+   * instant diffusion: Ryu, Kim, Hong and Jones 2003, ApJ 589, 338; Kuwabara, Nakamura and Ko 2004, ApJ 607, 828 (read in
+   * the abstracts). Close: 10 per cent here, since the abstracts give no number.
+   */
+  @RepeatedTest(1)
+  void realCosmicRaysAreCloseToInstantDiffusion() {
+    Disk disk = TestDisks.isothermal(TestDisks.law(3), 1.0, 1.0, 1.0, CosmicRayClosure.instantDiffusion(), 5.0);
+    double limit = growth(disk, disk.gasClosure(), CosmicRayClosure.instantDiffusion(), Parity.MIRROR);
+    double real = growth(disk, disk.gasClosure(), new CosmicRayClosure(4.0 / 3.0, 3e28), Parity.MIRROR);
+    double slow = growth(disk, disk.gasClosure(), new CosmicRayClosure(4.0 / 3.0, 3e26), Parity.MIRROR);
+    double none = growth(disk, disk.gasClosure(), new CosmicRayClosure(4.0 / 3.0, 0.0), Parity.MIRROR);
+    assertThat(real).isBetween(0.9 * limit, limit);
+    assertThat(slow).isLessThan(0.9 * real).isGreaterThan(none);
+  }
 }
