@@ -3,18 +3,10 @@ package org.archspan.table;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
-import java.io.IOException;
-import java.nio.file.Files;
-import java.nio.file.Path;
 import java.util.List;
-import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
-import org.junit.jupiter.api.io.TempDir;
 
 class EcsvTest {
-  @TempDir
-  Path folder;
-
   /** The header of Astropy Proposal for Enhancement 6; nan and inf as Astropy writes them. */
   @Test
   void carriesUnitsAndAllDigits() {
@@ -43,21 +35,5 @@ class EcsvTest {
   void refusesColumnsOfDifferentLength() {
     assertThatThrownBy(() -> new Table("t", List.of(Column.of("a", "", "", new double[2]),
         Column.of("b", "", "", new double[3])))).hasMessageContaining("column b has 3 rows");
-  }
-
-  @Test
-  void filesAreWholeOrAbsent() throws IOException {
-    Path file = folder.resolve("deep/er/table.ecsv");
-    WholeFile.write(file, new byte[] {1, 2}, false);
-    assertThatThrownBy(() -> WholeFile.write(file, new byte[] {3}, false)).isInstanceOf(WriteException.class)
-        .hasMessageContaining("exists");
-    assertThat(Files.readAllBytes(file)).containsExactly(1, 2);
-    WholeFile.write(file, new byte[] {3}, true);
-    assertThat(Files.readAllBytes(file)).containsExactly(3);
-    Path blocked = folder.resolve("deep/er/table.ecsv/below");
-    assertThatThrownBy(() -> WholeFile.write(blocked, new byte[] {1}, false)).isInstanceOf(WriteException.class);
-    try (Stream<Path> left = Files.walk(folder).filter(Files::isRegularFile)) {
-      assertThat(left).containsExactly(file);
-    }
   }
 }
