@@ -3,6 +3,7 @@ package org.archspan.report;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.stream.IntStream;
 import org.archspan.equilibrium.Equilibrium;
 import org.archspan.equilibrium.ForceBalance;
 import org.archspan.spacing.PlaneResult;
@@ -28,20 +29,9 @@ public final class ResultJson {
     Json json = new Json();
     for (Column column : table.columns()) {
       json.put(column.name(), new Json().put("unit", column.unit()).put("values",
-          column.values().stream().map(ResultJson::number).toList()));
+          IntStream.range(0, table.rows()).mapToDouble(column::number).toArray()));
     }
     return json;
-  }
-
-  private static Object number(String text) {
-    try {
-      return Double.parseDouble(text);
-    } catch (NumberFormatException word) {
-      return switch (text) {
-        case "inf", "-inf", "nan" -> Double.NaN;
-        default -> text;
-      };
-    }
   }
 
   /** Growth curves, one object each. */

@@ -28,6 +28,7 @@ import org.archspan.units.OutputUnits;
 /** Everything that the main job writes. */
 public final class SpacingFiles {
   private static final int ROWS = 401;
+  private static final int PRINTED_ROWS = 11;
 
   private final SpacingResult result;
   private final Disk disk;
@@ -49,21 +50,33 @@ public final class SpacingFiles {
     OutputFolder output = new OutputFolder().text("summary.json", json).text("summary.txt", summary)
         .table("equilibrium", EquilibriumTable.of(result.equilibrium(), ROWS, units))
         .figure("equilibrium", new EquilibriumFigure(result.equilibrium(), units, style));
+    ReportPage page = new ReportPage().figure("Base state against height", output.content("equilibrium.svg"));
+    growth(output, page, style);
+    new ModeStudy(disk, result.equilibrium(), options, Arm.unknown()).spacingMode(result)
+        .ifPresent(mode -> mode(mode, output, page, style));
+    page.table("Base state", EquilibriumTable.of(result.equilibrium(), PRINTED_ROWS, units));
+    output.text("report.html", page.html(model, SpacingText.sentence(result, units), summary));
+    output.write(folder, overwrite);
+  }
+
+  private void growth(OutputFolder output, ReportPage page, FigureStyle style) {
     List<GrowthCurve> curves = GrowthCurves.of(result, disk, options);
     if (!curves.isEmpty()) {
       output.table("growth", GrowthTable.of(curves, units));
       output.table("branches", BranchTable.of(result.branches(), units));
     }
+    if (!result.branches().isEmpty()) {
+      page.table("Unstable branches", BranchTable.of(result.branches(), units));
+    }
     if (!result.stable()) {
       output.figure("growth", growthFigure(curves, style));
+      page.figure("Growth rate against wavelength", output.content("growth.svg"));
     }
-    Optional<EigenMode> mode = new ModeStudy(disk, result.equilibrium(), options, Arm.unknown()).spacingMode(result);
-    mode.ifPresent(shape -> output.table("mode", ModeTable.of(shape, units))
-        .figure("mode", new ModeFigure(shape, units, style)));
-    output.text("report.html", ReportPage.html(model, summary, SpacingText.sentence(result, units),
-        output.content("equilibrium.svg"), result.stable() ? "" : output.content("growth.svg"),
-        mode.isPresent() ? output.content("mode.svg") : ""));
-    output.write(folder, overwrite);
+  }
+
+  private void mode(EigenMode mode, OutputFolder output, ReportPage page, FigureStyle style) {
+    output.table("mode", ModeTable.of(mode, units)).figure("mode", new ModeFigure(mode, units, style));
+    page.figure("Mode that sets the spacing", output.content("mode.svg"));
   }
 
   private GrowthFigure growthFigure(List<GrowthCurve> curves, FigureStyle style) {

@@ -29,6 +29,16 @@ public record Column(String name, String unit, String description, String type, 
     return new Column(name, "", description, "string", List.copyOf(values));
   }
 
+  /** The number in a row, in the unit of the column; NaN for a word. */
+  public double number(int row) {
+    String value = values.get(row);
+    return switch (value) {
+      case "inf" -> Double.POSITIVE_INFINITY;
+      case "-inf" -> Double.NEGATIVE_INFINITY;
+      default -> type.equals("string") || value.equals("nan") ? Double.NaN : Double.parseDouble(value);
+    };
+  }
+
   private static String written(double value) {
     if (Double.isNaN(value)) {
       return "nan";
