@@ -15,10 +15,12 @@ final class ReportPage {
       table{border-collapse:collapse;font-size:14px}
       td,th{border-bottom:1px solid #b4b9c0;padding:.2rem .8rem .2rem 0;vertical-align:top;text-align:left}
       .number{text-align:right;font-variant-numeric:tabular-nums}
+      td.number{white-space:nowrap}
       @media screen and (prefers-color-scheme:dark){body{background:#15181d;color:#e6e8eb}pre{background:#262b33}}
       @page{size:A4;margin:16mm}
       @media print{body{font-size:11pt;max-width:none;margin:0;padding:0}pre{background:none;padding:0;font-size:8pt}
-      .wide{overflow:visible}table{font-size:7pt}td,th{padding-right:.4rem}h2{break-after:avoid}}
+      .wide{overflow:visible;break-inside:avoid}table{font-size:7pt;line-height:1.2}td,th{padding-right:.4rem}
+      h2{break-after:avoid}}
       """;
 
   private final Map<String, String> figures = new LinkedHashMap<>();
