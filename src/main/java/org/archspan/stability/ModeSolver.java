@@ -11,8 +11,8 @@ import org.archspan.mesh.Mesh;
  */
 final class ModeSolver {
   /** Degree of the working mesh, and of the mesh that checks it. */
-  static final int DEGREE = 8;
-  static final int CHECKING_DEGREE = 10;
+  static final int DEGREE = 7;
+  static final int CHECKING_DEGREE = 9;
 
   private static final int MOST_ELEMENTS = 2000;
   private static final int MOST_REFINEMENTS = 24;

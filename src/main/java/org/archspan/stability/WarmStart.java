@@ -15,6 +15,8 @@ final class WarmStart {
   private final Discretisation checking;
   private final double ky;
   private final double tolerance;
+  /** Relative difference of the two meshes at the latest root: it changes little from one wavelength to the next. */
+  private double shift;
 
   WarmStart(Discretisation working, Discretisation checking, double ky, double tolerance) {
     this.working = working;
@@ -54,7 +56,7 @@ final class WarmStart {
 
   private GrowthRoot check(double kx, int order, double target, boolean below, double remainder) {
     double margin = Math.max(Math.max(SMALLEST_MARGIN, 0.3 * tolerance), 4.0 * remainder);
-    double from = target;
+    double from = target * (1.0 + shift);
     for (int attempt = 0; attempt < MOST_CHECKS; attempt++) {
       double y = from * (below ? 1.0 + margin : 1.0 - margin);
       int count = checking.stiffness().count(y, kx, ky);
@@ -65,6 +67,7 @@ final class WarmStart {
       double root = y + change;
       boolean enclosed = below ? count == order && root <= y : count == order + 1 && root >= y;
       if (enclosed && Math.abs(change) <= SETTLED * y) {
+        shift = (root - target) / target;
         double error = Math.abs(root - target) / root + remainder + checking.displacement().rounding(root);
         return new GrowthRoot(kx, root, checking.slope(), error);
       }
