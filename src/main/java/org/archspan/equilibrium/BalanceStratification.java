@@ -12,7 +12,6 @@ import org.archspan.mesh.ReferenceElement;
  */
 final class BalanceStratification implements Stratification {
   private static final ReferenceElement RULE = ReferenceElement.ofDegree(16);
-  private static final double[] BARYCENTRIC = barycentric();
 
   private final StratumSum strata;
   private final ExternalGravity gravity;
@@ -64,15 +63,6 @@ final class BalanceStratification implements Stratification {
     return edges[panel] + 0.5 * (edges[panel + 1] - edges[panel]) * (1.0 + RULE.nodes()[i]);
   }
 
-  private static double[] barycentric() {
-    double[] nodes = RULE.nodes();
-    double[] weights = new double[nodes.length];
-    for (int i = 0; i < nodes.length; i++) {
-      weights[i] = (i % 2 == 0 ? 1.0 : -1.0) * Math.sqrt(RULE.weights()[i]);
-    }
-    return weights;
-  }
-
   /** Total pressure over density, cm^2 s^-2. */
   double totalPerMass(double height) {
     int last = edges.length - 1;
@@ -81,19 +71,14 @@ final class BalanceStratification implements Stratification {
     }
     int found = Arrays.binarySearch(edges, height);
     int panel = found >= 0 ? found : -found - 2;
-    int n = BARYCENTRIC.length;
-    double above = 0.0;
-    double below = 0.0;
+    int n = RULE.degree() + 1;
+    double[] weights = new double[n];
+    RULE.interpolate(2.0 * (height - edges[panel]) / (edges[panel + 1] - edges[panel]) - 1.0, weights);
+    double sum = 0.0;
     for (int i = 0; i < n; i++) {
-      double distance = height - node(edges, panel, i);
-      if (distance == 0.0) {
-        return pressurePerMass[panel * n + i];
-      }
-      double weight = BARYCENTRIC[i] / distance;
-      above += weight * pressurePerMass[panel * n + i];
-      below += weight;
+      sum += weights[i] * pressurePerMass[panel * n + i];
     }
-    return above / below;
+    return sum;
   }
 
   @Override

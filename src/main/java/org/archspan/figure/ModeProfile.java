@@ -18,26 +18,15 @@ final class ModeProfile {
 
   ModeProfile(EigenMode mode) {
     this.mode = mode;
-    int[] distinct = distinct(mode.height());
-    double[] height = pick(mode.height(), distinct);
+    double[] height = mode.height();
     bottom = height[0];
     top = height[height.length - 1];
     SplineInterpolator interpolator = new SplineInterpolator();
-    along = interpolator.interpolate(height, pick(mode.along(), distinct));
-    vertical = interpolator.interpolate(height, pick(mode.vertical(), distinct));
-    across = interpolator.interpolate(height, pick(mode.across(), distinct));
-    energy = interpolator.interpolate(height, pick(mode.kineticEnergy(), distinct));
-    density = interpolator.interpolate(height, pick(mode.densityContrast(), distinct));
-  }
-
-  /** Nodes without the repeated ends of elements. */
-  private static int[] distinct(double[] height) {
-    return java.util.stream.IntStream.range(0, height.length)
-        .filter(i -> i == 0 || height[i] > height[i - 1] + 1e-9 * (height[height.length - 1] - height[0])).toArray();
-  }
-
-  private static double[] pick(double[] values, int[] indices) {
-    return java.util.Arrays.stream(indices).mapToDouble(i -> values[i]).toArray();
+    along = interpolator.interpolate(height, mode.along());
+    vertical = interpolator.interpolate(height, mode.vertical());
+    across = interpolator.interpolate(height, mode.across());
+    energy = interpolator.interpolate(height, mode.kineticEnergy());
+    density = interpolator.interpolate(height, mode.densityContrast());
   }
 
   private double inside(double z) {

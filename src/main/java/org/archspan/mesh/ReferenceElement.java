@@ -132,6 +132,30 @@ public final class ReferenceElement {
   }
 
   /**
+   * Weights that turn nodal values into the value at a point, by the barycentric formula for these nodes (Wang, Huybrechs
+   * and Vandewalle 2014, Math. Comp. 83, 2893: alternating signs times the root of the quadrature weight).
+   *
+   * @param x       point in [-1, 1], dimensionless
+   * @param weights receives p+1 weights that add up to 1
+   */
+  public void interpolate(double x, double[] weights) {
+    double sum = 0.0;
+    for (int i = 0; i <= degree; i++) {
+      double distance = x - nodes[i];
+      if (distance == 0.0) {
+        java.util.Arrays.fill(weights, 0.0);
+        weights[i] = 1.0;
+        return;
+      }
+      weights[i] = (i % 2 == 0 ? 1.0 : -1.0) * Math.sqrt(this.weights[i]) / distance;
+      sum += weights[i];
+    }
+    for (int i = 0; i <= degree; i++) {
+      weights[i] /= sum;
+    }
+  }
+
+  /**
    * Rows that turn nodal values into the two highest Legendre coefficients, shape [2][p+1]: degree p-1 first, then p.
    * A smooth function has small ones.
    */

@@ -9,7 +9,7 @@ import org.archspan.units.OutputUnits;
 
 /** One mode in words and a short table. */
 public final class ModeText {
-  private static final int ROWS = 12;
+  private static final int ROWS = 11;
 
   private ModeText() {
   }
@@ -39,13 +39,25 @@ public final class ModeText {
     List<List<String>> rows = new ArrayList<>();
     rows.add(List.of("height", "along", "across", "vertical", "density", "energy"));
     rows.add(List.of(units.length(), units.length(), units.length(), units.length(), "contrast", "of maximum"));
-    int last = mode.height().length - 1;
+    double length = 1.0 / units.centimetresPerLength();
+    List<List<String>> columns = List.of(column(mode.height(), length), column(mode.along(), length),
+        column(mode.across(), length), column(mode.vertical(), length), column(mode.densityContrast(), 1.0),
+        column(mode.kineticEnergy(), 1.0));
     for (int row = 0; row < ROWS; row++) {
-      int i = Math.round((float) last * row / (ROWS - 1));
-      rows.add(List.of(Numbers.plain(units.length(mode.height()[i])), Numbers.plain(units.length(mode.along()[i])),
-          Numbers.plain(units.length(mode.across()[i])), Numbers.plain(units.length(mode.vertical()[i])),
-          Numbers.plain(mode.densityContrast()[i]), Numbers.plain(mode.kineticEnergy()[i])));
+      int at = row;
+      rows.add(columns.stream().map(column -> column.get(at)).toList());
     }
     return rows;
+  }
+
+  /** Equidistant values; what is below a millionth of the greatest is the mesh's own noise and reads 0. */
+  private static List<String> column(double[] values, double unit) {
+    double greatest = java.util.Arrays.stream(values).map(Math::abs).max().orElse(0.0);
+    List<String> column = new ArrayList<>();
+    for (int row = 0; row < ROWS; row++) {
+      double value = values[Math.round((float) (values.length - 1) * row / (ROWS - 1))];
+      column.add(Numbers.plain(Math.abs(value) < 1e-6 * greatest ? 0.0 : value * unit));
+    }
+    return column;
   }
 }

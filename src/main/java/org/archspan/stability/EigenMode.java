@@ -3,7 +3,7 @@ package org.archspan.stability;
 import org.archspan.boundary.Parity;
 
 /**
- * One mode on the solver's nodes. The displacement is {@code (-i X, -i Y, Z) exp(i kx x + i ky y + s t)}, normalised so
+ * One mode on equidistant heights. The displacement is {@code (-i X, -i Y, Z) exp(i kx x + i ky y + s t)}, normalised so
  * that the midplane layer moves by one scale height: the root-mean-square displacement, weighted by the square of the
  * density, is one scale height.
  *
@@ -12,7 +12,7 @@ import org.archspan.boundary.Parity;
  * @param wavenumber      kx along the field, cm^-1
  * @param crossWavenumber ky across the field, cm^-1
  * @param growthRate      s, s^-1
- * @param height          nodes z, cm, ascending from bottom to top, shape [n]
+ * @param height          heights z, cm, from bottom to top, shape [n]
  * @param along           X, cm, shape [n]
  * @param across          Y, cm, shape [n]
  * @param vertical        Z, cm, shape [n]

@@ -2,12 +2,15 @@ package org.archspan.stability;
 
 import org.archspan.boundary.Parity;
 import org.archspan.equilibrium.Equilibrium;
+import org.archspan.equilibrium.GasState;
 
 /**
  * Turns the displacement of a root into a mode in CGS, normalised so that the midplane layer moves by one scale height:
  * the root-mean-square displacement, weighted by the square of the density, is one scale height.
  */
 final class ModeShape {
+  private static final int HEIGHTS = 201;
+
   private final ModeSolver solver;
   private final Atmosphere atmosphere;
   private final Displacement displacement;
@@ -75,35 +78,33 @@ final class ModeShape {
     return displacement.centroid() * solver.scales().length();
   }
 
-  /** All nodes, each shared end of two elements once. */
-  private int[] distinctNodes() {
-    int perElement = atmosphere.mesh.degree() + 1;
-    return java.util.stream.IntStream.range(0, atmosphere.nodes()).filter(i -> i == 0 || i % perElement != 0).toArray();
-  }
-
+  /** The mode on equidistant heights, whatever the mesh. */
   EigenMode mode(int order, double wavenumber, double growthRate) {
     double length = solver.scales().length();
-    int[] nodes = distinctNodes();
-    int n = nodes.length;
     double norm = length / layerDisplacement() * (halfColumn() < 0.0 ? -1.0 : 1.0);
-    double[][] values = new double[7][n];
+    double[][] values = new double[7][HEIGHTS];
+    double bottomDensity = equilibrium.at(equilibrium.bottom()).logDensity();
+    MeshInterpolation at = new MeshInterpolation(atmosphere.mesh);
     double greatest = 0.0;
-    for (int to = 0; to < n; to++) {
-      int i = nodes[to];
-      double scale = norm / rootDensity[i];
-      values[0][to] = atmosphere.height[i] * length;
-      values[1][to] = scale * displacement.along[i];
-      values[2][to] = scale * displacement.across[i];
-      values[3][to] = scale * displacement.zeta[i];
-      values[4][to] = scale * displacement.divergence[i] / length;
-      values[5][to] = scale * densityChange(i) / length;
-      double x = displacement.along[i];
-      double y = displacement.across[i];
-      double z = displacement.zeta[i];
-      values[6][to] = x * x + y * y + z * z;
-      greatest = Math.max(greatest, values[6][to]);
+    for (int i = 0; i < HEIGHTS; i++) {
+      double z = equilibrium.bottom() + (equilibrium.top() - equilibrium.bottom()) * i / (HEIGHTS - 1);
+      at.moveTo(z / length);
+      GasState state = equilibrium.at(z);
+      double scale = norm * Math.exp(0.5 * (bottomDensity - state.logDensity()));
+      double x = at.value(displacement.along);
+      double y = at.value(displacement.across);
+      double zeta = at.value(displacement.zeta);
+      double divergence = at.value(displacement.divergence);
+      values[0][i] = z;
+      values[1][i] = scale * x;
+      values[2][i] = scale * y;
+      values[3][i] = scale * zeta;
+      values[4][i] = scale * divergence / length;
+      values[5][i] = scale * (-state.logDensityGradient() * zeta - divergence / length);
+      values[6][i] = x * x + y * y + zeta * zeta;
+      greatest = Math.max(greatest, values[6][i]);
     }
-    for (int i = 0; i < n; i++) {
+    for (int i = 0; i < HEIGHTS; i++) {
       values[6][i] /= greatest;
     }
     return new EigenMode(solver.problem().parity(), order, wavenumber, solver.problem().crossWavenumber(), growthRate,

@@ -5,12 +5,12 @@ import java.util.List;
 import org.archspan.stability.EigenMode;
 import org.archspan.units.OutputUnits;
 
-/** The shape of a mode on the solver's nodes. */
+/** The shape of a mode against height. */
 public final class ModeTable {
   private ModeTable() {
   }
 
-  /** One row for each node. */
+  /** One row for each height. */
   public static Table of(EigenMode mode, OutputUnits units) {
     return new Table("mode", List.of(
         Column.of("height", units.length(), "height z", lengths(mode.height(), units)),
