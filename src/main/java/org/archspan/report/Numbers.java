@@ -1,15 +1,33 @@
 package org.archspan.report;
 
+import java.math.BigDecimal;
+import java.math.MathContext;
 import java.util.Locale;
 import org.archspan.units.OutputUnits;
 
 /** Numbers for people: few digits, and the unit in which they are short. */
 public final class Numbers {
+  private static final int MOST_DIGITS = 4;
+
   private Numbers() {
   }
 
   /** A pure number with four significant digits. */
   public static String plain(double value) {
+    return digits(value, MOST_DIGITS);
+  }
+
+  /**
+   * A number with as many digits as its error leaves, two at least and four at most.
+   *
+   * @param relativeError estimated, dimensionless
+   */
+  static String plain(double value, double relativeError) {
+    return digits(value, relativeError > 0.0
+        ? (int) Math.max(2, Math.min(MOST_DIGITS, Math.ceil(-Math.log10(relativeError)))) : MOST_DIGITS);
+  }
+
+  private static String digits(double value, int digits) {
     if (Double.isNaN(value)) {
       return "-";
     }
@@ -19,12 +37,12 @@ public final class Numbers {
     if (value == 0.0) {
       return "0";
     }
-    double size = Math.abs(value);
-    if (size >= 1e5 || size < 1e-3) {
-      return String.format(Locale.ROOT, "%.3e", value).replace("e+0", "e").replace("e+", "e").replace("e-0", "e-");
+    BigDecimal rounded = new BigDecimal(value).round(new MathContext(digits));
+    int exponent = rounded.precision() - rounded.scale() - 1;
+    if (exponent >= 5 || exponent < -3) {
+      return rounded.scaleByPowerOfTen(-exponent).setScale(digits - 1).toPlainString() + "e" + exponent;
     }
-    int decimals = (int) Math.max(0, 3 - Math.floor(Math.log10(size)));
-    return String.format(Locale.ROOT, "%." + decimals + "f", value);
+    return rounded.setScale(Math.max(0, digits - 1 - exponent)).toPlainString();
   }
 
   /** A number as it was given, without trailing zeros; dimensionless. */
@@ -32,7 +50,7 @@ public final class Numbers {
     if (!Double.isFinite(value) || value == 0.0 || Math.abs(value) >= 1e5 || Math.abs(value) < 1e-3) {
       return value == 0.0 ? "0" : plain(value);
     }
-    return new java.math.BigDecimal(value).round(new java.math.MathContext(6)).stripTrailingZeros().toPlainString();
+    return new BigDecimal(value).round(new MathContext(6)).stripTrailingZeros().toPlainString();
   }
 
   /** A relative error, dimensionless, rounded up to a power of ten; nothing below 1e-12 is told apart. */
@@ -45,16 +63,26 @@ public final class Numbers {
 
   /** A length (cm) with unit; kiloparsecs where parsecs would be thousands. */
   public static String length(double centimetres, OutputUnits units) {
+    return length(centimetres, 0.0, units);
+  }
+
+  /** The same with the digits that its relative error (dimensionless) leaves. */
+  static String length(double centimetres, double relativeError, OutputUnits units) {
     double value = units.length(centimetres);
-    if (units.length().equals("pc") && value >= 1e3 && Double.isFinite(value)) {
-      return plain(1e-3 * value) + " kpc";
+    if (units.length().equals("pc") && value >= 999.95 && Double.isFinite(value)) {
+      return plain(1e-3 * value, relativeError) + " kpc";
     }
-    return plain(value) + (Double.isInfinite(value) ? "" : " " + units.length());
+    return plain(value, relativeError) + (Double.isInfinite(value) ? "" : " " + units.length());
   }
 
   /** A time (s) with unit. */
   public static String time(double seconds, OutputUnits units) {
-    return plain(units.time(seconds)) + " " + units.time();
+    return time(seconds, 0.0, units);
+  }
+
+  /** The same with the digits that its relative error (dimensionless) leaves. */
+  static String time(double seconds, double relativeError, OutputUnits units) {
+    return plain(units.time(seconds), relativeError) + " " + units.time();
   }
 
   /** A growth rate (s^-1) with unit. */
