@@ -27,7 +27,7 @@ public final class Assumptions {
     lines.put("gas", gas(disk, equilibrium, units));
     lines.put("field", field(disk, bottom, units));
     lines.put("cosmic rays", cosmicRays(disk.cosmicRays(), bottom));
-    lines.put("gravity", gravity(disk.gravity()));
+    lines.put("gravity", gravity(disk.gravity(), equilibrium));
     lines.put("domain", domain(equilibrium, units));
     lines.put("waves", crossWavenumber == 0.0 ? "along the field, uniform across it (ky = 0)"
         : "wavelength across the field " + Numbers.length(2.0 * Math.PI / crossWavenumber, units));
@@ -71,13 +71,16 @@ public final class Assumptions {
         + Numbers.given(closure.diffusivity()) + " cm^2/s";
   }
 
-  private static String gravity(List<GravityLaw> laws) {
+  private static String gravity(List<GravityLaw> laws, Equilibrium equilibrium) {
     List<String> names = new ArrayList<>();
     for (GravityLaw law : laws) {
       String name = law.getClass().getSimpleName().replace("Gravity", "").replaceAll("([a-z])([A-Z])", "$1-$2");
       names.add(name.toLowerCase(java.util.Locale.ROOT));
     }
-    return "external: " + String.join(" + ", names) + "; the gas's own gravity is left out";
+    double above = Math.min(equilibrium.bottom() + equilibrium.scaleHeight(), equilibrium.top());
+    return "external: " + String.join(" + ", names) + "; " + Numbers.plain(equilibrium.at(above).gravity())
+        + " cm/s^2 one scale height up, " + Numbers.plain(equilibrium.at(equilibrium.top()).gravity())
+        + " at the top; the gas's own gravity is left out";
   }
 
   private static String domain(Equilibrium equilibrium, OutputUnits units) {

@@ -27,7 +27,7 @@ public final class EquilibriumText {
         .labelled("column", Numbers.plain(units.surfaceDensity(equilibrium.surfaceDensity())) + " "
             + units.surfaceDensity())
         .labelled("residual", "force balance holds to better than 1e-10 of the weight over slabs that fill the domain");
-    block.heading("Profile").table(rows(equilibrium, units));
+    block.heading("Profile").table(2, rows(equilibrium, units));
     return block.text();
   }
 

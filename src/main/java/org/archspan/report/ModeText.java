@@ -31,7 +31,7 @@ public final class ModeText {
             : "contrast " + Numbers.plain(mode.columnContrast())
                 + " when the midplane layer moves by one scale height");
     block.heading("Amplitudes, for a midplane layer that moves by one scale height ("
-        + Numbers.length(equilibrium.scaleHeight(), units) + ")").table(rows(mode, units));
+        + Numbers.length(equilibrium.scaleHeight(), units) + ")").table(2, rows(mode, units));
     return block.text();
   }
 

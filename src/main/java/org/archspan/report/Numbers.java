@@ -2,6 +2,7 @@ package org.archspan.report;
 
 import java.math.BigDecimal;
 import java.math.MathContext;
+import java.math.RoundingMode;
 import java.util.Locale;
 import org.archspan.units.OutputUnits;
 
@@ -88,6 +89,14 @@ public final class Numbers {
   /** A growth rate (s^-1) with unit. */
   public static String rate(double perSecond, OutputUnits units) {
     return plain(units.rate(perSecond)) + "/" + units.time();
+  }
+
+  /** A growth rate (s^-1) that nothing exceeds, with unit: rounded up, so that it bounds in print too. */
+  static String rateBound(double perSecond, OutputUnits units) {
+    double value = units.rate(perSecond);
+    return value > 0.0 && Double.isFinite(value)
+        ? plain(new BigDecimal(value).round(new MathContext(MOST_DIGITS, RoundingMode.CEILING)).doubleValue()) + "/"
+            + units.time() : plain(value) + "/" + units.time();
   }
 
   /** A mass (g) with unit. */

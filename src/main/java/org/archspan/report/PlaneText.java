@@ -25,13 +25,17 @@ public final class PlaneText {
     TextBlock block = new TextBlock(width).heading(title).heading("Plane of wavenumbers");
     double best = plane.growthRate()[bestAlong][bestAcross];
     if (best == 0.0) {
-      return block.sentence("No wave grows on this grid.").text();
+      block.sentence("No wave grows on this grid.");
+    } else {
+      block.sentence("Fastest on the grid: one e-folding in " + Numbers.time(1.0 / best, units) + " at a wavelength of "
+          + Numbers.length(2.0 * Math.PI / plane.along()[bestAlong], units) + " along and "
+          + Numbers.length(2.0 * Math.PI / plane.across()[bestAcross], units) + " across the field.");
     }
-    block.sentence("Fastest on the grid: one e-folding in " + Numbers.time(1.0 / best, units) + " at a wavelength of "
-        + Numbers.length(2.0 * Math.PI / plane.along()[bestAlong], units) + " along and "
-        + Numbers.length(2.0 * Math.PI / plane.across()[bestAcross], units) + " across the field.");
-    block.sentence("Infinitely short waves across the field: " + Numbers.time(1.0 / limit, units)
-        + ", which no ideal wave outgrows.");
+    block.sentence(limit == 0.0 ? "Infinitely short waves across the field, which no ideal wave outgrows, do not grow"
+        + " at the wavelengths of the grid either."
+        : "Infinitely short waves across the field grow in " + Numbers.time(1.0 / limit, units)
+            + ", the fastest at the wavelengths of the grid; at those no ideal wave outgrows them.");
+    block.sentence("Linear theory on a static base state; between the points of the grid growth may be faster.");
     return block.text();
   }
 }

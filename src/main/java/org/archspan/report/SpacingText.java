@@ -48,13 +48,14 @@ public final class SpacingText {
   private void found() {
     block.heading("Found");
     if (result.stable()) {
-      block.sentence("Stable: no wave grows, at any wavelength of the range.");
+      stable();
       return;
     }
     if (!result.branches().isEmpty()) {
-      block.table(branches());
+      block.table(1, branches()).sentence("column: relative change of the surface density when the midplane layer moves by"
+          + " one scale height" + (result.spacing().isPresent() ? "; >: sets the spacing" : "")).gap();
     }
-    block.gap().sentence(sentence(result, units));
+    block.sentence(sentence(result, units));
     result.complex().ifPresent(this::complex);
     BranchPeak peak = result.spacingPeak().orElseThrow();
     if (peak.heldBy() == HeldBy.DISK) {
@@ -69,6 +70,19 @@ public final class SpacingText {
         + Numbers.length(shortest, units) + " are stable."));
   }
 
+  private void stable() {
+    block.sentence("Stable: no wave with the given wavelength across the field grows" + range() + ".");
+    if (result.acrossLimit().growthRate() > 0.0) {
+      block.sentence("Shorter waves across the field do grow: infinitely short ones in "
+          + Numbers.time(1.0 / result.acrossLimit().growthRate(), units) + " at a height of "
+          + Numbers.length(result.acrossLimit().height(), units) + ". Give waves.cross-wavelength to solve waves of finite"
+          + " length across the field.");
+    } else {
+      block.sentence("Infinitely short waves across the field, which no ideal wave outgrows, do not grow at any height"
+          + " either.");
+    }
+  }
+
   private List<List<String>> branches() {
     List<List<String>> rows = new ArrayList<>();
     rows.add(List.of("", "parity", "order", "wavelength", "growth time", "centroid", "column", "held by"));
@@ -76,8 +90,10 @@ public final class SpacingText {
       BranchPeak peak = result.branches().get(i);
       boolean chosen = result.spacing().isPresent() && result.spacing().get() == i;
       rows.add(List.of(chosen ? ">" : "", parity(peak.parity()), Integer.toString(peak.order()),
-          Numbers.length(peak.wavelength(), units), Numbers.time(peak.growthTime(), units),
-          Numbers.length(peak.centroidHeight(), units), Numbers.plain(peak.columnContrast()),
+          Numbers.length(peak.wavelength(), peak.wavelengthError(), units),
+          Numbers.time(peak.growthTime(), peak.growthError(), units),
+          Numbers.length(peak.centroidHeight(), peak.wavelengthError(), units),
+          Numbers.plain(peak.columnContrast(), peak.wavelengthError()),
           peak.heldBy().name().toLowerCase(Locale.ROOT)));
     }
     return rows;
@@ -94,7 +110,9 @@ public final class SpacingText {
   /** One sentence that can be quoted. */
   public static String sentence(SpacingResult result, OutputUnits units) {
     if (result.stable()) {
-      return "The gas is stable against magnetic buoyancy.";
+      return result.acrossLimit().growthRate() > 0.0
+          ? "No wave with the given wavelength across the field grows; shorter ones across it do."
+          : "The gas is stable against magnetic buoyancy.";
     }
     BranchPeak peak = result.spacingPeak().orElseThrow();
     if (peak.wavenumber() == 0.0) {
@@ -105,8 +123,9 @@ public final class SpacingText {
         : peak.heldBy() == HeldBy.HALO ? "The continuum edge of the atmosphere above the disk" : "The fastest mode";
     String parity = peak.heldBy() == HeldBy.HALO || peak.parity() == Parity.FLOOR ? ""
         : peak.parity() == Parity.MIRROR ? " (mirror-symmetric about the midplane)" : " (flexing the midplane)";
-    return who + parity + " has a wavelength of " + Numbers.length(peak.wavelength(), units)
-        + " along the field; its growth time is " + Numbers.time(peak.growthTime(), units) + ".";
+    return who + parity + " has a wavelength of "
+        + Numbers.length(peak.wavelength(), peak.wavelengthError(), units) + " along the field; its growth time is "
+        + Numbers.time(peak.growthTime(), peak.growthError(), units) + ".";
   }
 
   private void complex(CloudComplex complex) {
@@ -114,28 +133,28 @@ public final class SpacingText {
       block.sentence("Gathered along an arm of the given width, one wavelength holds "
           + Numbers.mass(complex.mass().getAsDouble(), units) + ".");
     } else {
-      block.sentence("One wavelength holds " + Numbers.mass(complex.massPerWidth() * units.centimetresPerLength(), units)
-          + " for each " + units.length() + " of arm width (no arm is given).");
+      block.sentence("One wavelength holds "
+          + Numbers.mass(complex.massPerWidth() * units.centimetresPerLength(), units) + " for each " + units.length() + " of arm width (no arm is given).");
     }
     if (complex.eFoldings().isPresent()) {
-      block.sentence("While the gas crosses the arm the mode grows by " + Numbers.plain(complex.eFoldings().getAsDouble())
-          + " e-foldings.");
+      block.sentence("While the gas crosses the arm the mode grows by "
+          + Numbers.plain(complex.eFoldings().getAsDouble()) + " e-foldings.");
     }
   }
 
   private void sure() {
     block.heading("How sure");
     if (result.stable()) {
-      block.sentence("No displacement lowers the energy: the count of unstable modes, which cannot rise towards shorter waves, is"
-          + " zero already for the longest.");
+      block.sentence("Proved by counting: the number of growing modes, which cannot rise towards shorter waves along the"
+          + " field, is zero already for the longest.");
       return;
     }
-    block.sentence("Proved by counting the modes on " + result.certificate().intervals() + " intervals of wavenumber that"
-        + " leave no gap: no wave with the given wavelength across the field grows faster than "
-        + Numbers.rate(result.certificate().bound(), units) + range() + ".");
+    block.sentence("Proved by counting the modes on " + result.certificate().intervals() + " intervals of wavenumber"
+        + " that leave no gap: no wave with the given wavelength across the field grows faster than "
+        + Numbers.rateBound(result.certificate().bound(), units) + range() + ".");
     BranchPeak peak = result.spacingPeak().orElseThrow();
-    block.sentence("Estimated relative errors: growth rate below " + Numbers.error(peak.growthError()) + ", wavelength below "
-        + Numbers.error(peak.wavelengthError()) + (peak.unstableModes() < 0 ? "."
+    block.sentence("Estimated relative errors: growth rate below " + Numbers.error(peak.growthError())
+        + ", wavelength below " + Numbers.error(peak.wavelengthError()) + (peak.unstableModes() < 0 ? "."
         : "; at that wavelength exactly " + modes(peak.unstableModes()) + " of this parity grow"
         + (peak.unstableModes() == 1 ? "s." : ".")));
   }

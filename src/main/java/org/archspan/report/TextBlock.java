@@ -54,15 +54,15 @@ final class TextBlock {
     text.append(line).append('\n');
   }
 
-  /** Rows of equal length; the first is the heading. Numbers are set flush right, words flush left. */
-  TextBlock table(List<List<String>> rows) {
+  /** Rows of equal length, the first of them headings. Numbers are set flush right, words flush left. */
+  TextBlock table(int headings, List<List<String>> rows) {
     int columns = rows.get(0).size();
     List<Integer> widths = new ArrayList<>();
     List<Boolean> numeric = new ArrayList<>();
     for (int c = 0; c < columns; c++) {
       int column = c;
       widths.add(rows.stream().mapToInt(row -> row.get(column).length()).max().orElse(0));
-      numeric.add(rows.stream().skip(1).allMatch(row -> row.get(column).matches("[-+0-9].*|-|infinite|many")));
+      numeric.add(rows.stream().skip(headings).allMatch(row -> row.get(column).matches("[-+0-9].*|-|infinite|many")));
     }
     for (List<String> row : rows) {
       StringBuilder line = new StringBuilder(" ");

@@ -12,14 +12,18 @@ final class Findings {
   private final List<String> sentences = new ArrayList<>();
 
   static List<String> of(Equilibrium equilibrium, List<BranchPeak> branches, Optional<BranchPeak> fastest,
-      Optional<Integer> spacing, SearchOptions options, WaveRange range) {
+      Optional<Integer> spacing, AcrossLimit acrossLimit, SearchOptions options, WaveRange range) {
     Findings findings = new Findings();
-    if (range.limited()) {
+    if (range.limited() && acrossLimit.growthRate() > 0.0) {
       findings.aboutRange(fastest, range);
+    }
+    if (fastest.isEmpty() && acrossLimit.growthRate() > 0.0) {
+      findings.sentences.add("Only waves with the given wavelength across the field were searched, and they are stable;"
+          + " shorter waves across the field grow, up to the limit of infinitely short ones.");
     }
     fastest.ifPresent(peak -> {
       findings.aboutFastest(peak, equilibrium);
-      findings.aboutSpacing(branches, peak, spacing, options);
+      findings.aboutSpacing(equilibrium, branches, peak, spacing, options);
       findings.aboutLid(spacing.map(branches::get).orElse(peak), equilibrium);
     });
     return List.copyOf(findings.sentences);
@@ -49,13 +53,13 @@ final class Findings {
     }
   }
 
-  private void aboutSpacing(List<BranchPeak> branches, BranchPeak fastest, Optional<Integer> spacing,
-      SearchOptions options) {
+  private void aboutSpacing(Equilibrium equilibrium, List<BranchPeak> branches, BranchPeak fastest,
+      Optional<Integer> spacing, SearchOptions options) {
     String limit = options.gatheringHeight().inScaleHeights()
         ? String.format(Locale.ROOT, "%.3g scale heights", options.gatheringHeight().value()) : "the height asked for";
     if (spacing.isEmpty()) {
-      sentences.add("No unstable branch has its kinetic-energy centroid within " + limit + " of the midplane: nothing"
-          + " gathers the disk's own gas, and the spacing given is that of the fastest growth anywhere.");
+      sentences.add("No unstable branch has its kinetic-energy centroid within " + limit + " of the "
+          + (equilibrium.aboutMidplane() ? "midplane" : "floor") + ": nothing gathers the disk's own gas, and the spacing given is that of the fastest growth anywhere.");
     } else if (branches.get(spacing.get()) != fastest) {
       sentences.add("The fastest growth of all is not the one that gathers the disk's own gas; the spacing is that of"
           + " the fastest branch whose kinetic-energy centroid lies within " + limit + ".");

@@ -42,9 +42,10 @@ public final class SpacingStudy {
     Optional<Integer> spacing = gathering(branches, equilibrium.bottom() + gatheringHeight);
     Optional<CloudComplex> complex = spacing.map(branches::get).or(() -> fastest)
         .filter(peak -> peak.wavenumber() > 0.0).map(peak -> complex(equilibrium, peak));
+    AcrossLimit acrossLimit = acrossLimit(equilibrium);
     return new SpacingResult(equilibrium, residual, branches, fastest, spacing,
-        acrossLimit(equilibrium), longestStable(search), complex, search.certificate(), gatheringHeight,
-        Findings.of(equilibrium, branches, fastest, spacing, options, range));
+        acrossLimit, longestStable(search), complex, search.certificate(), gatheringHeight,
+        Findings.of(equilibrium, branches, fastest, spacing, acrossLimit, options, range));
   }
 
   /** The fastest branch, or the continuum of the atmosphere above where that is faster. */

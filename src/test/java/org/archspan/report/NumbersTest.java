@@ -37,4 +37,11 @@ class NumbersTest {
   void errorsAreBounds(double error, String text) {
     assertThat(Numbers.error(error)).isEqualTo(text);
   }
+
+  /** A bound that is rounded to the nearest could lie below what it bounds. */
+  @ParameterizedTest
+  @CsvSource({"0.0364009, 0.03641/Myr", "0.0364, 0.03641/Myr", "0.5, 0.5000/Myr", "0, 0/Myr"})
+  void boundsAreRoundedUp(double perMegayear, String text) {
+    assertThat(Numbers.rateBound(perMegayear / Constants.MEGAYEAR, OutputUnits.galactic())).isEqualTo(text);
+  }
 }
