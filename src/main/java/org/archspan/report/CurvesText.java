@@ -31,7 +31,7 @@ public final class CurvesText {
     List<List<String>> rows = new ArrayList<>();
     rows.add(List.of("parity", "order", "across", "fastest point", "growth time", "error", "modes", "short end"));
     curves.forEach(curve -> rows.add(row(curve, units)));
-    return block.table(1, rows).sentence("The fastest point is the fastest of the wavelengths on the curve; archspan spacing"
+    return block.table(rows).sentence("The fastest point is the fastest of the wavelengths on the curve; archspan spacing"
         + " finds the true maximum.").text();
   }
 

@@ -52,7 +52,7 @@ public final class SpacingText {
       return;
     }
     if (!result.branches().isEmpty()) {
-      block.table(1, branches()).sentence("column: relative change of the surface density when the midplane layer moves by"
+      block.table(branches()).sentence("column: relative change of the surface density when the midplane layer moves by"
           + " one scale height" + (result.spacing().isPresent() ? "; >: sets the spacing" : "")).gap();
     }
     block.sentence(sentence(result, units));

@@ -54,6 +54,11 @@ final class TextBlock {
     text.append(line).append('\n');
   }
 
+  /** A table with one row of headings. */
+  TextBlock table(List<List<String>> rows) {
+    return table(1, rows);
+  }
+
   /** Rows of equal length, the first of them headings. Numbers are set flush right, words flush left. */
   TextBlock table(int headings, List<List<String>> rows) {
     int columns = rows.get(0).size();

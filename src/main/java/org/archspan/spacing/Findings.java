@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import org.archspan.boundary.Parity;
 import org.archspan.boundary.TopBoundary;
 import org.archspan.equilibrium.Equilibrium;
 
@@ -24,7 +25,7 @@ final class Findings {
     fastest.ifPresent(peak -> {
       findings.aboutFastest(peak, equilibrium);
       findings.aboutSpacing(equilibrium, branches, peak, spacing, options);
-      findings.aboutLid(spacing.map(branches::get).orElse(peak), equilibrium);
+      findings.aboutSpacingMode(spacing.map(branches::get).orElse(peak), equilibrium);
     });
     return List.copyOf(findings.sentences);
   }
@@ -66,9 +67,13 @@ final class Findings {
     }
   }
 
-  private void aboutLid(BranchPeak peak, Equilibrium equilibrium) {
+  private void aboutSpacingMode(BranchPeak peak, Equilibrium equilibrium) {
     if (peak.heldBy() == HeldBy.HALO) {
       return;
+    }
+    if (peak.parity() == Parity.FLEXING) {
+      sentences.add("The mode that sets the spacing flexes the midplane: to first order no column density changes, and gas"
+          + " gathers above the midplane half a wavelength from where it gathers below.");
     }
     if (Double.isNaN(peak.tallerGrowthChange())) {
       sentences.add("The influence of the upper boundary could not be measured: no taller domain can be built.");
