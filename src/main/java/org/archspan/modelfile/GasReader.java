@@ -21,7 +21,14 @@ final class GasReader {
   }
 
   GasClosure closure() {
-    return new GasClosure(inputs.number("gas.adiabatic-index").orElse(1.0));
+    double index = inputs.number("gas.adiabatic-index").orElse(1.0);
+    double coolingTime = inputs.number("gas.cooling-time").orElse(Double.POSITIVE_INFINITY);
+    if (Double.isFinite(coolingTime) && index < 1.0) {
+      inputs.fault("gas.cooling-time", "given with gas.adiabatic-index " + index,
+          "a gas that cools needs an adiabatic index of at least 1");
+      return new GasClosure(index);
+    }
+    return new GasClosure(index, coolingTime);
   }
 
   Gas gas() {

@@ -43,7 +43,9 @@ public final class Assumptions {
       kind = "prescribed stratification (" + prescribed.strata().size() + " strata), " + kind
           + (prescribed.dispersion().isPresent() ? "" : " as the force balance demands");
     }
-    return kind + "; adiabatic index of the perturbations " + Numbers.given(disk.gasClosure().adiabaticIndex());
+    String cooling = disk.gasClosure().cools()
+        ? ", cooling in " + Numbers.time(disk.gasClosure().coolingTime(), units) : "";
+    return kind + "; adiabatic index of the perturbations " + Numbers.given(disk.gasClosure().adiabaticIndex()) + cooling;
   }
 
   private static String field(Disk disk, GasState bottom, OutputUnits units) {

@@ -124,6 +124,7 @@ final class Displacement {
     double bending = 0.0;
     double work = 0.0;
     double answer = 0.0;
+    double gasAnswer = 0.0;
     double gas = response.gas;
     double cosmicRay = response.cosmicRay;
     for (int i = from; i < to; i++) {
@@ -138,8 +139,10 @@ final class Displacement {
       bending += w * atmosphere.alfvenSquared[i] * (y * y + z * z);
       work += w * x * (stiffness * d - atmosphere.gravity[i] * z);
       answer += w * cosmicRays * d * d;
+      gasAnswer += w * atmosphere.gasPerMass[i] * d * d;
     }
-    byGrowth += factor * (2.0 * growth * inertia + response.cosmicRayByGrowth * answer);
+    byGrowth += factor * (2.0 * growth * inertia + response.gasByGrowth * gasAnswer
+        + response.cosmicRayByGrowth * answer);
     byWavenumber += factor * (2.0 * (work + kx * bending) + response.cosmicRayByWavenumber * answer);
   }
 

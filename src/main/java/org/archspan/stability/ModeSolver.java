@@ -61,8 +61,8 @@ final class ModeSolver {
     halo = problem.topBoundary() == org.archspan.boundary.TopBoundary.OPEN
         ? new HaloEdge(working.stiffness().atmosphere(), new PressureResponse(problem.gas(), problem.cosmicRays(), scales))
         : null;
-    BuoyancyBound bound = BuoyancyBound.of(working.stiffness().atmosphere(), problem.gas().adiabaticIndex())
-        .max(BuoyancyBound.of(checking.stiffness().atmosphere(), problem.gas().adiabaticIndex()));
+    BuoyancyBound bound = BuoyancyBound.of(working.stiffness().atmosphere(), problem.gas().softestIndex())
+        .max(BuoyancyBound.of(checking.stiffness().atmosphere(), problem.gas().softestIndex()));
     fastestPossible = bound.growth();
     shortestUnstable = bound.wavenumber();
   }

@@ -8,31 +8,26 @@ import org.archspan.closure.GasClosure;
  * Holds the last evaluated factors; one instance for one thread.
  */
 final class PressureResponse {
-  private final double gasIndex;
+  private final GasClosure gasClosure;
+  private final double time;
   private final double cosmicRayIndex;
   private final double diffusivity;
 
   /** Factor of the gas pressure, and of the cosmic-ray pressure, in {@code Gamma P}. */
   double gas;
   double cosmicRay;
+  /** Derivative of the gas factor with respect to s. */
+  double gasByGrowth;
   /** Derivatives of the cosmic-ray factor with respect to s and kx. */
   double cosmicRayByGrowth;
   double cosmicRayByWavenumber;
 
   PressureResponse(GasClosure gas, CosmicRayClosure cosmicRays, Scales scales) {
-    gasIndex = gas.adiabaticIndex();
+    gasClosure = gas;
+    time = scales.time();
     cosmicRayIndex = cosmicRays.adiabaticIndex();
     diffusivity = cosmicRays.diffusivity() / (scales.length() * scales.speed());
-    this.gas = gasIndex;
-  }
-
-  double gasIndex() {
-    return gasIndex;
-  }
-
-  /** Whether the response does not depend on the growth rate. */
-  boolean fixed() {
-    return diffusivity == 0.0 || Double.isInfinite(diffusivity);
+    this.gas = gas.adiabaticIndex();
   }
 
   /**
@@ -42,6 +37,11 @@ final class PressureResponse {
    * @param wavenumber kx, not negative
    */
   void evaluate(double growth, double wavenumber) {
+    if (gasClosure.cools()) {
+      gas = gasClosure.index(growth / time);
+      double damping = time / gasClosure.coolingTime();
+      gasByGrowth = (gasClosure.adiabaticIndex() - 1.0) * damping / ((growth + damping) * (growth + damping));
+    }
     cosmicRayByGrowth = 0.0;
     cosmicRayByWavenumber = 0.0;
     if (Double.isInfinite(diffusivity)) {

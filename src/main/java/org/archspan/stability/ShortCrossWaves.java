@@ -141,7 +141,7 @@ public final class ShortCrossWaves {
     }
 
     private double drive() {
-      return gravity * gravity / (gas.adiabaticIndex() * state.gasPerMass()) - fall;
+      return gravity * gravity / (gas.softestIndex() * state.gasPerMass()) - fall;
     }
 
     double marginalWavenumber() {
@@ -171,7 +171,7 @@ public final class ShortCrossWaves {
       double s = Math.sqrt(growthSquared);
       double leak = wavenumberSquared == 0.0 ? 0.0 : cosmicRays.diffusivity() * wavenumberSquared;
       double answer = Double.isInfinite(cosmicRays.diffusivity()) ? 0.0 : cosmicRays.adiabaticIndex() * s / (s + leak);
-      double stiffness = gas.adiabaticIndex() * state.gasPerMass() + answer * state.cosmicRayPerMass();
+      double stiffness = gas.index(s) * state.gasPerMass() + answer * state.cosmicRayPerMass();
       double tension = growthSquared + wavenumberSquared * alfvenSquared;
       double denominator = (stiffness + alfvenSquared) * growthSquared
           + stiffness * alfvenSquared * wavenumberSquared;

@@ -72,7 +72,6 @@ class ModelReaderTest {
       "gas | surface-density = \"10 Msun/pc^2\" | gas.surface-density: given beside gas.midplane-density; give one of",
       "gas | temperature = \"8000 K\" | gas.temperature: given beside gas.dispersion; give one of",
       "gas | mean-molecular-weight = 0.6 | gas.mean-molecular-weight: given without gas.temperature",
-      "gas | cooling-time = \"2 Myr\" | gas.cooling-time: found \"2 Myr\"; known, but not solved by this version",
       "gas | cooling-time = \"2 pc\" | gas.cooling-time: found \"2 pc\", whose dimension is cm",
       "gas | self-gravity = \"full\" | gas.self-gravity: found \"full\"; known, but not solved by this version",
       "gas | self-gravity = \"ful\" | gas.self-gravity: found \"ful\"; allowed are \"off\", \"equilibrium\", \"full\"; did you mean \"full\"?",
