@@ -43,7 +43,7 @@ public final class SpacingFiles {
     this.units = units;
   }
 
-  /** Makes and writes tables, figures, summary and report. */
+  /** Makes and writes tables (without rows where nothing grows), figures, summary and report. */
   public void write(Path folder, String json, String summary, ModelEcho model, boolean overwrite)
       throws WriteException {
     FigureStyle style = FigureStyle.journal();
@@ -61,10 +61,8 @@ public final class SpacingFiles {
 
   private void growth(OutputFolder output, ReportPage page, FigureStyle style) {
     List<GrowthCurve> curves = GrowthCurves.of(result, disk, options);
-    if (!curves.isEmpty()) {
-      output.table("growth", GrowthTable.of(curves, units));
-      output.table("branches", BranchTable.of(result.branches(), units));
-    }
+    output.table("growth", GrowthTable.of(curves, units));
+    output.table("branches", BranchTable.of(result.branches(), units));
     if (!result.branches().isEmpty()) {
       page.table("Unstable branches", BranchTable.of(result.branches(), units));
     }

@@ -130,7 +130,7 @@ public final class SpacingText {
 
   private void complex(CloudComplex complex) {
     if (complex.mass().isPresent()) {
-      block.sentence("Gathered along an arm of the given width, one wavelength holds "
+      block.sentence("Along an arm of the given width one wavelength holds "
           + Numbers.mass(complex.mass().getAsDouble(), units) + ".");
     } else {
       block.sentence("One wavelength holds "
