@@ -39,16 +39,18 @@ final class BalanceStratification implements Stratification {
     double[] perMass = new double[(edges.length - 1) * n];
     double far = edges[edges.length - 1];
     double above = gravity.acceleration(far) / -strata.logDensityGradient(far);
+    double end = far;
+    double endDensity = strata.logDensity(far);
     for (int panel = edges.length - 2; panel >= 0; panel--) {
-      double end = edges[panel + 1];
-      double endDensity = strata.logDensity(end);
       for (int i = n - 1; i >= 0; i--) {
         double z = node(edges, panel, i);
         double here = strata.logDensity(z);
-        perMass[panel * n + i] = above * Math.exp(endDensity - here)
-            + HeightPanels.integrate(y -> Math.exp(strata.logDensity(y) - here) * gravity.acceleration(y), z, end);
+        above = above * Math.exp(endDensity - here) + HeightPanels.integrateShort(
+            y -> Math.exp(strata.logDensity(y) - here) * gravity.acceleration(y), z, end);
+        perMass[panel * n + i] = above;
+        end = z;
+        endDensity = here;
       }
-      above = perMass[panel * n];
     }
     return new BalanceStratification(strata, gravity, edges, perMass, 0.0, 0.0);
   }

@@ -5,7 +5,7 @@ import org.archspan.disk.RefusedModelException;
 
 /** Whether the balance leaves a magnetic pressure that is nowhere negative. */
 final class FieldSupport {
-  private static final int SAMPLES = 2000;
+  private static final int SAMPLES = 500;
 
   private FieldSupport() {
   }

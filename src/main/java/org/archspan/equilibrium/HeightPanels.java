@@ -24,6 +24,7 @@ final class HeightPanels {
   private static final double FARTHEST_FOLDS = 1e4;
   private static final int MOST_PANELS = 2000;
   private static final ReferenceElement RULE = ReferenceElement.ofDegree(16);
+  private static final ReferenceElement SHORT_RULE = ReferenceElement.ofDegree(7);
 
   private final double[] edges;
 
@@ -148,10 +149,19 @@ final class HeightPanels {
 
   /** Integral of a function between two heights by one rule, in its unit times cm. */
   static double integrate(DoubleUnaryOperator function, double from, double to) {
+    return integrate(RULE, function, from, to);
+  }
+
+  /** The same between neighbouring nodes of a panel, over which the density falls by a fraction of an e-folding. */
+  static double integrateShort(DoubleUnaryOperator function, double from, double to) {
+    return integrate(SHORT_RULE, function, from, to);
+  }
+
+  private static double integrate(ReferenceElement rule, DoubleUnaryOperator function, double from, double to) {
     double half = 0.5 * (to - from);
     double sum = 0.0;
-    for (int q = 0; q <= RULE.degree(); q++) {
-      sum += RULE.weights()[q] * function.applyAsDouble(from + half * (1.0 + RULE.nodes()[q]));
+    for (int q = 0; q <= rule.degree(); q++) {
+      sum += rule.weights()[q] * function.applyAsDouble(from + half * (1.0 + rule.nodes()[q]));
     }
     return half * sum;
   }
