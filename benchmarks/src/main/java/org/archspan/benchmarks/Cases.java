@@ -61,9 +61,11 @@ final class Cases {
   }
 
   static ModeProblem problem(String model, boolean oblique, Parity parity) {
-    Disk disk = disk(model);
+    return problem(disk(model), across(model, oblique), parity);
+  }
+
+  static ModeProblem problem(Disk disk, double across, Parity parity) {
     Equilibrium equilibrium = EquilibriumBuilder.build(disk, TOLERANCE);
-    return new ModeProblem(equilibrium, disk.gasClosure(), disk.cosmicRays().closure(), parity, across(model, oblique),
-        TOLERANCE);
+    return new ModeProblem(equilibrium, disk.gasClosure(), disk.cosmicRays().closure(), parity, across, TOLERANCE);
   }
 }

@@ -2,6 +2,7 @@ package org.archspan.benchmarks;
 
 import java.util.concurrent.TimeUnit;
 import org.archspan.boundary.Parity;
+import org.archspan.disk.Disk;
 import org.archspan.stability.BranchSolver;
 import org.openjdk.jmh.annotations.Benchmark;
 import org.openjdk.jmh.annotations.BenchmarkMode;
@@ -31,12 +32,14 @@ public class FastestBenchmark {
   @Param({"MIRROR", "FLEXING"})
   public Parity parity;
 
+  private Disk disk;
   private BranchSolver solver;
 
   /** Builds the solver. */
   @Setup
   public void prepare() {
-    solver = new BranchSolver(Cases.problem(model, false, parity));
+    disk = Cases.disk(model);
+    solver = new BranchSolver(Cases.problem(disk, 0.0, parity));
   }
 
   /** On a solver that knows its mesh. */
@@ -48,7 +51,7 @@ public class FastestBenchmark {
   /** Everything from the disk on: equilibrium, mesh, search, proof. */
   @Benchmark
   public double fromTheDisk() {
-    return new BranchSolver(Cases.problem(model, false, parity)).fastest(0, 0.0, Double.POSITIVE_INFINITY, 0.0)
+    return new BranchSolver(Cases.problem(disk, 0.0, parity)).fastest(0, 0.0, Double.POSITIVE_INFINITY, 0.0)
         .orElseThrow().growthRate();
   }
 }
