@@ -51,7 +51,7 @@ final class ModeCommand extends ModelCommand {
       new FigureFiles(common.out, common.overwrite).mode(mode, equilibrium, table, model.units());
     }
     print(() -> ResultJson.mode(echo(model), mode, table, model.units()),
-        () -> ModeText.text(model.title(), mode, equilibrium, model.units(), width()));
+        () -> ModeText.text(model.title(), model.disk(), mode, equilibrium, model.units(), width()));
   }
 
   private Parity parity(Equilibrium equilibrium) {

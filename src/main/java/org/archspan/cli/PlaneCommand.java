@@ -37,6 +37,6 @@ final class PlaneCommand extends ModelCommand {
       new FigureFiles(common.out, common.overwrite).plane(plane, PlaneTable.of(plane, model.units()), model.units());
     }
     print(() -> ResultJson.plane(echo(model), plane, model.units()),
-        () -> PlaneText.text(model.title(), plane, model.units(), width()));
+        () -> PlaneText.text(model.title(), model.disk(), equilibrium, plane, model.units(), width()));
   }
 }

@@ -34,6 +34,17 @@ public final class Assumptions {
     return lines;
   }
 
+  /** A text that opens with the title and what holds for every wave. */
+  static TextBlock block(String title, Disk disk, Equilibrium equilibrium, OutputUnits units, int width) {
+    TextBlock block = new TextBlock(width).heading(title).heading("Assumed");
+    of(disk, equilibrium, 0.0, units).forEach((subject, words) -> {
+      if (!subject.equals("waves")) {
+        block.labelled(subject, words);
+      }
+    });
+    return block;
+  }
+
   private static String gas(Disk disk, Equilibrium equilibrium, OutputUnits units) {
     String kind = "isothermal, " + Numbers.plain(equilibrium.dispersion() / 1e5) + " km/s";
     if (disk.gas() instanceof Gas.Components several) {

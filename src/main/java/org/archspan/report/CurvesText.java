@@ -18,12 +18,7 @@ public final class CurvesText {
   /** The summary, wrapped to a width in characters. */
   public static String text(String title, Disk disk, Equilibrium equilibrium, List<GrowthCurve> curves,
       OutputUnits units, int width) {
-    TextBlock block = new TextBlock(width).heading(title).heading("Assumed");
-    Assumptions.of(disk, equilibrium, 0.0, units).forEach((subject, words) -> {
-      if (!subject.equals("waves")) {
-        block.labelled(subject, words);
-      }
-    });
+    TextBlock block = Assumptions.block(title, disk, equilibrium, units, width);
     block.heading("Growth curves");
     if (curves.isEmpty()) {
       return block.sentence("No branch grows at any wavelength of the range.").text();

@@ -16,12 +16,7 @@ public final class EquilibriumText {
 
   /** The summary, wrapped to a width in characters. */
   public static String text(String title, Disk disk, Equilibrium equilibrium, OutputUnits units, int width) {
-    TextBlock block = new TextBlock(width).heading(title).heading("Assumed");
-    Assumptions.of(disk, equilibrium, 0.0, units).forEach((subject, words) -> {
-      if (!subject.equals("waves")) {
-        block.labelled(subject, words);
-      }
-    });
+    TextBlock block = Assumptions.block(title, disk, equilibrium, units, width);
     block.heading("Base state")
         .labelled("scale height", Numbers.length(equilibrium.scaleHeight(), units))
         .labelled("column", Numbers.plain(units.surfaceDensity(equilibrium.surfaceDensity())) + " "

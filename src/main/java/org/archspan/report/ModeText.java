@@ -3,6 +3,7 @@ package org.archspan.report;
 import java.util.ArrayList;
 import java.util.List;
 import org.archspan.boundary.Parity;
+import org.archspan.disk.Disk;
 import org.archspan.equilibrium.Equilibrium;
 import org.archspan.stability.EigenMode;
 import org.archspan.units.OutputUnits;
@@ -15,8 +16,9 @@ public final class ModeText {
   }
 
   /** The summary, wrapped to a width in characters. */
-  public static String text(String title, EigenMode mode, Equilibrium equilibrium, OutputUnits units, int width) {
-    TextBlock block = new TextBlock(width).heading(title).heading("Mode");
+  public static String text(String title, Disk disk, EigenMode mode, Equilibrium equilibrium, OutputUnits units,
+      int width) {
+    TextBlock block = Assumptions.block(title, disk, equilibrium, units, width).heading("Mode");
     String parity = switch (mode.parity()) {
       case MIRROR -> "mirror-symmetric about the midplane";
       case FLEXING -> "flexing the midplane";

@@ -1,5 +1,7 @@
 package org.archspan.report;
 
+import org.archspan.disk.Disk;
+import org.archspan.equilibrium.Equilibrium;
 import org.archspan.spacing.PlaneResult;
 import org.archspan.units.OutputUnits;
 
@@ -9,7 +11,8 @@ public final class PlaneText {
   }
 
   /** The summary, wrapped to a width in characters. */
-  public static String text(String title, PlaneResult plane, OutputUnits units, int width) {
+  public static String text(String title, Disk disk, Equilibrium equilibrium, PlaneResult plane, OutputUnits units,
+      int width) {
     int bestAlong = 0;
     int bestAcross = 0;
     double limit = 0.0;
@@ -22,7 +25,7 @@ public final class PlaneText {
         }
       }
     }
-    TextBlock block = new TextBlock(width).heading(title).heading("Plane of wavenumbers");
+    TextBlock block = Assumptions.block(title, disk, equilibrium, units, width).heading("Plane of wavenumbers");
     double best = plane.growthRate()[bestAlong][bestAcross];
     if (best == 0.0) {
       block.sentence("No wave grows on this grid.");

@@ -3,11 +3,14 @@ package org.archspan.spacing;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import org.archspan.boundary.Parity;
 import org.archspan.boundary.TopBoundary;
 import org.archspan.disk.Disk;
 import org.archspan.disk.RefusedModelException;
 import org.archspan.equilibrium.Equilibrium;
+import org.archspan.stability.GrowthPoint;
 import org.archspan.stability.Peak;
+import org.archspan.stability.UnsolvedException;
 
 /** How much each mode owes to the upper end of the domain: the same search in a domain 1.5 times as tall. */
 final class DomainInfluence {
@@ -16,7 +19,7 @@ final class DomainInfluence {
   static final double HELD = 0.05;
   private static final int MORE_BRANCHES = 4;
 
-  private final List<BranchSearch.Found> taller;
+  private final Optional<BranchSearch> taller;
   private final boolean open;
 
   DomainInfluence(Disk disk, Equilibrium equilibrium, SearchOptions options, WaveRange range) {
@@ -24,18 +27,29 @@ final class DomainInfluence {
     taller = search(disk, equilibrium, options, range);
   }
 
-  private static List<BranchSearch.Found> search(Disk disk, Equilibrium equilibrium, SearchOptions options,
+  /** The search in the taller domain; empty where there is no such domain. */
+  private static Optional<BranchSearch> search(Disk disk, Equilibrium equilibrium, SearchOptions options,
       WaveRange range) {
     double top = equilibrium.bottom() + TALLER * (equilibrium.top() - equilibrium.bottom());
     Equilibrium stretched = equilibrium.withTop(top);
-    if (stretched.top() < top) {
-      return List.of();
+    if (stretched.top() < top || !(stretched.at(top).magneticPerMass() >= 0.0)) {
+      return Optional.empty();
     }
     try {
-      return new BranchSearch(disk, stretched, options, range, options.branches() + MORE_BRANCHES).found();
-    } catch (RefusedModelException impossible) {
-      return List.of();
+      return Optional.of(new BranchSearch(disk, stretched, options, range, options.branches() + MORE_BRANCHES));
+    } catch (RefusedModelException | UnsolvedException impossible) {
+      return Optional.empty();
     }
+  }
+
+  /** The edge of the continuum above an open top: what the taller domain changes is its error. */
+  BranchPeak judgeHalo(GrowthPoint edge, Parity parity, double crossWavenumber) {
+    Optional<GrowthPoint> other = taller.flatMap(BranchSearch::halo);
+    double growthChange = other.map(point -> point.growthRate() / edge.growthRate() - 1.0).orElse(Double.NaN);
+    double wavelengthChange = other.map(point -> edge.wavenumber() / point.wavenumber() - 1.0).orElse(Double.NaN);
+    return new BranchPeak(parity, 0, edge.wavenumber(), crossWavenumber, edge.growthRate(),
+        edge.relativeError() + Math.abs(growthChange), edge.relativeError() + Math.abs(wavelengthChange), -1,
+        Double.POSITIVE_INFINITY, Double.NaN, HeldBy.HALO, growthChange, wavelengthChange);
   }
 
   /** Every peak with what holds it. */
@@ -57,11 +71,11 @@ final class DomainInfluence {
       wavelengthChange = peak.wavenumber() / match.get().wavenumber() - 1.0;
     }
     boolean lid = !(Math.abs(growthChange) <= HELD && Math.abs(wavelengthChange) <= HELD);
-    double truncation = open && match.isPresent() ? 1.0 : 0.0;
+    boolean truncated = open && match.isPresent();
     return new BranchPeak(branch.parity(), peak.order(), peak.wavenumber(),
         branch.solver().problem().crossWavenumber(), peak.growthRate(),
-        peak.growthError() + (truncation > 0.0 ? Math.abs(growthChange) : 0.0),
-        peak.wavelengthError() + (truncation > 0.0 ? Math.abs(wavelengthChange) : 0.0), peak.unstableModes(),
+        peak.growthError() + (truncated ? Math.abs(growthChange) : 0.0),
+        peak.wavelengthError() + (truncated ? Math.abs(wavelengthChange) : 0.0), peak.unstableModes(),
         peak.mode().centroidHeight(), peak.mode().columnContrast(), lid ? HeldBy.LID : HeldBy.DISK, growthChange, wavelengthChange);
   }
 
@@ -69,7 +83,7 @@ final class DomainInfluence {
   private Optional<Peak> match(BranchSearch.Found branch) {
     Peak best = null;
     double greatest = 0.0;
-    for (BranchSearch.Found candidate : taller) {
+    for (BranchSearch.Found candidate : taller.map(BranchSearch::found).orElse(List.of())) {
       if (candidate.parity() == branch.parity()) {
         double overlap = ShapeOverlap.of(branch.peak().mode(), candidate.peak().mode());
         if (overlap > greatest) {

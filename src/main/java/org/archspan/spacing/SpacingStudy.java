@@ -35,9 +35,10 @@ public final class SpacingStudy {
     double residual = ForceBalance.required(equilibrium);
     WaveRange range = WaveRange.of(options, equilibrium);
     BranchSearch search = new BranchSearch(disk, equilibrium, options, range, options.branches());
-    List<BranchPeak> branches = new DomainInfluence(disk, equilibrium, options, range).judge(search.found()).stream()
+    DomainInfluence influence = new DomainInfluence(disk, equilibrium, options, range);
+    List<BranchPeak> branches = influence.judge(search.found()).stream()
         .sorted(Comparator.comparingDouble(BranchPeak::growthRate).reversed()).toList();
-    Optional<BranchPeak> fastest = fastest(branches, search, range);
+    Optional<BranchPeak> fastest = fastest(branches, search, influence, range);
     double gatheringHeight = options.gatheringHeight().resolve(equilibrium.scaleHeight());
     Optional<Integer> spacing = gathering(branches, equilibrium.bottom() + gatheringHeight);
     Optional<CloudComplex> complex = spacing.map(branches::get).or(() -> fastest)
@@ -49,13 +50,13 @@ public final class SpacingStudy {
   }
 
   /** The fastest branch, or the continuum of the atmosphere above where that is faster. */
-  private static Optional<BranchPeak> fastest(List<BranchPeak> branches, BranchSearch search, WaveRange range) {
+  private static Optional<BranchPeak> fastest(List<BranchPeak> branches, BranchSearch search,
+      DomainInfluence influence, WaveRange range) {
     Optional<BranchPeak> discrete = branches.stream().findFirst();
     Optional<GrowthPoint> halo = search.halo()
         .filter(edge -> edge.growthRate() >= discrete.map(BranchPeak::growthRate).orElse(0.0));
-    return halo.map(edge -> new BranchPeak(search.solvers().get(0).problem().parity(), 0, edge.wavenumber(),
-        range.crossWavenumber(), edge.growthRate(), edge.relativeError(), edge.relativeError(), -1,
-        Double.POSITIVE_INFINITY, Double.NaN, HeldBy.HALO, 0.0, 0.0)).or(() -> discrete);
+    return halo.map(edge -> influence.judgeHalo(edge, search.solvers().get(0).problem().parity(),
+        range.crossWavenumber())).or(() -> discrete);
   }
 
   private static Optional<Integer> gathering(List<BranchPeak> branches, double highestCentroid) {
