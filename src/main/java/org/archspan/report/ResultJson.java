@@ -9,6 +9,7 @@ import org.archspan.equilibrium.ForceBalance;
 import org.archspan.spacing.PlaneResult;
 import org.archspan.stability.EigenMode;
 import org.archspan.stability.GrowthCurve;
+import org.archspan.stability.WorkTerms;
 import org.archspan.table.Column;
 import org.archspan.table.Table;
 import org.archspan.units.OutputUnits;
@@ -57,7 +58,17 @@ public final class ResultJson {
         .put("wavelength", units.length(2.0 * Math.PI / mode.wavenumber()), units.length())
         .put("growth-rate", units.rate(mode.growthRate()), "1/" + units.time())
         .put("centroid-height", units.length(mode.centroidHeight()), units.length())
-        .put("column-contrast", mode.columnContrast()).put("profile", columns(table)).text();
+        .put("column-contrast", mode.columnContrast()).put("work", work(mode.work(), units)).put("profile", columns(table)).text();
+  }
+
+  private static Json work(WorkTerms work, OutputUnits units) {
+    double square = units.secondsPerTime() * units.secondsPerTime();
+    return new Json().put("unit", "1/" + units.time() + "^2")
+        .put("weight", work.weight() * square).put("stratification", work.stratification() * square)
+        .put("field-tension", work.fieldTension() * square).put("field-compression", work.fieldCompression() * square)
+        .put("gas-compression", work.gasCompression() * square)
+        .put("cosmic-ray-compression", work.cosmicRayCompression() * square)
+        .put("top-surface", work.topSurface() * square).put("sum", work.sum() * square);
   }
 
   /** Growth over the plane of wavenumbers. */

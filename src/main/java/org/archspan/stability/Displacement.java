@@ -28,6 +28,7 @@ final class Displacement {
 
   private double growth;
   private double kx;
+  private double ky;
   private double decay;
 
   Displacement(Atmosphere atmosphere, PressureResponse response) {
@@ -46,12 +47,13 @@ final class Displacement {
    *
    * @param newGrowth s
    * @param newKx     along the field
-   * @param ky        across it
+   * @param newKy     across it
    * @param newDecay  decay rate of zeta above an open top, 0 otherwise
    */
-  void complete(double newGrowth, double newKx, double ky, double newDecay) {
+  void complete(double newGrowth, double newKx, double newKy, double newDecay) {
     growth = newGrowth;
     kx = newKx;
+    ky = newKy;
     decay = newDecay;
     response.evaluate(growth, kx);
     differentiate();
@@ -158,6 +160,44 @@ final class Displacement {
     verticalSlope[last] = 0.5 * atmosphere.inverseScaleHeight[last];
     horizontal(last, last + 1, ky);
     slopes(last, last + 1, 1.0);
+  }
+
+  /**
+   * The terms of the form along the vector, over its inertia, with the sign of their part in s^2.
+   *
+   * @param topSurface coefficient of zeta^2 at a free surface, 0 without one
+   */
+  WorkTerms work(double topSurface) {
+    int last = atmosphere.nodes() - 1;
+    double[] sums = new double[7];
+    addWork(sums, 0, last + 1, 1.0);
+    if (decay > 0.0) {
+      double below = verticalSlope[last];
+      verticalSlope[last] = (0.5 * atmosphere.inverseScaleHeight[last] - decay) * zeta[last];
+      horizontal(last, last + 1, ky);
+      addWork(sums, last, last + 1, 0.5 / (decay * atmosphere.weight[last]));
+      verticalSlope[last] = below;
+      horizontal(last, last + 1, ky);
+    }
+    double inertia = sums[6];
+    return new WorkTerms(-sums[0] / inertia, -sums[1] / inertia, -sums[2] / inertia, -sums[3] / inertia,
+        -sums[4] / inertia, -sums[5] / inertia, -topSurface * zeta[last] * zeta[last] / inertia);
+  }
+
+  private void addWork(double[] sums, int from, int to, double factor) {
+    for (int i = from; i < to; i++) {
+      double w = factor * atmosphere.weight[i];
+      double d = divergence[i];
+      double perpendicular = d - kx * along[i];
+      double sideways = across[i] * across[i] + zeta[i] * zeta[i];
+      sums[0] += w * response.gas * atmosphere.gasPerMass[i] * d * d;
+      sums[1] += w * response.cosmicRay * atmosphere.cosmicRayPerMass[i] * d * d;
+      sums[2] += w * atmosphere.alfvenSquared[i] * perpendicular * perpendicular;
+      sums[3] += w * kx * kx * atmosphere.alfvenSquared[i] * sideways;
+      sums[4] -= w * 2.0 * atmosphere.gravity[i] * zeta[i] * d;
+      sums[5] += w * atmosphere.fall[i] * zeta[i] * zeta[i];
+      sums[6] += w * (along[i] * along[i] + sideways);
+    }
   }
 
   /** Relative rounding error of a growth rate: terms of this size cancel in the form. */

@@ -21,8 +21,10 @@ import org.archspan.boundary.Parity;
  * @param kineticEnergy   rho (X^2 + Y^2 + Z^2) over its maximum, dimensionless, shape [n]
  * @param centroidHeight  height of the kinetic-energy centroid, cm
  * @param columnContrast  amplitude of delta Sigma / Sigma, dimensionless
+ * @param work            what drives the mode and what resists it
  */
 public record EigenMode(Parity parity, int order, double wavenumber, double crossWavenumber, double growthRate,
     double[] height, double[] along, double[] across, double[] vertical, double[] divergence,
-    double[] densityContrast, double[] kineticEnergy, double centroidHeight, double columnContrast) {
+    double[] densityContrast, double[] kineticEnergy, double centroidHeight, double columnContrast,
+    WorkTerms work) {
 }

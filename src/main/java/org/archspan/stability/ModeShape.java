@@ -109,6 +109,14 @@ final class ModeShape {
     }
     return new EigenMode(solver.problem().parity(), order, wavenumber, solver.problem().crossWavenumber(), growthRate,
         values[0], values[1], values[2], values[3], values[4], values[5], values[6], centroidHeight(),
-        columnContrast());
+        columnContrast(), work());
+  }
+
+  private WorkTerms work() {
+    WorkTerms scaled = displacement.work(solver.checking().stiffness().top().surface());
+    double square = 1.0 / (solver.scales().time() * solver.scales().time());
+    return new WorkTerms(scaled.gasCompression() * square, scaled.cosmicRayCompression() * square,
+        scaled.fieldCompression() * square, scaled.fieldTension() * square, scaled.weight() * square,
+        scaled.stratification() * square, scaled.topSurface() * square);
   }
 }

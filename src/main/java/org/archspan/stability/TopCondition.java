@@ -56,4 +56,9 @@ final class TopCondition {
   double decay() {
     return decay;
   }
+
+  /** Coefficient of zeta^2 at a free surface, 0 for the other conditions. */
+  double surface() {
+    return boundary == TopBoundary.FREE ? entry : 0.0;
+  }
 }

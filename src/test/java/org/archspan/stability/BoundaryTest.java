@@ -85,6 +85,18 @@ class BoundaryTest {
     assertThat(slope).isCloseTo(difference, within(1e-7 * Math.max(1.0, Math.abs(slope))));
   }
 
+  /** The work terms count what lies above an open top. */
+  @ParameterizedTest
+  @CsvSource({"MIRROR, 800", "FLEXING, 3500"})
+  void workAboveAnOpenTopCounts(Parity parity, double wavelength) {
+    ModeProblem open = TestDisks.problem(peaked(Optional.of(Height.centimetres(2500.0 * TestDisks.PC)),
+        TopBoundary.OPEN), parity, 0.0, 1e-9);
+    EigenMode mode = new BranchSolver(open).mode(2.0 * Math.PI / (wavelength * TestDisks.PC), 0).orElseThrow();
+    double square = mode.growthRate() * mode.growthRate();
+    // 1e-8: the vector belongs to a growth rate within 1e-7 of the root, and the sum errs by its square
+    assertThat(mode.work().sum()).isCloseTo(square, within(1e-8 * mode.work().weight()));
+  }
+
   private static double s(ModeSolver solver, double k) {
     return solver.growth(k, 0, Double.NaN).orElseThrow().growth();
   }
