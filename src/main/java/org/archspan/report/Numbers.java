@@ -54,12 +54,15 @@ public final class Numbers {
     return new BigDecimal(value).round(new MathContext(6)).stripTrailingZeros().toPlainString();
   }
 
-  /** A relative error, dimensionless, rounded up to a power of ten; nothing below 1e-12 is told apart. */
+  /**
+   * A relative error, dimensionless, rounded up to a power of ten. Nothing below 1e-8 is told apart: no reader needs it, and
+   * the JSON document has the digits.
+   */
   public static String error(double value) {
     if (Double.isNaN(value)) {
       return "not known";
     }
-    return "1e" + (int) Math.max(-12, Math.ceil(Math.log10(Math.max(value, 1e-300)) - 1e-9));
+    return "1e" + (int) Math.max(-8, Math.ceil(Math.log10(Math.max(value, 1e-300)) - 1e-9));
   }
 
   /** A length (cm) with unit; kiloparsecs where parsecs would be thousands. */

@@ -18,7 +18,9 @@ final class ModeSolver {
   private static final int MOST_REFINEMENTS = 24;
   private static final int NODES_PER_HALF_WAVE = 4;
   private static final double HAIR = 1e-9;
-  private static final double CROWDING_MARGIN = 0.8;
+  /** A mesh is refined to this share of the tolerance, so that warm starts beside its limit do not miss it. */
+  private static final double RESERVE = 0.5;
+  private static final double CROWDING_MARGIN = 0.95;
   private static final double SMALL_CORRECTION = 1e-4;
   private static final double ROUNDING_OF_SQUARE = 1e-12;
 
@@ -187,7 +189,7 @@ final class ModeSolver {
     double start = guess;
     for (int refinement = 0; refinement <= MOST_REFINEMENTS; refinement++) {
       GrowthRoot root = Double.isNaN(start) ? null : warmStart.find(kx, order, floor, ceiling, start);
-      if (root == null || !goodEnough(root)) {
+      if (root == null || !goodEnough(root, 1.0)) {
         double s = RootFinder.find(growthAxis(working, kx), order, floor, ceiling, start);
         if (Double.isNaN(s)) {
           return Optional.empty();
@@ -198,7 +200,7 @@ final class ModeSolver {
         }
         root = check(kx, order, floor, ceiling, s);
       }
-      if (goodEnough(root)) {
+      if (goodEnough(root, RESERVE)) {
         return Optional.of(root);
       }
       start = root.growth();
@@ -237,8 +239,9 @@ final class ModeSolver {
     return new GrowthRoot(kx, better, checking.slope(), error);
   }
 
-  private boolean goodEnough(GrowthRoot root) {
-    return root.error() <= problem.tolerance() || lostInRounding(root);
+  /** Whether the error meets a share of the tolerance, or drowns in rounding. */
+  private boolean goodEnough(GrowthRoot root, double share) {
+    return root.error() <= share * problem.tolerance() || lostInRounding(root);
   }
 
   /** Close to the margin s^2 itself drowns in rounding; a finer mesh does not help, and the error says so. */

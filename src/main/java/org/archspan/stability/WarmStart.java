@@ -33,7 +33,7 @@ final class WarmStart {
    * @return null when the guess does not lead to an isolated root of that order
    */
   GrowthRoot find(double kx, int order, double floor, double ceiling, double guess) {
-    double close = 0.25 * Math.sqrt(tolerance);
+    double close = 0.1 * Math.sqrt(tolerance);
     double x = guess;
     for (int step = 0; step < MOST_STEPS; step++) {
       if (!(x > floor && x < ceiling)) {

@@ -33,7 +33,7 @@ class NumbersTest {
   }
 
   @ParameterizedTest
-  @CsvSource({"3e-9, 1e-8", "1e-8, 1e-8", "0, 1e-12", "0.02, 1e-1", "NaN, not known"})
+  @CsvSource({"3e-9, 1e-8", "1e-8, 1e-8", "0, 1e-8", "2e-10, 1e-8", "0.02, 1e-1", "NaN, not known"})
   void errorsAreBounds(double error, String text) {
     assertThat(Numbers.error(error)).isEqualTo(text);
   }
