@@ -20,6 +20,11 @@ public record CosmicRayClosure(double adiabaticIndex, double diffusivity) {
     }
   }
 
+  /** Whether they diffuse, but not at once: slow growth then finds them softer than fast growth. */
+  public boolean leaks() {
+    return diffusivity > 0.0 && diffusivity < Double.POSITIVE_INFINITY;
+  }
+
   /** Cosmic rays without pressure response: Parker's closure. */
   public static CosmicRayClosure instantDiffusion() {
     return new CosmicRayClosure(4.0 / 3.0, Double.POSITIVE_INFINITY);

@@ -15,6 +15,8 @@ import java.util.OptionalDouble;
 record FastestMode(Optional<GrowthRoot> root, double wavelengthError, double bound, int intervals) {
   /** The proof leaves this relative gap above the peak of order 0; its cost rises as the logarithm of it. */
   private static final double GAP = 1e-6;
+  /** The same where cosmic rays diffuse at a finite rate: they are taken as soft as at the short end of an interval. */
+  private static final double DIFFUSING_GAP = 1e-4;
   /** For higher orders, whose interval bound is of first order, the cost rises as its inverse square root. */
   private static final double HIGHER_GAP = 1e-2;
   private static final double[] FIRST_TRIES = {0.5, 0.3, 0.7, 0.15, 0.85, 0.07, 0.03, 0.93, 0.015};
@@ -38,11 +40,8 @@ record FastestMode(Optional<GrowthRoot> root, double wavelengthError, double bou
     WavenumberCover cover = new WavenumberCover(solver, order);
     Optional<GrowthRoot> peak = firstVisible(solver, order, lowest, end).map(search::climb);
     for (int climb = 0; climb < MOST_CLIMBS; climb++) {
-      double known = Math.max(haloPeak, peak.map(GrowthRoot::growth).orElse(0.0));
-      if (known == 0.0) {
-        return new FastestMode(Optional.empty(), 0.0, 0.0, 0);
-      }
-      double bound = known * (1.0 + (order == 0 ? GAP : HIGHER_GAP));
+      double known = Math.max(haloPeak, peak.map(GrowthRoot::growth).orElse(solver.slowest()));
+      double bound = known * (1.0 + gap(solver, order));
       OptionalDouble better = cover.violation(bound, lowest, end);
       if (better.isEmpty()) {
         return peak.isEmpty() ? new FastestMode(peak, 0.0, bound, cover.intervals())
@@ -51,6 +50,13 @@ record FastestMode(Optional<GrowthRoot> root, double wavelengthError, double bou
       peak = solver.growth(better.getAsDouble(), order, bound).map(search::climb);
     }
     throw new UnsolvedException("the growth curve of mode " + order + " has more than " + MOST_CLIMBS + " peaks");
+  }
+
+  private static double gap(ModeSolver solver, int order) {
+    if (order > 0) {
+      return HIGHER_GAP;
+    }
+    return solver.problem().cosmicRays().leaks() ? DIFFUSING_GAP : GAP;
   }
 
   private static Optional<GrowthRoot> firstVisible(ModeSolver solver, int order, double lowest, double end) {

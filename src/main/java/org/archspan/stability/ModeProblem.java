@@ -38,6 +38,12 @@ public record ModeProblem(Equilibrium equilibrium, GasClosure gas, CosmicRayClos
     return new ModeProblem(equilibrium, gas, cosmicRays, other, crossWavenumber, tolerance);
   }
 
+  /** The same problem for growth so slow that the cosmic rays diffuse meanwhile. */
+  ModeProblem withDiffusedCosmicRays() {
+    return new ModeProblem(equilibrium, gas, new CosmicRayClosure(cosmicRays.adiabaticIndex(),
+        Double.POSITIVE_INFINITY), parity, crossWavenumber, tolerance);
+  }
+
   boolean bottomFixed() {
     return parity != Parity.FLEXING;
   }

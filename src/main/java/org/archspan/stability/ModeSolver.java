@@ -264,10 +264,19 @@ final class ModeSolver {
     };
   }
 
-  /** Shortest wave at which more than {@code order} modes grow, as a wavenumber; 0 when there is none. */
+  /**
+   * Shortest wave at which more than {@code order} modes grow, as a wavenumber; 0 when there is none. Towards the margin
+   * growth leaves cosmic rays all the time to diffuse, however slowly they do; only then does the number of modes never
+   * rise towards shorter waves.
+   */
   double marginalWavenumber(int order) {
     if (fastestPossible == 0.0) {
       return 0.0;
+    }
+    if (problem.cosmicRays().leaks()) {
+      ModeSolver diffused = new ModeSolver(problem.withDiffusedCosmicRays());
+      diffused.discretise(mesh());
+      return diffused.marginalWavenumber(order);
     }
     double high = shortestUnstable * (1.0 + HAIR);
     double low = 1e-6 * high;
