@@ -1,5 +1,6 @@
 package org.archspan.figure;
 
+import java.awt.BasicStroke;
 import java.awt.Graphics2D;
 import java.awt.geom.Rectangle2D;
 import java.util.function.ToDoubleFunction;
@@ -65,6 +66,11 @@ public final class EquilibriumFigure implements Figure {
     plot.add(pressures(), 5);
     plot.add(field(), 4);
     plot.add(gravity(), 3);
+    for (Object panel : plot.getSubplots()) {
+      ((XYPlot) panel).setDomainGridlinesVisible(true);
+      ((XYPlot) panel).setDomainGridlinePaint(style.faint());
+      ((XYPlot) panel).setDomainGridlineStroke(new BasicStroke(0.3f));
+    }
     Plots.chart(plot, true, style).draw(graphics, area);
   }
 
@@ -98,9 +104,9 @@ public final class EquilibriumFigure implements Figure {
   }
 
   private XYPlot field() {
-    ValueAxis strength = Plots.axis("field (" + units.field() + ")", style);
+    ValueAxis strength = Plots.axis("field (" + Plots.printed(units.field()) + ")", style);
     XYPlot panel = Plots.plot(null, strength, style);
-    add(panel, "field strength", 2, state -> units.field(state.fieldStrength()));
+    add(panel, "field strength", 5, state -> units.field(state.fieldStrength()));
     NumberAxis speed = Plots.axis("Alfv\u00e9n speed (km/s)", style);
     panel.setRangeAxis(1, speed);
     int last = panel.getDatasetCount();
@@ -125,7 +131,9 @@ public final class EquilibriumFigure implements Figure {
     ValueAxis axis = Plots.axis("g (10" + DecadeAxis.superscript(decade) + " cm s\u207b\u00b2)", style);
     XYPlot panel = Plots.plot(null, axis, style);
     panel.setDataset(0, Plots.curve("gravity", height, values(state -> state.gravity() / scale)));
-    panel.setRenderer(0, new CurveRenderer(style, 0, 1.2).thin(style.ink()));
+    CurveRenderer renderer = new CurveRenderer(style, 0, 1.2).thin(style.ink());
+    renderer.setDefaultSeriesVisibleInLegend(false);
+    panel.setRenderer(0, renderer);
     axis.setRange(0.0, 1.12 * greatest / scale);
     return panel;
   }

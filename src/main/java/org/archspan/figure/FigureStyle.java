@@ -17,10 +17,11 @@ public record FigureStyle(boolean dark, double fontSize) {
   static final double PAGE = 180.0 / 25.4 * 72.0;
 
   private static final Color[] ON_LIGHT = {new Color(0x1F4E8C), new Color(0xB8531A), new Color(0x1E7F74),
-      new Color(0x7A4B94), new Color(0x8A7A1C)};
+      new Color(0x7A4B94), new Color(0x8A7A1C), new Color(0x4B535E)};
   private static final Color[] ON_DARK = {new Color(0x7FB2F0), new Color(0xF2A269), new Color(0x69CFC0),
-      new Color(0xC79BE0), new Color(0xD8C85A)};
-  private static final float[][] DASHES = {null, {6f, 2.2f}, {1.4f, 1.8f}, {6f, 2f, 1.4f, 2f}, {3f, 1.6f}};
+      new Color(0xC79BE0), new Color(0xD8C85A), new Color(0xB9C2CE)};
+  private static final float[][] DASHES = {null, {6f, 2.2f}, {1.4f, 1.8f}, {6f, 2f, 1.4f, 2f}, {3f, 1.6f},
+      {8f, 2f, 1.4f, 2f, 1.4f, 2f}};
 
   /** Dark on light, 8 points: for journals. */
   public static FigureStyle journal() {

@@ -21,6 +21,8 @@ public final class ModeFigure implements Figure {
   private static final int COLUMNS = 240;
   private static final int ROWS = 240;
   private static final int LINES = 9;
+  /** Room for the legend above, in sizes of the font: beside each other the panels keep one scale of height. */
+  private static final double HEAD = 2.9;
   private static final double LARGEST_BEND = 0.09;
   /** Greatest horizontal strain drawn: beyond 1 the lines would cross themselves. */
   private static final double STEEPEST = 0.45;
@@ -54,10 +56,15 @@ public final class ModeFigure implements Figure {
 
   @Override
   public String description() {
+    double greatest = 0.0;
+    for (int j = 0; j < ROWS; j++) {
+      greatest = Math.max(greatest, Math.abs(profile.vertical(height(j))));
+    }
     return String.format(Locale.ROOT, "Field lines bent by the %s mode of order %d over its density change, two"
-        + " wavelengths of %.4g %s wide; beside it displacement amplitudes and kinetic energy against height",
-        mode.parity().name().toLowerCase(Locale.ROOT), mode.order(), units.length(2.0 * Math.PI / mode.wavenumber()),
-        units.length());
+        + " wavelengths of %s %s wide, drawn for vertical displacements of up to %s %s (linear theory leaves the size"
+        + " open); beside it displacement amplitudes and kinetic energy against height",
+        mode.parity().name().toLowerCase(Locale.ROOT), mode.order(), Plots.short3(units.length(wavelength())),
+        units.length(), Plots.short3(units.length(drawn() * greatest)), units.length());
   }
 
   @Override
@@ -72,12 +79,17 @@ public final class ModeFigure implements Figure {
     double greatest = greatestContrast();
     double w = area.getWidth();
     double h = area.getHeight();
-    XYPlot map = map(greatest);
-    Plots.chart(map, false, style).draw(graphics, new Rectangle2D.Double(area.getX(), area.getY(), 0.53 * w, h));
-    ColourBar.draw(graphics, new Rectangle2D.Double(area.getX() + 0.535 * w, area.getY(), 0.12 * w, h),
+    double head = HEAD * style.fontSize();
+    double top = area.getY() + head;
+    Plots.chart(map(greatest), false, style).draw(graphics,
+        new Rectangle2D.Double(area.getX(), top, 0.53 * w, h - head));
+    ColourBar.draw(graphics, new Rectangle2D.Double(area.getX() + 0.535 * w, top, 0.12 * w, h - head),
         ColourMap.DIVERGING, -1.0, 1.0, "density change \u03b4\u03c1/\u03c1 (of its greatest)", style);
-    Plots.chart(amplitudes(), true, style).draw(graphics,
-        new Rectangle2D.Double(area.getX() + 0.66 * w, area.getY(), 0.34 * w, h));
+    XYPlot amplitudes = amplitudes();
+    Plots.chart(amplitudes, false, style).draw(graphics,
+        new Rectangle2D.Double(area.getX() + 0.66 * w, top, 0.34 * w, h - head));
+    Plots.legend(amplitudes, style, graphics,
+        new Rectangle2D.Double(area.getX() + 0.66 * w, area.getY(), 0.34 * w, head + 0.4 * style.fontSize()));
   }
 
   private double greatestContrast() {
@@ -117,18 +129,22 @@ public final class ModeFigure implements Figure {
     return plot;
   }
 
-  /** Lines that were horizontal before: (x + X sin kx, z + Z cos kx), for a greatest bend that can be seen. */
+  /** Factor on the mode as it is drawn, dimensionless: the greatest bend that can be seen and does not cross itself. */
+  private double drawn() {
+    double vertical = 0.0;
+    double along = 0.0;
+    for (int j = 0; j < ROWS; j++) {
+      vertical = Math.max(vertical, Math.abs(profile.vertical(height(j))));
+      along = Math.max(along, Math.abs(profile.along(height(j))));
+    }
+    double bend = vertical > 0.0 ? LARGEST_BEND * (highest - lowest) / vertical : 0.0;
+    double steepest = along * bend * mode.wavenumber();
+    return bend * Math.min(1.0, STEEPEST / Math.max(STEEPEST, steepest));
+  }
+
+  /** Lines that were horizontal before: (x + X sin kx, z + Z cos kx). */
   private void addFieldLines(XYPlot plot) {
-    double greatest = 0.0;
-    for (int j = 0; j < ROWS; j++) {
-      greatest = Math.max(greatest, Math.abs(profile.vertical(height(j))));
-    }
-    double bend = greatest > 0.0 ? LARGEST_BEND * (highest - lowest) / greatest : 0.0;
-    double steepest = 0.0;
-    for (int j = 0; j < ROWS; j++) {
-      steepest = Math.max(steepest, Math.abs(profile.along(height(j))) * bend * mode.wavenumber());
-    }
-    double amplitude = bend * Math.min(1.0, STEEPEST / Math.max(STEEPEST, steepest));
+    double amplitude = drawn();
     for (int line = 1; line <= LINES; line++) {
       double z = lowest + (highest - lowest) * line / (LINES + 1.0);
       Path2D path = new Path2D.Double();
@@ -150,12 +166,11 @@ public final class ModeFigure implements Figure {
     NumberAxis share = Plots.axis("amplitude, of the greatest", style);
     share.setRange(-1.05, 1.05);
     NumberAxis up = Plots.axis("height (" + units.length() + ")", style);
-    up.setRange(units.length(mode.parity() == Parity.FLOOR ? lowest : 0.0), units.length(highest));
+    up.setRange(units.length(lowest), units.length(highest));
     XYPlot plot = Plots.plot(share, up, style);
-    double from = Math.max(lowest, profile.bottom());
     double[] heights = new double[ROWS + 1];
     for (int i = 0; i <= ROWS; i++) {
-      heights[i] = from + (highest - from) * i / ROWS;
+      heights[i] = lowest + (highest - lowest) * i / ROWS;
     }
     double greatest = Math.max(greatest(profile::vertical, heights),
         Math.max(greatest(profile::along, heights), greatest(profile::across, heights)));

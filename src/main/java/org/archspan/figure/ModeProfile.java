@@ -47,9 +47,9 @@ final class ModeProfile {
     return sign(z, Parity.MIRROR) * vertical.value(inside(z));
   }
 
-  /** Y on this side of the midplane. */
+  /** Y: as X. */
   double across(double z) {
-    return across.value(inside(z));
+    return sign(z, Parity.FLEXING) * across.value(inside(z));
   }
 
   /** Kinetic-energy density over its greatest value, dimensionless. */

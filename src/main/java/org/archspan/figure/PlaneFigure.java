@@ -10,16 +10,20 @@ import org.archspan.spacing.PlaneResult;
 import org.archspan.units.OutputUnits;
 import org.jfree.chart.annotations.XYDataImageAnnotation;
 import org.jfree.chart.annotations.XYShapeAnnotation;
+import org.jfree.chart.annotations.XYTextAnnotation;
 import org.jfree.chart.axis.NumberAxis;
 import org.jfree.chart.axis.NumberTickUnit;
 import org.jfree.chart.plot.XYPlot;
+import org.jfree.chart.renderer.xy.XYItemRenderer;
 import org.jfree.chart.renderer.xy.XYLineAndShapeRenderer;
+import org.jfree.chart.ui.Layer;
 import org.jfree.data.xy.XYSeries;
 import org.jfree.data.xy.XYSeriesCollection;
 
 /** Growth rate over the plane of wavenumbers, with contours, and the limit of infinitely short waves across beside it. */
 public final class PlaneFigure implements Figure {
   private static final int LEVELS = 8;
+  private static final int PIXELS = 240;
 
   private final PlaneResult plane;
   private final OutputUnits units;
@@ -27,6 +31,7 @@ public final class PlaneFigure implements Figure {
   private final double[] along;
   private final double[] across;
   private final double[][] growth;
+  private final GrowthSurface surface;
   private final double greatest;
 
   /** The figure of a plane. */
@@ -43,7 +48,8 @@ public final class PlaneFigure implements Figure {
       growth[i] = Arrays.stream(plane.growthRate()[i]).map(units::rate).toArray();
       best = Math.max(best, Arrays.stream(growth[i]).max().orElse(0.0));
     }
-    greatest = best > 0.0 ? best : 1.0;
+    greatest = best;
+    surface = new GrowthSurface(across, along, growth);
   }
 
   private double scaled(double perCentimetre, double scale) {
@@ -82,55 +88,86 @@ public final class PlaneFigure implements Figure {
     graphics.fill(area);
     double w = area.getWidth();
     double h = area.getHeight();
-    Plots.chart(map(), false, style).draw(graphics, new Rectangle2D.Double(area.getX(), area.getY(), 0.56 * w, h));
+    Plots.chart(map(), false, style).draw(graphics,
+        new Rectangle2D.Double(area.getX(), area.getY(), 0.56 * w, h));
     Plots.chart(limit(), false, style).draw(graphics,
         new Rectangle2D.Double(area.getX() + 0.56 * w, area.getY(), 0.27 * w, h));
-    ColourBar.draw(graphics, new Rectangle2D.Double(area.getX() + 0.83 * w, area.getY(), 0.17 * w, h),
-        ColourMap.SEQUENTIAL, 0.0, greatest, "growth rate (" + units.time() + "\u207b\u00b9)", style);
+    if (greatest > 0.0) {
+      ColourBar.draw(graphics, new Rectangle2D.Double(area.getX() + 0.83 * w, area.getY(), 0.17 * w, h),
+          ColourMap.SEQUENTIAL, 0.0, greatest, "growth rate (" + units.time() + "\u207b\u00b9)", style);
+    }
   }
 
   private XYPlot map() {
-    int n = along.length;
-    int m = across.length;
-    BufferedImage image = new BufferedImage(m, n, BufferedImage.TYPE_INT_RGB);
-    for (int i = 0; i < n; i++) {
-      for (int j = 0; j < m; j++) {
-        image.setRGB(j, n - 1 - i, ColourMap.SEQUENTIAL.colour(growth[i][j] / greatest));
-      }
-    }
-    double halfAcross = 0.5 * (across[1] - across[0]);
-    double halfAlong = 0.5 * (along[1] - along[0]);
-    NumberAxis horizontal = Plots.axis("wavenumber across (" + lengthUnit() + "\u207b\u00b9)", style);
-    horizontal.setRange(across[0], across[m - 1]);
+    NumberAxis horizontal = Plots.axis("across the field, ky (" + lengthUnit() + "\u207b\u00b9)", style);
+    horizontal.setRange(across[0], across[across.length - 1]);
     NumberAxis vertical = alongAxis();
     XYPlot plot = Plots.plot(horizontal, vertical, style);
-    plot.addAnnotation(new XYDataImageAnnotation(image, across[0] - halfAcross, along[0] - halfAlong,
-        across[m - 1] - across[0] + 2.0 * halfAcross, along[n - 1] - along[0] + 2.0 * halfAlong));
-    for (int level = 1; level < LEVELS; level++) {
-      plot.addAnnotation(new XYShapeAnnotation(ContourLines.of(across, along, transposed(), greatest * level / LEVELS),
-          new BasicStroke(0.5f), new java.awt.Color(0xFF, 0xFF, 0xFF, 0xC0)));
+    XYItemRenderer dot = dot();
+    plot.setDataset(greatestPoint());
+    plot.setRenderer(dot);
+    dot.addAnnotation(new XYDataImageAnnotation(image(), across[0], 0.0, across[across.length - 1] - across[0],
+        along[along.length - 1]), Layer.BACKGROUND);
+    for (int level = 1; level < LEVELS && greatest > 0.0; level++) {
+      double rate = greatest * level / LEVELS;
+      contour(dot, rate * rate, 0.5f, new java.awt.Color(0xFF, 0xFF, 0xFF, 0xC0));
     }
-    markGreatest(plot);
+    contour(dot, 0.0, 0.7f, style.ink());
+    sayStable(plot);
     return plot;
   }
 
+  private BufferedImage image() {
+    BufferedImage image = new BufferedImage(PIXELS, PIXELS, BufferedImage.TYPE_INT_RGB);
+    for (int i = 0; i < PIXELS; i++) {
+      double y = along[along.length - 1] * (i + 0.5) / PIXELS;
+      for (int j = 0; j < PIXELS; j++) {
+        double x = across[0] + (across[across.length - 1] - across[0]) * (j + 0.5) / PIXELS;
+        double square = surface.square(x, y);
+        image.setRGB(j, PIXELS - 1 - i, square > 0.0 ? ColourMap.SEQUENTIAL.colour(Math.sqrt(square) / greatest)
+            : style.shade().getRGB());
+      }
+    }
+    return image;
+  }
+
+  private void contour(XYItemRenderer renderer, double square, float width, java.awt.Color colour) {
+    renderer.addAnnotation(new XYShapeAnnotation(ContourLines.of(across, along, surface.square(), square),
+        new BasicStroke(width), colour), Layer.BACKGROUND);
+  }
+
+  /** Where the grid has room for the word: in the middle of a stable plane, else in its upper left corner. */
+  private void sayStable(XYPlot plot) {
+    double x = 0.12 * across[across.length - 1];
+    double y = 0.96 * along[along.length - 1];
+    boolean everywhere = Arrays.stream(growth).allMatch(row -> Arrays.stream(row).allMatch(rate -> rate == 0.0));
+    boolean room = surface.square(2.0 * x, 0.94 * along[along.length - 1]) < 0.0;
+    if (everywhere || room) {
+      XYTextAnnotation word = new XYTextAnnotation("stable", everywhere ? 0.5 * across[across.length - 1] : x,
+          everywhere ? 0.5 * along[along.length - 1] : y);
+      word.setFont(style.smallFont());
+      word.setPaint(style.ink());
+      plot.addAnnotation(word);
+    }
+  }
+
   private NumberAxis alongAxis() {
-    NumberAxis axis = Plots.axis("wavenumber along (" + lengthUnit() + "\u207b\u00b9)", style);
+    NumberAxis axis = Plots.axis("along the field, kx (" + lengthUnit() + "\u207b\u00b9)", style);
     axis.setRange(0.0, along[along.length - 1]);
     return axis;
   }
 
-  private double[][] transposed() {
-    double[][] turned = new double[across.length][along.length];
-    for (int i = 0; i < along.length; i++) {
-      for (int j = 0; j < across.length; j++) {
-        turned[j][i] = growth[i][j];
-      }
-    }
-    return turned;
+  private XYItemRenderer dot() {
+    XYLineAndShapeRenderer dot = new XYLineAndShapeRenderer(false, true);
+    dot.setSeriesShape(0, new Ellipse2D.Double(-2.2, -2.2, 4.4, 4.4));
+    dot.setSeriesPaint(0, java.awt.Color.BLACK);
+    dot.setUseFillPaint(true);
+    dot.setSeriesFillPaint(0, java.awt.Color.WHITE);
+    return dot;
   }
 
-  private void markGreatest(XYPlot plot) {
+  /** The greatest growth on the grid, where anything grows; drawn whole where it lies on the edge. */
+  private XYSeriesCollection greatestPoint() {
     int bestAlong = 0;
     int bestAcross = 0;
     for (int i = 0; i < along.length; i++) {
@@ -141,11 +178,13 @@ public final class PlaneFigure implements Figure {
         }
       }
     }
-    double rx = 0.012 * (across[across.length - 1] - across[0]);
-    double ry = 0.012 * along[along.length - 1];
-    double centre = Math.max(across[0] + rx, Math.min(across[across.length - 1] - rx, across[bestAcross]));
-    plot.addAnnotation(new XYShapeAnnotation(new Ellipse2D.Double(centre - rx, along[bestAlong] - ry,
-        2.0 * rx, 2.0 * ry), new BasicStroke(0.8f), java.awt.Color.BLACK, java.awt.Color.WHITE));
+    XYSeries series = new XYSeries("greatest");
+    if (growth[bestAlong][bestAcross] > 0.0) {
+      double hair = 0.02 * (across[across.length - 1] - across[0]);
+      series.add(Math.max(across[0] + hair, Math.min(across[across.length - 1] - hair, across[bestAcross])),
+          along[bestAlong]);
+    }
+    return new XYSeriesCollection(series);
   }
 
   /** The next smaller 1, 2 or 5 times a power of ten. */
@@ -155,9 +194,9 @@ public final class PlaneFigure implements Figure {
   }
 
   private XYPlot limit() {
-    NumberAxis rate = Plots.axis("limit (" + units.time() + "\u207b\u00b9)", style);
-    rate.setRange(0.0, 1.1 * greatest);
-    rate.setTickUnit(new NumberTickUnit(roundDown(greatest)));
+    NumberAxis rate = Plots.axis("ky \u2192 \u221e (" + units.time() + "\u207b\u00b9)", style);
+    rate.setRange(0.0, greatest > 0.0 ? 1.1 * greatest : 1.0);
+    rate.setTickUnit(new NumberTickUnit(greatest > 0.0 ? roundDown(greatest) : 1.0));
     NumberAxis vertical = alongAxis();
     vertical.setLabel(null);
     vertical.setTickLabelsVisible(false);

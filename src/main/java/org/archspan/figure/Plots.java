@@ -1,6 +1,10 @@
 package org.archspan.figure;
 
 import java.awt.BasicStroke;
+import java.awt.Graphics2D;
+import java.awt.geom.Rectangle2D;
+import java.math.BigDecimal;
+import java.math.MathContext;
 import java.text.DecimalFormat;
 import java.text.DecimalFormatSymbols;
 import java.util.Locale;
@@ -9,11 +13,13 @@ import org.jfree.chart.axis.NumberAxis;
 import org.jfree.chart.axis.NumberTickUnit;
 import org.jfree.chart.axis.TickUnits;
 import org.jfree.chart.axis.ValueAxis;
+import org.jfree.chart.block.RectangleConstraint;
 import org.jfree.chart.plot.Plot;
 import org.jfree.chart.plot.XYPlot;
 import org.jfree.chart.title.LegendTitle;
 import org.jfree.chart.ui.RectangleEdge;
 import org.jfree.chart.ui.RectangleInsets;
+import org.jfree.data.Range;
 import org.jfree.data.xy.DefaultXYDataset;
 
 /** Axes, plots and charts in the common style. */
@@ -85,16 +91,43 @@ final class Plots {
     chart.setBackgroundPaint(style.background());
     chart.setPadding(new RectangleInsets(3.0, 3.0, 3.0, 6.0));
     if (legend) {
-      LegendTitle title = new LegendTitle(plot);
-      title.setItemFont(style.smallFont());
-      title.setItemPaint(style.ink());
-      title.setBackgroundPaint(style.background());
+      LegendTitle title = legend(plot, style);
       title.setPosition(RectangleEdge.TOP);
-      title.setLegendItemGraphicPadding(new RectangleInsets(1.0, 3.0, 1.0, 3.0));
-      title.setItemLabelPadding(new RectangleInsets(0.5, 0.5, 0.5, 5.0));
       chart.addLegend(title);
     }
     return chart;
+  }
+
+  private static LegendTitle legend(Plot plot, FigureStyle style) {
+    LegendTitle title = new LegendTitle(plot);
+    title.setItemFont(style.smallFont());
+    title.setItemPaint(style.ink());
+    title.setBackgroundPaint(style.background());
+    title.setLegendItemGraphicPadding(new RectangleInsets(1.0, 3.0, 1.0, 3.0));
+    title.setItemLabelPadding(new RectangleInsets(0.5, 0.5, 0.5, 5.0));
+    return title;
+  }
+
+  /** The legend of a plot in a place of its own. */
+  static void legend(Plot plot, FigureStyle style, Graphics2D graphics, Rectangle2D area) {
+    LegendTitle title = legend(plot, style);
+    title.arrange(graphics, new RectangleConstraint(area.getWidth(), new Range(0.0, area.getHeight())));
+    title.draw(graphics, area);
+  }
+
+  /** Three significant digits without an exponent. */
+  static String short3(double value) {
+    if (!Double.isFinite(value) || value == 0.0) {
+      return Double.isInfinite(value) ? "\u221e" : "0";
+    }
+    BigDecimal rounded = new BigDecimal(value).round(new MathContext(3));
+    int exponent = rounded.precision() - rounded.scale() - 1;
+    return rounded.setScale(Math.max(0, 2 - exponent)).toPlainString();
+  }
+
+  /** A unit as journals print it. */
+  static String printed(String unit) {
+    return unit.startsWith("u") ? "\u00b5" + unit.substring(1) : unit;
   }
 
   /** One curve. */

@@ -2,7 +2,6 @@ package org.archspan.report;
 
 import java.nio.file.Path;
 import java.util.List;
-import java.util.Optional;
 import java.util.OptionalDouble;
 import org.archspan.equilibrium.Equilibrium;
 import org.archspan.figure.EquilibriumFigure;
@@ -38,7 +37,7 @@ public final class FigureFiles {
   /** Growth curves. */
   public void dispersion(List<GrowthCurve> curves, Table table, OutputUnits units) throws WriteException {
     new OutputFolder().table("growth", table)
-        .figure("growth", new GrowthFigure(curves, Optional.empty(), OptionalDouble.empty(), OptionalDouble.empty(),
+        .figure("growth", new GrowthFigure(curves, List.of(), OptionalDouble.empty(), OptionalDouble.empty(),
             units, FigureStyle.journal()))
         .write(folder, overwrite);
   }

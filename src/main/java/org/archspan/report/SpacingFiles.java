@@ -1,6 +1,7 @@
 package org.archspan.report;
 
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -12,6 +13,7 @@ import org.archspan.figure.ModeFigure;
 import org.archspan.spacing.Arm;
 import org.archspan.spacing.BranchPeak;
 import org.archspan.spacing.GrowthCurves;
+import org.archspan.spacing.HeldBy;
 import org.archspan.spacing.ModeStudy;
 import org.archspan.spacing.SearchOptions;
 import org.archspan.spacing.SpacingResult;
@@ -78,10 +80,21 @@ public final class SpacingFiles {
   }
 
   private GrowthFigure growthFigure(List<GrowthCurve> curves, FigureStyle style) {
-    Optional<GrowthPoint> marked = result.spacingPeak().filter(peak -> peak.wavenumber() > 0.0)
-        .map(SpacingFiles::point);
-    return new GrowthFigure(curves, marked, OptionalDouble.of(result.acrossLimit().growthRate()),
+    return new GrowthFigure(curves, marks(), OptionalDouble.of(result.acrossLimit().growthRate()),
         result.longestStableWavelength(), units, style);
+  }
+
+  /** The mode that sets the spacing, and the fastest where that is another. */
+  private List<GrowthFigure.Mark> marks() {
+    List<GrowthFigure.Mark> marks = new ArrayList<>();
+    result.spacing().map(result.branches()::get).ifPresent(peak -> marks.add(mark("sets the spacing", peak)));
+    result.fastest().filter(peak -> !result.spacingPeak().equals(Optional.of(peak)) || marks.isEmpty())
+        .ifPresent(peak -> marks.add(mark(peak.heldBy() == HeldBy.HALO ? "continuum edge" : "fastest", peak)));
+    return marks;
+  }
+
+  private static GrowthFigure.Mark mark(String name, BranchPeak peak) {
+    return new GrowthFigure.Mark(name, point(peak));
   }
 
   private static GrowthPoint point(BranchPeak peak) {

@@ -9,18 +9,20 @@ import java.io.ByteArrayInputStream;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
-import java.util.Optional;
 import java.util.OptionalDouble;
 import javax.imageio.ImageIO;
 import javax.imageio.ImageReader;
 import javax.imageio.stream.ImageInputStream;
 import javax.xml.parsers.DocumentBuilderFactory;
 import org.archspan.boundary.Parity;
+import org.archspan.spacing.PlaneResult;
 import org.archspan.stability.GrowthCurve;
 import org.archspan.stability.GrowthPoint;
 import org.archspan.units.Constants;
 import org.archspan.units.OutputUnits;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.w3c.dom.Document;
 import org.w3c.dom.Element;
 import org.w3c.dom.NodeList;
@@ -30,7 +32,7 @@ class FigureTest {
     double k = 2.0 * Math.PI / (1000.0 * Constants.PARSEC);
     GrowthPoint slow = new GrowthPoint(0.5 * k, 1e-16, 1e-9, 1);
     GrowthPoint fast = new GrowthPoint(k, 1e-15, 1e-9, 1);
-    return new GrowthFigure(List.of(new GrowthCurve(Parity.MIRROR, 0, 0.0, List.of(slow, fast))), Optional.of(fast),
+    return new GrowthFigure(List.of(new GrowthCurve(Parity.MIRROR, 0, 0.0, List.of(slow, fast))), List.of(new GrowthFigure.Mark("fastest", fast)),
         OptionalDouble.of(1.2e-15), OptionalDouble.of(500.0 * Constants.PARSEC), OutputUnits.galactic(),
         FigureStyle.journal());
   }
@@ -48,7 +50,8 @@ class FigureTest {
       all.append(((Element) texts.item(i)).getTextContent()).append('\n');
     }
     assertThat(all.toString()).contains("wavelength along the field (kpc)").contains("growth rate (Myr\u207b\u00b9)");
-    assertThat(document.getElementsByTagName("title").item(0).getTextContent()).contains("wavelength 1.000 kpc");
+    assertThat(document.getElementsByTagName("title").item(0).getTextContent()).isEqualTo(
+        "Growth rate against wavelength along the field; fastest: 1.00 kpc, growth time 31.7 Myr");
     assertThat(FigureImage.svg(figure())).isEqualTo(svg);
   }
 
@@ -105,6 +108,42 @@ class FigureTest {
       count++;
     }
     assertThat(count).isGreaterThan(100);
+  }
+
+  /** s^2 = 1 - kx + ky/10: on a grid that knows only the growth rate the margin lies where the closed form has it. */
+  @Test
+  void theMarginLiesBetweenThePointsOfTheGrid() {
+    double[] across = {0.0, 1.0, 2.0, 3.0};
+    double[] along = {0.1, 0.3, 0.5, 0.7, 0.9, 1.1, 1.3, 1.5};
+    double[][] growth = new double[along.length][across.length];
+    for (int i = 0; i < along.length; i++) {
+      for (int j = 0; j < across.length; j++) {
+        growth[i][j] = Math.sqrt(Math.max(0.0, 1.0 - along[i] + 0.1 * across[j]));
+      }
+    }
+    GrowthSurface surface = new GrowthSurface(across, along, growth);
+    for (double ky = 0.0; ky <= 3.0; ky += 0.25) {
+      // 1e-12: both are linear there, rounding remains
+      assertThat(surface.square(ky, 1.0 + 0.1 * ky)).isCloseTo(0.0, within(1e-12));
+    }
+    assertThat(surface.square(0.0, 1.4)).isNegative();
+  }
+
+  @Test
+  void aStablePlaneAndAnEmptyCurveAreDrawnAsStable() {
+    double k = 2.0 * Math.PI / (1000.0 * Constants.PARSEC);
+    PlaneResult plane = new PlaneResult(new double[] {k, 2.0 * k}, new double[] {0.0, k}, new double[2][2],
+        new double[2]);
+    assertThat(FigureImage.svg(new PlaneFigure(plane, OutputUnits.galactic(), FigureStyle.journal())))
+        .contains(">stable<").doesNotContain("growth rate (");
+    assertThat(FigureImage.svg(new GrowthFigure(List.of(), List.of(), OptionalDouble.empty(), OptionalDouble.empty(),
+        OutputUnits.galactic(), FigureStyle.journal()))).contains(">nothing grows<");
+  }
+
+  @ParameterizedTest
+  @CsvSource({"1, 1.00", "1137.2, 1140", "0.99999, 1.00", "59.84, 59.8", "0.012345, 0.0123", "0, 0", "Infinity, \u221e"})
+  void namesOfPointsHaveThreeDigitsAndNoExponent(double value, String printed) {
+    assertThat(Plots.short3(value)).isEqualTo(printed);
   }
 
   @Test
