@@ -18,7 +18,8 @@ final class MeshGrading {
 
   /**
    * A first mesh, in scale lengths: its lowest element spans the shortest length over which the base state changes, and
-   * each next one twice as much.
+   * each next one twice as much. At least two elements: between two fixed ends one alone would leave no node that couples
+   * elements, and no vector to refine a root with.
    */
   static Mesh initial(Equilibrium equilibrium, Scales scales, int degree) {
     double bottom = equilibrium.bottom() / scales.length();
@@ -27,7 +28,7 @@ final class MeshGrading {
     for (double landmark : equilibrium.landmarks()) {
       length = Math.min(length, landmark / scales.length());
     }
-    length *= FIRST_LENGTH;
+    length = Math.min(FIRST_LENGTH * length, 0.5 * (top - bottom));
     double[] kinks = equilibrium.kinks().length > MOST_KINKS ? new double[0]
         : Arrays.stream(equilibrium.kinks()).map(z -> z / scales.length()).toArray();
     double[] edges = new double[kinks.length + 2 + (int) Math.ceil(4.0 + Math.log1p((top - bottom) / length) * 2.0)];

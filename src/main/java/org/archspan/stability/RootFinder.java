@@ -69,7 +69,7 @@ final class RootFinder {
       double change = count == DynamicStiffness.INFINITE ? Double.NaN : axis.newtonStep(x);
       double target = x + change;
       if (settled(x, change, target)) {
-        return Math.min(upper, Math.max(lower, target));
+        return Double.isNaN(target) ? 0.5 * (lower + upper) : Math.min(upper, Math.max(lower, target));
       }
       boolean stalled = false;
       if (step % PATIENCE == 0) {

@@ -152,4 +152,20 @@ class InvariantsTest {
     assertThat(real).isBetween(0.9 * limit, limit);
     assertThat(slow).isLessThan(0.9 * real).isGreaterThan(none);
   }
+
+  /** A domain thinner than one element: two elements at least, or no node couples them. The closed form is the judge. */
+  @RepeatedTest(3)
+  void thinDomainsAreSolved(RepetitionInfo repetition) {
+    double top = 0.4 * repetition.getCurrentRepetition();
+    org.archspan.reference.UniformAtmosphere exact = new org.archspan.reference.UniformAtmosphere(8.0, 3.0, 1.0,
+        4.0 / 3.0, Double.POSITIVE_INFINITY);
+    ModeSolver solver = ExactGrowthTest.solver(exact, top, 40.0, 1e-8);
+    double kx = 0.5;
+    double expected = exact.growthRate(kx, 40.0, top, 1);
+    assertThat(expected).isPositive();
+    double found = solver.growth(kx * solver.scales().length(), 0, Double.NaN).orElseThrow().growth()
+        / solver.scales().time();
+    // 1e-8: the tolerance
+    assertThat(found).isCloseTo(expected, within(1e-8 * expected));
+  }
 }
