@@ -11,9 +11,10 @@ import org.archspan.boundary.Parity;
  * @param crossWavenumber     across the field, cm^-1, 0 or more
  * @param growthRate          s^-1, positive
  * @param growthError         estimated relative error of the growth rate, dimensionless
- * @param wavelengthError     estimated relative error of the wavelength, dimensionless
+ * @param wavelengthError     estimated relative error of the wavelength, dimensionless; NaN where the branch ends
+ *                            in the continuum
  * @param unstableModes       number of modes of this parity that grow at this wavelength; -1 where a continuum makes
- *                            the number infinite
+ *                            the number infinite, or where there are too many to count
  * @param centroidHeight      height of the kinetic-energy centroid, cm; infinite for the halo continuum
  * @param columnContrast      surface-density contrast when the midplane layer moves by one scale height, dimensionless; 0 for modes
  *                            that flex the midplane; NaN for the halo continuum

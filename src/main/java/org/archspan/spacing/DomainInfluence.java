@@ -68,7 +68,8 @@ final class DomainInfluence {
     Optional<Peak> match = match(branch);
     if (match.isPresent()) {
       growthChange = match.get().growthRate() / peak.growthRate() - 1.0;
-      wavelengthChange = peak.wavenumber() / match.get().wavenumber() - 1.0;
+      wavelengthChange = peak.wavenumber() == match.get().wavenumber() ? 0.0
+          : peak.wavenumber() / match.get().wavenumber() - 1.0;
     }
     boolean lid = !(Math.abs(growthChange) <= HELD && Math.abs(wavelengthChange) <= HELD);
     boolean truncated = open && match.isPresent();

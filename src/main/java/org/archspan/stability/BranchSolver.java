@@ -84,7 +84,7 @@ public final class BranchSolver {
     return new SlopeCubic(before, last).value(kx);
   }
 
-  /** Number of modes that grow at a wavenumber (cm^-1); -1 where a continuum makes it infinite. */
+  /** Number of modes that grow at a wavenumber (cm^-1); -1 where a continuum makes it infinite, or too large to count. */
   public int unstableModes(double wavenumber) {
     if (haloGrowth(wavenumber) > 0.0) {
       return -1;

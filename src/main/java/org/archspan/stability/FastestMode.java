@@ -8,7 +8,7 @@ import java.util.OptionalDouble;
  *
  * @param root            the peak, on the checking mesh; empty when the branch grows nowhere, or nowhere faster than the
  *                        continuum
- * @param wavelengthError estimated relative error of its wavelength
+ * @param wavelengthError estimated relative error of its wavelength; NaN where the branch ends in the continuum
  * @param bound           growth rate that the branch exceeds nowhere in the range
  * @param intervals       intervals of wavenumber that the proof took
  */
@@ -69,7 +69,10 @@ record FastestMode(Optional<GrowthRoot> root, double wavelengthError, double bou
     return Optional.empty();
   }
 
-  /** Refines the peak on the checking mesh; the shift it asks for is the error of the wavelength. */
+  /**
+   * Refines the peak on the checking mesh; the shift it asks for is the error of the wavelength. A branch that still rises
+   * where it ends in the continuum has no peak to refine, and the error is not known.
+   */
   private static FastestMode polished(ModeSolver solver, int order, GrowthRoot peak, double bound, int intervals,
       double lowest, double end) {
     double k = peak.wavenumber();
@@ -77,14 +80,15 @@ record FastestMode(Optional<GrowthRoot> root, double wavelengthError, double bou
       return new FastestMode(Optional.of(peak), 0.0, bound, intervals);
     }
     double step = 1e-3 * k;
-    Optional<GrowthRoot> beside = solver.growth(k - step, order, peak.growth());
+    Optional<GrowthRoot> beside = solver.growth(k - step, order, peak.growth())
+        .or(() -> solver.growth(k + step, order, peak.growth()));
     GrowthRoot here = solver.growth(k, order, peak.growth()).orElse(peak);
     double workingSlope = solver.workingSlope();
-    if (beside.isEmpty()) {
+    double curvature = beside.map(other -> (here.slope() - other.slope()) / (k - other.wavenumber())).orElse(0.0);
+    double shift = -here.slope() / curvature;
+    if (!(curvature < 0.0 && Math.abs(shift) <= step)) {
       return new FastestMode(Optional.of(here), Double.NaN, bound, intervals);
     }
-    double curvature = (here.slope() - beside.get().slope()) / step;
-    double shift = -here.slope() / curvature;
     double error = Math.abs((workingSlope - here.slope()) / curvature) / k + Math.abs(shift) / k
         + here.error() * here.growth() / Math.abs(curvature * k * k);
     GrowthRoot polished = new GrowthRoot(k + shift, here.growth() + 0.5 * shift * here.slope(), 0.0, here.error());
