@@ -29,7 +29,8 @@ final class PeakSearch {
   }
 
   /**
-   * The local maximum that a start leads to. Its wavenumber is an end of the range where growth rises towards that end;
+   * The local maximum that a start leads to, never slower than the start: a step over a hill into the slope of another is
+   * taken back. Its wavenumber is an end of the range where growth rises towards that end;
    * 0 when it rises towards infinite wavelength.
    */
   GrowthRoot climb(GrowthRoot start) {
@@ -41,7 +42,7 @@ final class PeakSearch {
       if (Math.abs(next - here.wavenumber()) < 1e-3 * FARTHEST * here.wavenumber() || next < FARTHEST * highest) {
         return atEnd(here, rising);
       }
-      Optional<GrowthRoot> there = visible(here, next);
+      Optional<GrowthRoot> there = visible(here, next, rising);
       if (there.isEmpty()) {
         return here;
       }
@@ -53,13 +54,13 @@ final class PeakSearch {
     return here;
   }
 
-  /** The branch at a wavenumber, or as near to it as the branch reaches. */
-  private Optional<GrowthRoot> visible(GrowthRoot here, double wavenumber) {
+  /** The branch at a wavenumber, or as near to it as the branch reaches, on the hill that rises from here. */
+  private Optional<GrowthRoot> visible(GrowthRoot here, double wavenumber, boolean rising) {
     double target = wavenumber;
     for (int step = 0; step < 20; step++) {
       double change = target - here.wavenumber();
       Optional<GrowthRoot> there = solver.growth(target, order, here.growth() + change * here.slope());
-      if (there.isPresent()) {
+      if (there.isPresent() && !(slower(there.get(), here) && there.get().slope() > 0.0 == rising)) {
         return there;
       }
       target = here.wavenumber() + 0.5 * change;
@@ -67,12 +68,17 @@ final class PeakSearch {
     return Optional.empty();
   }
 
+  /** Whether one growth rate lies below another by more than the errors of both. */
+  private static boolean slower(GrowthRoot one, GrowthRoot other) {
+    return one.growth() < other.growth() * (1.0 - SMALLEST_STEP - one.error() - other.error());
+  }
+
   private GrowthRoot atEnd(GrowthRoot here, boolean rising) {
     double end = rising ? highest : lowest;
     return solver.growth(end, order, here.growth()).filter(root -> root.growth() >= here.growth()).orElse(here);
   }
 
-  /** The root of the slope between a rising and a falling point. */
+  /** The root of the slope between a rising and a falling point; of several, one that is no slower than the faster end. */
   private GrowthRoot between(GrowthRoot rising, GrowthRoot falling) {
     GrowthRoot left = rising;
     GrowthRoot right = falling;
@@ -80,7 +86,7 @@ final class PeakSearch {
       SlopeCubic cubic = new SlopeCubic(left, right);
       double margin = 0.5 * SMALLEST_STEP * right.wavenumber();
       double target = cubic.peak();
-      if (step % 8 == 7) {
+      if (step % 8 == 7 || left.slope() < 0.0 || right.slope() > 0.0) {
         target = 0.5 * (left.wavenumber() + right.wavenumber());
       }
       target = Math.min(Math.max(target, left.wavenumber() + margin), right.wavenumber() - margin);
@@ -94,7 +100,7 @@ final class PeakSearch {
       if (settled || nearest <= 2.0 * margin || middle.slope() == 0.0) {
         return middle;
       }
-      if (middle.slope() > 0.0) {
+      if (middle.slope() > 0.0 ? !slower(middle, left) : slower(middle, right)) {
         left = middle;
       } else {
         right = middle;

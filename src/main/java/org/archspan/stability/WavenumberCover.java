@@ -51,11 +51,21 @@ final class WavenumberCover {
         return OptionalDouble.of(middle);
       }
       if (width < NARROWEST * highest || intervals > MOST_INTERVALS) {
-        throw new UnsolvedException("could not prove that nothing grows faster than " + bound
-            + " of the crossing rate near wavenumber " + middle + " per scale height");
+        return ahead(bound, middle, width, highest);
       }
     }
     return OptionalDouble.empty();
+  }
+
+  /** Where the branch rises through the bound, ever narrower intervals end before it does: the violation lies beyond. */
+  private OptionalDouble ahead(double bound, double from, double width, double highest) {
+    for (double step = width; from + step < highest; step *= 2.0) {
+      if (solver.count(bound, from + step, from + step) > order) {
+        return OptionalDouble.of(from + step);
+      }
+    }
+    throw new UnsolvedException("could not prove that nothing grows faster than " + bound
+        + " of the crossing rate near wavenumber " + from + " per scale height");
   }
 
   private boolean below(double bound, double from, double to) {
