@@ -37,7 +37,8 @@ final class TestStates {
     return TestDisks.law(i);
   }
 
-  static Equilibrium build(Gas gas, MagneticField field, CosmicRays cosmicRays, Domain domain, GravityLaw... gravity) {
+  static Equilibrium build(Gas gas, MagneticField field, CosmicRays cosmicRays, Domain domain,
+      GravityLaw... gravity) {
     return EquilibriumBuilder.build(
         new Disk(gas, new GasClosure(1.0), field, cosmicRays, List.of(gravity), domain), 1e-8);
   }
