@@ -13,7 +13,6 @@ import org.archspan.figure.ModeFigure;
 import org.archspan.spacing.Arm;
 import org.archspan.spacing.BranchPeak;
 import org.archspan.spacing.GrowthCurves;
-import org.archspan.spacing.HeldBy;
 import org.archspan.spacing.ModeStudy;
 import org.archspan.spacing.SearchOptions;
 import org.archspan.spacing.SpacingResult;
@@ -89,7 +88,7 @@ public final class SpacingFiles {
     List<GrowthFigure.Mark> marks = new ArrayList<>();
     result.spacing().map(result.branches()::get).ifPresent(peak -> marks.add(mark("sets the spacing", peak)));
     result.fastest().filter(peak -> !result.spacingPeak().equals(Optional.of(peak)) || marks.isEmpty())
-        .ifPresent(peak -> marks.add(mark(peak.heldBy() == HeldBy.HALO ? "continuum edge" : "fastest", peak)));
+        .ifPresent(peak -> marks.add(mark(peak.continuum() ? "continuum edge" : "fastest", peak)));
     return marks;
   }
 

@@ -6,7 +6,6 @@ import org.archspan.equilibrium.Equilibrium;
 import org.archspan.spacing.BranchPeak;
 import org.archspan.spacing.Certificate;
 import org.archspan.spacing.CloudComplex;
-import org.archspan.spacing.HeldBy;
 import org.archspan.spacing.SpacingResult;
 import org.archspan.units.OutputUnits;
 
@@ -52,7 +51,7 @@ public final class SpacingJson {
         .put("growth-time", units.time(peak.growthTime()), units.time())
         .put("wavenumber-times-scale-height", peak.wavenumber() * scaleHeight)
         .put("growth-rate-times-crossing-time", peak.growthRate() * crossingTime)
-        .put("parity", peak.heldBy() == HeldBy.HALO ? null : peak.parity().name().toLowerCase(Locale.ROOT))
+        .put("parity", peak.continuum() ? null : peak.parity().name().toLowerCase(Locale.ROOT))
         .put("mode-order", peak.order())
         .put("relative-error", peak.growthError())
         .put("wavelength-relative-error", peak.wavelengthError())

@@ -120,8 +120,8 @@ public final class SpacingText {
           + Numbers.time(peak.growthTime(), units) + ".";
     }
     String who = result.spacing().isPresent() ? "The fastest mode that gathers the disk's own gas"
-        : peak.heldBy() == HeldBy.HALO ? "The continuum edge of the atmosphere above the disk" : "The fastest mode";
-    String parity = peak.heldBy() == HeldBy.HALO || peak.parity() == Parity.FLOOR ? ""
+        : peak.continuum() ? "The continuum edge of the atmosphere above the disk" : "The fastest mode";
+    String parity = peak.continuum() || peak.parity() == Parity.FLOOR ? ""
         : peak.parity() == Parity.MIRROR ? " (mirror-symmetric about the midplane)" : " (flexing the midplane)";
     return who + parity + " has a wavelength of "
         + Numbers.length(peak.wavelength(), peak.wavelengthError(), units) + " along the field; its growth time is "

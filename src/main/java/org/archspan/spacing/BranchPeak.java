@@ -27,6 +27,11 @@ public record BranchPeak(Parity parity, int order, double wavenumber, double cro
     double growthError, double wavelengthError, int unstableModes, double centroidHeight, double columnContrast,
     HeldBy heldBy, double tallerGrowthChange, double tallerWavelengthChange) {
 
+  /** Whether this is the edge of the continuum above an open top rather than a mode. */
+  public boolean continuum() {
+    return Double.isInfinite(centroidHeight);
+  }
+
   /** Wavelength along the field, cm. */
   public double wavelength() {
     return 2.0 * Math.PI / wavenumber;

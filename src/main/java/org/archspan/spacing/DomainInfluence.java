@@ -77,7 +77,16 @@ final class DomainInfluence {
         branch.solver().problem().crossWavenumber(), peak.growthRate(),
         peak.growthError() + (truncated ? Math.abs(growthChange) : 0.0),
         peak.wavelengthError() + (truncated ? Math.abs(wavelengthChange) : 0.0), peak.unstableModes(),
-        peak.mode().centroidHeight(), peak.mode().columnContrast(), lid ? HeldBy.LID : HeldBy.DISK, growthChange, wavelengthChange);
+        peak.mode().centroidHeight(), peak.mode().columnContrast(), heldBy(peak, lid), growthChange,
+        wavelengthChange);
+  }
+
+  /** A branch that still rises where it ends in the continuum above an open top is held by neither disk nor lid. */
+  private HeldBy heldBy(Peak peak, boolean lid) {
+    if (open && Double.isNaN(peak.wavelengthError())) {
+      return HeldBy.HALO;
+    }
+    return lid ? HeldBy.LID : HeldBy.DISK;
   }
 
   /** The branch of the taller domain whose shape is most like this one: orders may have shifted. */

@@ -31,15 +31,19 @@ final class Findings {
   }
 
   private void aboutFastest(BranchPeak peak, Equilibrium equilibrium) {
-    if (peak.heldBy() == HeldBy.HALO) {
+    if (peak.continuum()) {
       sentences.add("The fastest growth is the edge of the continuum of the uniform atmosphere above the disk: no"
           + " discrete mode of the disk grows faster, and the disk does not choose this wavelength.");
+    }
+    if (peak.heldBy() == HeldBy.HALO && !peak.continuum()) {
+      sentences.add("The fastest mode is hardly held by the disk: its branch still rises where it merges with the continuum of"
+          + " the atmosphere above, and its wavelength is that of the merger.");
     }
     if (peak.wavenumber() == 0.0) {
       sentences.add("Growth rises towards infinite wavelength along the field: the gas interchanges without bending the"
           + " field, and no spacing along the field follows.");
     }
-    if (peak.heldBy() != HeldBy.HALO && peak.centroidHeight() > 0.8 * equilibrium.top()) {
+    if (!peak.continuum() && peak.centroidHeight() > 0.8 * equilibrium.top()) {
       sentences.add("The fastest mode has its kinetic energy in the uppermost fifth of the domain.");
     }
   }
@@ -68,7 +72,7 @@ final class Findings {
   }
 
   private void aboutSpacingMode(BranchPeak peak, Equilibrium equilibrium) {
-    if (peak.heldBy() == HeldBy.HALO) {
+    if (peak.continuum()) {
       return;
     }
     if (peak.parity() == Parity.FLEXING) {
@@ -76,7 +80,8 @@ final class Findings {
           + " gathers above the midplane half a wavelength from where it gathers below.");
     }
     if (Double.isNaN(peak.tallerGrowthChange())) {
-      sentences.add("The influence of the upper boundary could not be measured: no taller domain can be built.");
+      sentences.add("The influence of the upper boundary could not be measured: no taller domain can be built, or none of its"
+          + " modes has a similar shape.");
     } else if (peak.heldBy() == HeldBy.LID) {
       sentences.add(String.format(Locale.ROOT, "The %s decides this mode: in a domain 1.5 times as tall its wavelength"
           + " changes by %+.1f per cent and its growth rate by %+.1f per cent.",

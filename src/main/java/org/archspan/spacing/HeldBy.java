@@ -6,6 +6,6 @@ public enum HeldBy {
   DISK,
   /** The lid: a taller domain gives another answer. */
   LID,
-  /** Nothing: the fastest growth is the edge of the continuum of the uniform atmosphere above. */
+  /** Nothing: the growth is that of the continuum of the uniform atmosphere above, or of a branch where it merges with it. */
   HALO
 }

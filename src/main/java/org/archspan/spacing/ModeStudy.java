@@ -32,7 +32,7 @@ public final class ModeStudy {
 
   /** The same, for a result at hand. */
   public Optional<EigenMode> spacingMode(SpacingResult result) {
-    return result.spacingPeak().filter(peak -> peak.heldBy() != HeldBy.HALO && peak.wavenumber() > 0.0)
+    return result.spacingPeak().filter(peak -> !peak.continuum() && peak.wavenumber() > 0.0)
         .flatMap(peak -> mode(peak.parity(), peak.order(), peak.wavenumber()));
   }
 

@@ -27,12 +27,12 @@ record FastestMode(Optional<GrowthRoot> root, double wavelengthError, double bou
    *
    * @param order    0 for the fastest mode at each wavenumber
    * @param lowest   lowest wavenumber of the range, 0 or more
-   * @param highest  highest; infinite for the marginal one
+   * @param shortest highest; infinite for the marginal one
    * @param haloPeak greatest growth rate of the continuum above an open top, 0 where there is none
    * @throws UnsolvedException when a tolerance is missed
    */
-  static FastestMode find(ModeSolver solver, int order, double lowest, double highest, double haloPeak) {
-    double end = Math.min(highest, solver.marginalWavenumber(order));
+  static FastestMode find(ModeSolver solver, int order, double lowest, double shortest, double haloPeak) {
+    double end = Math.min(shortest, solver.marginalWavenumber(order));
     if (end <= lowest) {
       return new FastestMode(Optional.empty(), 0.0, 0.0, 0);
     }
@@ -44,8 +44,9 @@ record FastestMode(Optional<GrowthRoot> root, double wavelengthError, double bou
       double bound = known * (1.0 + gap(solver, order));
       OptionalDouble better = cover.violation(bound, lowest, end);
       if (better.isEmpty()) {
-        return peak.isEmpty() ? new FastestMode(peak, 0.0, bound, cover.intervals())
-            : polished(solver, order, peak.get(), bound, cover.intervals(), lowest, end);
+        Optional<GrowthRoot> highest = known > haloPeak ? peak : highestHill(solver, order, lowest, end, search);
+        return highest.isEmpty() ? new FastestMode(highest, 0.0, bound, cover.intervals())
+            : polished(solver, order, highest.get(), bound, cover.intervals(), lowest, end);
       }
       peak = solver.growth(better.getAsDouble(), order, bound).map(search::climb);
     }
@@ -67,6 +68,23 @@ record FastestMode(Optional<GrowthRoot> root, double wavelengthError, double bou
       }
     }
     return Optional.empty();
+  }
+
+  /**
+   * A branch that stays below the continuum's own peak is proved only to stay there; its highest hill is then sought from
+   * every first try.
+   */
+  private static Optional<GrowthRoot> highestHill(ModeSolver solver, int order, double lowest, double end,
+      PeakSearch search) {
+    GrowthRoot highest = null;
+    for (double share : FIRST_TRIES) {
+      Optional<GrowthRoot> hill =
+          solver.growth(lowest + share * (end - lowest), order, Double.NaN).map(search::climb);
+      if (hill.isPresent() && (highest == null || hill.get().growth() > highest.growth())) {
+        highest = hill.get();
+      }
+    }
+    return Optional.ofNullable(highest);
   }
 
   /**
