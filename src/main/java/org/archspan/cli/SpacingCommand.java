@@ -31,7 +31,7 @@ final class SpacingCommand extends ModelCommand {
 
   private static SpacingResult solved(Model model) {
     SpacingResult result = new SpacingStudy(model.disk(), model.options(), model.arm()).solve();
-    return model.rotation().isEmpty() ? result
+    return model.disk().rotation().isEmpty() ? result
         : result.warned("Rotation is given in the model but is not solved by this version: it is not in this result,"
             + " and it would slow long waves along the field.");
   }

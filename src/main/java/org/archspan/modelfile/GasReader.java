@@ -8,6 +8,7 @@ import org.archspan.closure.GasClosure;
 import org.archspan.disk.Gas;
 import org.archspan.disk.GasComponent;
 import org.archspan.disk.GasStratum;
+import org.archspan.disk.SelfGravity;
 import org.archspan.units.Constants;
 
 /** Makes the gas of a model. */
@@ -29,6 +30,11 @@ final class GasReader {
       return new GasClosure(index);
     }
     return new GasClosure(index, coolingTime);
+  }
+
+  SelfGravity selfGravity() {
+    return inputs.text("gas.self-gravity").map(word -> SelfGravity.valueOf(word.toUpperCase(Locale.ROOT)))
+        .orElse(SelfGravity.OFF);
   }
 
   Gas gas() {

@@ -1,7 +1,6 @@
 package org.archspan.modelfile;
 
 import java.util.Map;
-import java.util.Optional;
 import org.archspan.disk.Disk;
 import org.archspan.spacing.Arm;
 import org.archspan.spacing.SearchOptions;
@@ -16,10 +15,9 @@ import org.archspan.units.OutputUnits;
  * @param options       what to search
  * @param arm           the spiral arm
  * @param units         units of results
- * @param rotation      kept, but not solved by this version
  * @param inputs        every key with its value as given, in the order of the file
  * @param uncertainties of the inputs that have one, by key
  */
 public record Model(String source, String title, Disk disk, SearchOptions options, Arm arm, OutputUnits units,
-    Optional<Rotation> rotation, Map<String, String> inputs, Map<String, Uncertainty> uncertainties) {
+    Map<String, String> inputs, Map<String, Uncertainty> uncertainties) {
 }

@@ -8,6 +8,7 @@ import org.archspan.boundary.Parity;
 import org.archspan.boundary.TopBoundary;
 import org.archspan.disk.Domain;
 import org.archspan.disk.Height;
+import org.archspan.disk.Rotation;
 import org.archspan.spacing.Arm;
 import org.archspan.spacing.SearchOptions;
 import org.archspan.units.OutputUnits;
@@ -86,7 +87,7 @@ final class SurroundingsReader {
     if (!inputs.given("rotation")) {
       return Optional.empty();
     }
-    return Optional.of(new Rotation(inputs.number("rotation.angular-speed"),
+    return Optional.of(new Rotation(inputs.required("rotation.angular-speed", "rotation needs it"),
         inputs.number("rotation.epicyclic-frequency")));
   }
 }

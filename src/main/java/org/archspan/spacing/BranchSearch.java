@@ -43,8 +43,8 @@ final class BranchSearch {
   BranchSearch(Disk disk, Equilibrium equilibrium, SearchOptions options, WaveRange range, int branches) {
     this.range = range;
     for (Parity parity : parities(options.parities(), equilibrium)) {
-      solvers.add(new BranchSolver(new ModeProblem(equilibrium, disk.gasClosure(), disk.cosmicRays().closure(), parity,
-          range.crossWavenumber(), options.tolerance())));
+      solvers.add(new BranchSolver(ModeProblem.of(disk, equilibrium, parity, range.crossWavenumber(),
+          options.tolerance())));
     }
     if (Double.isInfinite(solvers.get(0).marginalWavenumber(0)) && Double.isInfinite(range.highest())) {
       throw new RefusedModelException("somewhere the gas has no field and is unstable: growth then rises without limit"

@@ -43,8 +43,7 @@ public final class DispersionStudy {
     List<GrowthCurve> curves = new ArrayList<>();
     for (double ky : across) {
       for (Parity parity : BranchSearch.parities(options.parities(), equilibrium)) {
-        BranchSolver solver = new BranchSolver(new ModeProblem(equilibrium, disk.gasClosure(),
-            disk.cosmicRays().closure(), parity, ky, options.tolerance()));
+        BranchSolver solver = new BranchSolver(ModeProblem.of(disk, equilibrium, parity, ky, options.tolerance()));
         for (int order = 0; order < orders; order++) {
           curve(solver, order, range, points).ifPresent(curves::add);
         }

@@ -86,7 +86,7 @@ public final class PlaneStudy {
   }
 
   private BranchSolver solver(Parity parity, double across) {
-    return new BranchSolver(new ModeProblem(equilibrium, disk.gasClosure(), disk.cosmicRays().closure(), parity, across,
+    return new BranchSolver(ModeProblem.of(disk, equilibrium, parity, across,
         options.tolerance()));
   }
 

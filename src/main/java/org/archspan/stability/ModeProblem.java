@@ -4,6 +4,7 @@ import org.archspan.boundary.Parity;
 import org.archspan.boundary.TopBoundary;
 import org.archspan.closure.CosmicRayClosure;
 import org.archspan.closure.GasClosure;
+import org.archspan.disk.Disk;
 import org.archspan.equilibrium.Equilibrium;
 
 /**
@@ -31,6 +32,13 @@ public record ModeProblem(Equilibrium equilibrium, GasClosure gas, CosmicRayClos
       throw new IllegalArgumentException("cross-field wavenumber must be finite and not negative, found "
           + crossWavenumber);
     }
+  }
+
+  /** The problem of a disk whose equilibrium is known. */
+  public static ModeProblem of(Disk disk, Equilibrium equilibrium, Parity parity, double crossWavenumber,
+      double tolerance) {
+    return new ModeProblem(equilibrium, disk.gasClosure(), disk.cosmicRays().closure(), parity, crossWavenumber,
+        tolerance);
   }
 
   /** The same problem with the other symmetry. */

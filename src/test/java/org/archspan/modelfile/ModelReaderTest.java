@@ -37,7 +37,7 @@ class ModelReaderTest {
     assertThat(model.disk().domain().aboutMidplane()).isTrue();
     assertThat(model.title()).isEqualTo("Plain");
     assertThat(model.inputs()).containsEntry("gas.dispersion", "6.4 km/s").hasSize(7);
-    assertThat(model.rotation()).isEmpty();
+    assertThat(model.disk().rotation()).isEmpty();
   }
 
   /** One fault in an otherwise correct model: one message that names line, key, what was found and what to do. */
