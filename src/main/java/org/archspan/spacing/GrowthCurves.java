@@ -26,8 +26,8 @@ public final class GrowthCurves {
     Map<Parity, BranchSolver> solvers = new EnumMap<>(Parity.class);
     List<GrowthCurve> curves = new ArrayList<>();
     for (BranchPeak peak : result.branches()) {
-      BranchSolver solver = solvers.computeIfAbsent(peak.parity(), parity -> new BranchSolver(ModeProblem.of(disk, result.equilibrium(), parity, range.crossWavenumber(),
-          options.tolerance())));
+      BranchSolver solver = solvers.computeIfAbsent(peak.parity(), parity -> new BranchSolver(
+          ModeProblem.of(disk, result.equilibrium(), parity, range.crossWavenumber(), options.tolerance())));
       double highest = Math.min(range.highest(), solver.marginalWavenumber(peak.order()));
       double lowest = Math.max(range.lowest(), slowest / LONGEST_OVER_FASTEST);
       if (lowest > 0.0 && lowest < highest && Double.isFinite(highest)) {

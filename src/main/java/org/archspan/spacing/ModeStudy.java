@@ -43,7 +43,8 @@ public final class ModeStudy {
    */
   public Optional<EigenMode> mode(Parity parity, int order, double wavenumber) {
     WaveRange range = WaveRange.of(options, equilibrium);
-    BranchSolver solver = new BranchSolver(ModeProblem.of(disk, equilibrium, parity, range.crossWavenumber(), options.tolerance()));
+    BranchSolver solver = new BranchSolver(
+        ModeProblem.of(disk, equilibrium, parity, range.crossWavenumber(), options.tolerance()));
     if (Double.isNaN(wavenumber)) {
       return solver.fastest(order, range.lowest(), range.highest(), 0.0).map(Peak::mode);
     }

@@ -86,8 +86,7 @@ public final class PlaneStudy {
   }
 
   private BranchSolver solver(Parity parity, double across) {
-    return new BranchSolver(ModeProblem.of(disk, equilibrium, parity, across,
-        options.tolerance()));
+    return new BranchSolver(ModeProblem.of(disk, equilibrium, parity, across, options.tolerance()));
   }
 
   private void fill(double[][] growth, int column, double[] along, double across) {
