@@ -1,12 +1,15 @@
 package org.archspan.equilibrium;
 
+import java.util.Arrays;
 import java.util.Locale;
 import java.util.OptionalDouble;
+import java.util.stream.DoubleStream;
 import org.archspan.disk.CosmicRays;
 import org.archspan.disk.Disk;
 import org.archspan.disk.Gas;
 import org.archspan.disk.MagneticField;
 import org.archspan.disk.RefusedModelException;
+import org.archspan.disk.SelfGravity;
 
 /** Splits the total pressure of a prescribed stratification into gas, field and cosmic rays. */
 final class BalanceSplit {
@@ -19,13 +22,24 @@ final class BalanceSplit {
           + " field.shape = \"balance\" and remove field.pressure-ratio");
     }
     StratumSum strata = new StratumSum(gas.strata());
-    BalanceStratification total = BalanceStratification.integrate(strata, gravity, bottom);
+    BalanceStratification total =
+        BalanceStratification.integrate(strata, gravity(disk, strata, gravity), bottom);
     double density = Math.exp(strata.logDensity(bottom));
     double pressure = density * total.totalPerMass(bottom);
     double gasPressure = gas.dispersion().isPresent()
         ? density * gas.dispersion().getAsDouble() * gas.dispersion().getAsDouble()
         : gasPressure(pressure, field.bottomStrength(), disk.cosmicRays());
     return total.split(gasPressure / density, EquilibriumBuilder.cosmicRayRatio(disk.cosmicRays(), gasPressure));
+  }
+
+  private static ExternalGravity gravity(Disk disk, StratumSum strata, ExternalGravity external) {
+    if (disk.selfGravity() == SelfGravity.OFF) {
+      return external;
+    }
+    double shortest = DoubleStream.concat(Arrays.stream(strata.landmarks()), Arrays.stream(external.landmarks()))
+        .min().orElseThrow();
+    return external.with(GasGravity.solve((z, potential) -> strata.logDensity(z), shortest, external.kinks(),
+        external.greatestHeight()));
   }
 
   /** Gas pressure at the lower end that a given field leaves, erg cm^-3. */

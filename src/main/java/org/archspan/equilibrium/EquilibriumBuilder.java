@@ -7,6 +7,8 @@ import org.archspan.disk.Gas;
 import org.archspan.disk.GasComponent;
 import org.archspan.disk.MagneticField;
 import org.archspan.disk.RefusedModelException;
+import org.archspan.disk.SelfGravity;
+import org.archspan.units.Constants;
 
 /** Builds the base state of a disk. */
 public final class EquilibriumBuilder {
@@ -23,6 +25,7 @@ public final class EquilibriumBuilder {
   public static Equilibrium build(Disk disk, double tolerance) {
     ExternalGravity gravity = new ExternalGravity(disk.gravity());
     double bottom = bottom(disk);
+    requireGravity(disk);
     Stratification stratification = stratification(disk, gravity, bottom);
     double sides = disk.domain().aboutMidplane() ? 2.0 : 1.0;
     double surfaceDensity = sides * columnAbove(stratification, bottom);
@@ -33,6 +36,17 @@ public final class EquilibriumBuilder {
     }
     return new BoundedEquilibrium(stratification, bottom, end.top(), disk.domain().aboutMidplane(), end.boundary(),
         surfaceDensity);
+  }
+
+  private static void requireGravity(Disk disk) {
+    if (disk.gravity().isEmpty() && disk.selfGravity() == SelfGravity.OFF) {
+      throw new RefusedModelException("nothing holds the gas: give a [gravity] law, or gas.self-gravity =" 
+          + " \"equilibrium\" or \"full\"");
+    }
+    if (disk.selfGravity() != SelfGravity.OFF && !disk.domain().aboutMidplane()) {
+      throw new RefusedModelException("gas.self-gravity needs a disk about its midplane: above a floor (domain.bottom) the"
+          + " gas below it would be missing; remove domain.bottom, or set gas.self-gravity = \"off\"");
+    }
   }
 
   private static double bottom(Disk disk) {
@@ -58,10 +72,25 @@ public final class EquilibriumBuilder {
     if (disk.gas() instanceof Gas.Isothermal gas && gas.surfaceDensity().isPresent()) {
       double density = MidplaneDensity.forSurfaceDensity(gas.surfaceDensity().getAsDouble(),
           rho -> isothermal(disk, gravity, bottom, new double[] {rho}, dispersionSquared), bottom,
-          disk.domain().aboutMidplane(), dispersionSquared[0]);
+          disk.domain().aboutMidplane(), dispersionSquared[0], startingDensity(disk, gravity, bottom, gas));
       return isothermal(disk, gravity, bottom, new double[] {density}, dispersionSquared);
     }
     return isothermal(disk, gravity, bottom, densities(disk.gas()), dispersionSquared);
+  }
+
+  /** Density at the lower end of a gas with a surface density, g cm^-3, roughly: held by external gravity, by its own, or both. */
+  private static double startingDensity(Disk disk, ExternalGravity gravity, double bottom, Gas.Isothermal gas) {
+    double column = gas.surfaceDensity().orElseThrow();
+    double square = gas.dispersion() * gas.dispersion();
+    double density = disk.selfGravity() == SelfGravity.OFF ? 0.0
+        : 0.5 * Math.PI * Constants.GRAVITATIONAL_CONSTANT * column * column / square;
+    if (disk.gravity().isEmpty()) {
+      return density;
+    }
+    double reference = gravity.potential(bottom);
+    double height = HeightPanels.heightOfFall(z -> (reference - gravity.potential(z)) / square, bottom, 1.0,
+        Double.POSITIVE_INFINITY);
+    return density + column / height;
   }
 
   private static double[] dispersionSquared(Gas gas) {
@@ -86,8 +115,9 @@ public final class EquilibriumBuilder {
     for (int i = 0; i < densities.length; i++) {
       pressure += densities[i] * dispersionSquared[i];
     }
-    return new IsothermalStratification(gravity, bottom, densities, dispersionSquared,
+    IsothermalStratification light = new IsothermalStratification(gravity, bottom, densities, dispersionSquared,
         magneticRatio(disk.field(), pressure), cosmicRayRatio(disk.cosmicRays(), pressure));
+    return disk.selfGravity() == SelfGravity.OFF ? light : light.withOwnGravity();
   }
 
   private static double magneticRatio(MagneticField field, double gasPressure) {
@@ -117,7 +147,7 @@ public final class EquilibriumBuilder {
 
   /** A length in parsecs for messages. */
   static String parsecs(double length) {
-    return String.format(Locale.ROOT, "%.4g pc", length / org.archspan.units.Constants.PARSEC);
+    return String.format(Locale.ROOT, "%.4g pc", length / Constants.PARSEC);
   }
 
 }

@@ -1,5 +1,6 @@
 package org.archspan.equilibrium;
 
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.stream.DoubleStream;
@@ -10,10 +11,14 @@ final class ExternalGravity {
   private final GravityLaw[] laws;
 
   ExternalGravity(List<GravityLaw> laws) {
-    if (laws.isEmpty()) {
-      throw new IllegalArgumentException("at least one gravity law is needed, found none");
-    }
     this.laws = laws.toArray(GravityLaw[]::new);
+  }
+
+  /** The same laws and one more. */
+  ExternalGravity with(GravityLaw law) {
+    List<GravityLaw> more = new ArrayList<>(List.of(laws));
+    more.add(law);
+    return new ExternalGravity(more);
   }
 
   /** Downward acceleration, cm s^-2. */
@@ -44,7 +49,7 @@ final class ExternalGravity {
 
   /** Greatest height for which all laws are defined, cm. */
   double greatestHeight() {
-    return Arrays.stream(laws).mapToDouble(GravityLaw::greatestHeight).min().orElseThrow();
+    return Arrays.stream(laws).mapToDouble(GravityLaw::greatestHeight).min().orElse(Double.POSITIVE_INFINITY);
   }
 
   private static double[] sorted(DoubleStream heights) {

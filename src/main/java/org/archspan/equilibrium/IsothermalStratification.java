@@ -1,5 +1,8 @@
 package org.archspan.equilibrium;
 
+import java.util.Arrays;
+import org.archspan.units.Constants;
+
 /**
  * Isothermal components that share one potential, with constant ratios of magnetic and cosmic-ray to gas pressure:
  * {@code rho_i = rho_i0 exp(-Phi / [(1 + alpha + beta) c_i^2])}.
@@ -56,7 +59,25 @@ final class IsothermalStratification implements Stratification {
 
   @Override
   public double logDensity(double height) {
-    double depth = depth(height);
+    return logDensityWhere(depth(height));
+  }
+
+  /** The same stratification with the gas's own gravity added to the external one. */
+  IsothermalStratification withOwnGravity() {
+    double density = Math.exp(logDensityWhere(0.0));
+    double shortest = Math.sqrt(support * Arrays.stream(dispersionSquared).min().orElseThrow()
+        / (4.0 * Math.PI * Constants.GRAVITATIONAL_CONSTANT * density));
+    for (double landmark : gravity.landmarks()) {
+      shortest = Math.min(shortest, landmark);
+    }
+    GasGravity own = GasGravity.solve((z, potential) -> logDensityWhere(depth(z) + potential / support), shortest,
+        gravity.kinks(), gravity.greatestHeight());
+    double[] densities = Arrays.stream(logDensities).map(Math::exp).toArray();
+    return new IsothermalStratification(gravity.with(own), bottom, densities, dispersionSquared, magneticRatio,
+        cosmicRayRatio);
+  }
+
+  private double logDensityWhere(double depth) {
     double greatest = greatest(depth);
     double density = 0.0;
     for (int i = 0; i < logDensities.length; i++) {

@@ -21,16 +21,16 @@ final class MidplaneDensity {
    * @param bottom            lower end, cm
    * @param aboutMidplane     whether both sides count
    * @param dispersionSquared of the gas, cm^2 s^-2
+   * @param startingDensity   a first guess, g cm^-3
    * @return density, g cm^-3
    * @throws RefusedModelException when field and cosmic rays alone hold up more than that column
    */
   static double forSurfaceDensity(double surfaceDensity, DoubleFunction<? extends Stratification> state,
-      double bottom, boolean aboutMidplane, double dispersionSquared) {
+      double bottom, boolean aboutMidplane, double dispersionSquared, double startingDensity) {
     double sides = aboutMidplane ? 2.0 : 1.0;
     UnivariateFunction excess = logDensity -> Math.log(
         sides * EquilibriumBuilder.columnAbove(state.apply(Math.exp(logDensity)), bottom) / surfaceDensity);
-    double height = HeightPanels.heightOfFall(state.apply(1.0)::logDensity, bottom, 1.0, Double.POSITIVE_INFINITY);
-    double start = Math.log(surfaceDensity / (sides * height));
+    double start = Math.log(startingDensity);
     double high = start;
     for (int step = 0; excess.value(high) < 0.0 && step < MOST_EVALUATIONS; step++) {
       high += 1.0;

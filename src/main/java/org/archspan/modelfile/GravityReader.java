@@ -24,7 +24,9 @@ final class GravityReader {
     int tables = inputs.tables("gravity");
     List<GravityLaw> laws = new ArrayList<>();
     if (tables == 0 && !inputs.given("gravity")) {
-      inputs.missing("gravity", "give a [gravity] table with a law; the gas's own gravity is not solved by this version");
+      if (inputs.text("gas.self-gravity").orElse("off").equals("off")) {
+        inputs.missing("gravity", "give a [gravity] table with a law, or gas.self-gravity = \"equilibrium\" or \"full\"");
+      }
     } else if (tables == 0) {
       law("gravity").ifPresent(laws::add);
     }

@@ -9,6 +9,7 @@ import org.archspan.disk.CosmicRays;
 import org.archspan.disk.Disk;
 import org.archspan.disk.Gas;
 import org.archspan.disk.MagneticField;
+import org.archspan.disk.SelfGravity;
 import org.archspan.equilibrium.Equilibrium;
 import org.archspan.equilibrium.GasState;
 import org.archspan.gravity.GravityLaw;
@@ -27,7 +28,7 @@ public final class Assumptions {
     lines.put("gas", gas(disk, equilibrium, units));
     lines.put("field", field(disk, bottom, units));
     lines.put("cosmic rays", cosmicRays(disk.cosmicRays(), bottom));
-    lines.put("gravity", gravity(disk.gravity(), equilibrium));
+    lines.put("gravity", gravity(disk, equilibrium));
     lines.put("domain", domain(equilibrium, units));
     lines.put("waves", crossWavenumber == 0.0 ? "along the field, uniform across it (ky = 0)"
         : "wavelength across the field " + Numbers.length(2.0 * Math.PI / crossWavenumber, units));
@@ -84,16 +85,25 @@ public final class Assumptions {
         + Numbers.given(closure.diffusivity()) + " cm^2/s";
   }
 
-  private static String gravity(List<GravityLaw> laws, Equilibrium equilibrium) {
+  private static String gravity(Disk disk, Equilibrium equilibrium) {
     List<String> names = new ArrayList<>();
-    for (GravityLaw law : laws) {
+    for (GravityLaw law : disk.gravity()) {
       String name = law.getClass().getSimpleName().replace("Gravity", "").replaceAll("([a-z])([A-Z])", "$1-$2");
       names.add(name.toLowerCase(java.util.Locale.ROOT));
     }
+    String external = names.isEmpty() ? "no external one" : "external: " + String.join(" + ", names);
     double above = Math.min(equilibrium.bottom() + equilibrium.scaleHeight(), equilibrium.top());
-    return "external: " + String.join(" + ", names) + "; " + Numbers.plain(equilibrium.at(above).gravity())
+    return external + ownGravity(disk.selfGravity()) + "; " + Numbers.plain(equilibrium.at(above).gravity())
         + " cm/s^2 one scale height up, " + Numbers.plain(equilibrium.at(equilibrium.top()).gravity())
-        + " at the top; the gas's own gravity is left out";
+        + " at the top" + (disk.selfGravity() == SelfGravity.OFF ? "; the gas's own gravity is left out" : "");
+  }
+
+  private static String ownGravity(SelfGravity selfGravity) {
+    return switch (selfGravity) {
+      case OFF -> "";
+      case EQUILIBRIUM -> ", and the gas's own in the base state alone";
+      case FULL -> ", and the gas's own, in the base state and on the perturbations";
+    };
   }
 
   private static String domain(Equilibrium equilibrium, OutputUnits units) {
