@@ -20,8 +20,6 @@ final class Unsolved {
     if (inputs.tables("gas.layer") > 0) {
       inputs.fault("gas.layer.1", "found a layered atmosphere", ALLOWED);
     }
-    inputs.text("gas.self-gravity").filter(word -> word.equals("full"))
-        .ifPresent(word -> inputs.fault("gas.self-gravity", "found \"" + word + "\"", ALLOWED));
     inputs.text("field.shape").filter(word -> word.equals("sheet") || word.equals("table"))
         .ifPresent(word -> inputs.fault("field.shape", "found \"" + word + "\"", ALLOWED));
   }

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Locale;
 import org.archspan.boundary.Parity;
 import org.archspan.disk.Disk;
+import org.archspan.disk.SelfGravity;
 import org.archspan.equilibrium.Equilibrium;
 import org.archspan.spacing.BranchPeak;
 import org.archspan.spacing.CloudComplex;
@@ -14,11 +15,13 @@ import org.archspan.units.OutputUnits;
 
 /** The answer of the main job in words: what was assumed, what was found, how sure, and what limits it. */
 public final class SpacingText {
+  private final Disk disk;
   private final SpacingResult result;
   private final OutputUnits units;
   private final TextBlock block;
 
-  private SpacingText(SpacingResult result, OutputUnits units, int width) {
+  private SpacingText(Disk disk, SpacingResult result, OutputUnits units, int width) {
+    this.disk = disk;
     this.result = result;
     this.units = units;
     this.block = new TextBlock(width);
@@ -27,7 +30,7 @@ public final class SpacingText {
   /** The whole summary, wrapped to a width in characters. */
   public static String text(String title, Disk disk, double crossWavenumber, SpacingResult result, OutputUnits units,
       int width) {
-    SpacingText text = new SpacingText(result, units, width);
+    SpacingText text = new SpacingText(disk, result, units, width);
     text.block.heading(title);
     text.block.heading("Assumed");
     Assumptions.of(disk, result.equilibrium(), crossWavenumber, units).forEach(text.block::labelled);
@@ -63,11 +66,21 @@ public final class SpacingText {
           + Numbers.change(peak.tallerWavelengthChange()) + " and its growth rate by "
           + Numbers.change(peak.tallerGrowthChange()) + ".");
     }
-    block.sentence("Infinitely short waves across the field would grow in "
-        + Numbers.time(1.0 / result.acrossLimit().growthRate(), units) + " at a height of "
-        + Numbers.length(result.acrossLimit().height(), units) + ": no ideal wave of this disk is faster.");
+    shortAcross();
     result.longestStableWavelength().ifPresent(shortest -> block.sentence("Waves along the field shorter than "
         + Numbers.length(shortest, units) + " are stable."));
+  }
+
+  private void shortAcross() {
+    if (result.acrossLimit().growthRate() == 0.0) {
+      block.sentence("Infinitely short waves across the field do not grow.");
+      return;
+    }
+    block.sentence("Infinitely short waves across the field would grow in "
+        + Numbers.time(1.0 / result.acrossLimit().growthRate(), units) + " at a height of "
+        + Numbers.length(result.acrossLimit().height(), units) + (disk.selfGravity() == SelfGravity.FULL
+            ? "; they do not feel the gas's own gravity, and long waves may be faster."
+            : ": no ideal wave of this disk is faster."));
   }
 
   private void stable() {
@@ -174,7 +187,14 @@ public final class SpacingText {
     block.heading("What limits it");
     result.warnings().forEach(block::bullet);
     block.bullet("Linear theory: growth while the gas moves by much less than a wavelength.");
-    block.bullet("A static base state that varies with height alone; rotation, shear and the gas's own gravity are"
-        + " not in it.");
+    block.bullet("A static base state that varies with height alone; " + leftOut() + " are not in it.");
+  }
+
+  private String leftOut() {
+    return switch (disk.selfGravity()) {
+      case OFF -> "rotation, shear and the gas's own gravity";
+      case EQUILIBRIUM -> "rotation, shear and the gravity of the perturbation itself";
+      case FULL -> "rotation and shear";
+    };
   }
 }

@@ -6,13 +6,18 @@ import java.util.Locale;
 import java.util.Optional;
 import org.archspan.boundary.Parity;
 import org.archspan.boundary.TopBoundary;
+import org.archspan.disk.Disk;
+import org.archspan.disk.SelfGravity;
 import org.archspan.equilibrium.Equilibrium;
+import org.archspan.equilibrium.GasState;
 
 /** What a reader of the result must know, one sentence each. */
 final class Findings {
+  /** Share of the gas above the top whose perturbed gravity goes without saying. */
+  private static final double NEGLIGIBLE_ABOVE = 1e-3;
   private final List<String> sentences = new ArrayList<>();
 
-  static List<String> of(Equilibrium equilibrium, List<BranchPeak> branches, Optional<BranchPeak> fastest,
+  static List<String> of(Disk disk, Equilibrium equilibrium, List<BranchPeak> branches, Optional<BranchPeak> fastest,
       Optional<Integer> spacing, AcrossLimit acrossLimit, SearchOptions options, WaveRange range) {
     Findings findings = new Findings();
     if (range.limited() && acrossLimit.growthRate() > 0.0) {
@@ -27,7 +32,20 @@ final class Findings {
       findings.aboutSpacing(equilibrium, branches, peak, spacing, options);
       findings.aboutSpacingMode(spacing.map(branches::get).orElse(peak), equilibrium);
     });
+    if (disk.selfGravity() == SelfGravity.FULL) {
+      findings.aboutGasAbove(equilibrium);
+    }
     return List.copyOf(findings.sentences);
+  }
+
+  /** The potential of the perturbation is continued upwards as in empty space. */
+  private void aboutGasAbove(Equilibrium equilibrium) {
+    GasState top = equilibrium.at(equilibrium.top());
+    double share = 2.0 * top.density() * top.densityScaleHeight() / equilibrium.surfaceDensity();
+    if (share > NEGLIGIBLE_ABOVE) {
+      sentences.add(String.format(Locale.ROOT, "About %.2g per cent of the gas lies above the top of the domain; the gravity"
+          + " of its perturbation is left out.", 100.0 * share));
+    }
   }
 
   private void aboutFastest(BranchPeak peak, Equilibrium equilibrium) {

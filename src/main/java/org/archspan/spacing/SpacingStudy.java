@@ -46,7 +46,7 @@ public final class SpacingStudy {
     AcrossLimit acrossLimit = acrossLimit(equilibrium);
     return new SpacingResult(equilibrium, residual, branches, fastest, spacing,
         acrossLimit, longestStable(search), complex, search.certificate(), gatheringHeight,
-        Findings.of(equilibrium, branches, fastest, spacing, acrossLimit, options, range));
+        Findings.of(disk, equilibrium, branches, fastest, spacing, acrossLimit, options, range));
   }
 
   /** The fastest branch, or the continuum of the atmosphere above where that is faster. */

@@ -3,6 +3,7 @@ package org.archspan.stability;
 import org.archspan.equilibrium.Equilibrium;
 import org.archspan.equilibrium.GasState;
 import org.archspan.mesh.Mesh;
+import org.archspan.units.Constants;
 
 /**
  * The base state on the nodes of a mesh, per unit mass and in {@link Scales}: all the eigenproblem needs. The density
@@ -27,8 +28,13 @@ final class Atmosphere {
   /** Quadrature weights for products of two, one and no slopes taken on the reference element. */
   final double[] slopeWeight;
   final double[] mixedWeight;
+  /** sqrt(4 pi G rho) where the perturbed gravity of the gas acts, 0 otherwise. */
+  final double[] jeansFrequency;
+  /** Whether it acts. */
+  final boolean gravitating;
 
-  Atmosphere(Equilibrium equilibrium, Scales scales, Mesh mesh) {
+  Atmosphere(Equilibrium equilibrium, Scales scales, Mesh mesh, boolean gravitating) {
+    this.gravitating = gravitating;
     this.mesh = mesh;
     height = mesh.nodes();
     int n = height.length;
@@ -42,6 +48,7 @@ final class Atmosphere {
     gravitySquared = new double[n];
     slopeWeight = new double[n];
     mixedWeight = new double[n];
+    jeansFrequency = new double[n];
     double[] reference = mesh.reference().weights();
     double energy = scales.speed() * scales.speed();
     for (int i = 0; i < n; i++) {
@@ -57,6 +64,8 @@ final class Atmosphere {
       inverseScaleHeight[i] = -state.logDensityGradient() * scales.length();
       fall[i] = gravity[i] * inverseScaleHeight[i];
       gravitySquared[i] = gravity[i] * gravity[i];
+      jeansFrequency[i] = gravitating
+          ? scales.time() * Math.sqrt(4.0 * Math.PI * Constants.GRAVITATIONAL_CONSTANT * state.density()) : 0.0;
     }
   }
 

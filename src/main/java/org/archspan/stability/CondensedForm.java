@@ -29,6 +29,11 @@ final class CondensedForm {
     relief = new double[nodes];
   }
 
+  /** Resistance to compression per mass at each node, as last filled. */
+  double[] stiffness() {
+    return stiffness;
+  }
+
   /**
    * Fills the coefficients at nodes {@code from} to {@code to - 1}. O(to - from), no allocation. Short loops over flat
    * arrays: the compiler turns each into vector instructions, which it does not do for one long loop.

@@ -10,9 +10,9 @@ final class Discretisation {
   private final Displacement displacement;
 
   Discretisation(ModeProblem problem, Scales scales, Mesh mesh) {
-    Atmosphere atmosphere = new Atmosphere(problem.equilibrium(), scales, mesh);
+    Atmosphere atmosphere = new Atmosphere(problem.equilibrium(), scales, mesh, problem.perturbedGravity());
     PressureResponse response = new PressureResponse(problem.gas(), problem.cosmicRays(), scales);
-    stiffness = new DynamicStiffness(atmosphere, response, problem.bottomFixed(), problem.topBoundary());
+    stiffness = DynamicStiffness.of(problem, atmosphere, response);
     displacement = new Displacement(atmosphere, response);
   }
 
@@ -29,7 +29,7 @@ final class Discretisation {
    * slopes in {@link #displacement()}.
    */
   double newtonStep(double growth, double kx, double ky) {
-    double form = stiffness.nullVector(displacement.zeta);
+    double form = stiffness.nullVector(displacement);
     displacement.complete(growth, kx, ky, stiffness.top().decay());
     return -form / displacement.byGrowth;
   }

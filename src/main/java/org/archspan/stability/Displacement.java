@@ -16,11 +16,15 @@ final class Displacement {
   private final Atmosphere atmosphere;
   private final PressureResponse response;
   private final double[] verticalSlope;
+  private final double[] force;
   /** sqrt(rho) times X, Y, Z and the divergence D on the nodes. */
   final double[] along;
   final double[] across;
   final double[] zeta;
   final double[] divergence;
+
+  /** The perturbed potential psi (see {@link PotentialForm}); 0 where the gas is light. */
+  final double[] potential;
 
   /** Derivatives of the form along the vector with respect to s and kx. */
   double byGrowth;
@@ -40,6 +44,8 @@ final class Displacement {
     across = new double[n];
     zeta = new double[n];
     divergence = new double[n];
+    potential = new double[n];
+    force = new double[n];
   }
 
   /**
@@ -60,15 +66,51 @@ final class Displacement {
     byGrowth = 0.0;
     byWavenumber = 0.0;
     int last = atmosphere.nodes() - 1;
+    weighDown();
     if (decay > 0.0) {
-      double below = verticalSlope[last];
-      verticalSlope[last] = (0.5 * atmosphere.inverseScaleHeight[last] - decay) * zeta[last];
-      horizontal(last, last + 1, ky);
+      double below = aboveTop(last);
       slopes(last, last + 1, 0.5 / (decay * atmosphere.weight[last]));
       verticalSlope[last] = below;
+      force[last] += atmosphere.jeansFrequency[last] * potential[last];
     }
     horizontal(0, last + 1, ky);
     slopes(0, last + 1, 1.0);
+    if (atmosphere.gravitating) {
+      byWavenumber += potentialByWavenumber();
+    }
+  }
+
+  /** The force along D: gravity on what is displaced, and the perturbed potential. */
+  private void weighDown() {
+    double[] gravity = atmosphere.gravity;
+    for (int i = 0; i < force.length; i++) {
+      force[i] = gravity[i] * zeta[i];
+    }
+    if (atmosphere.gravitating) {
+      double[] jeans = atmosphere.jeansFrequency;
+      for (int i = 0; i < force.length; i++) {
+        force[i] += jeans[i] * potential[i];
+      }
+    }
+  }
+
+  /** Sets the last node to what the light gas above an open top does; returns the slope to be put back. */
+  private double aboveTop(int last) {
+    double below = verticalSlope[last];
+    verticalSlope[last] = (0.5 * atmosphere.inverseScaleHeight[last] - decay) * zeta[last];
+    force[last] -= atmosphere.jeansFrequency[last] * potential[last];
+    horizontal(last, last + 1, ky);
+    return below;
+  }
+
+  /** Derivative of the energy of the potential, with what it has above the top, with respect to kx. */
+  private double potentialByWavenumber() {
+    double square = 0.0;
+    for (int i = 0; i < potential.length; i++) {
+      square += atmosphere.weight[i] * potential[i] * potential[i];
+    }
+    double top = potential[potential.length - 1];
+    return 2.0 * kx * square + kx / Math.hypot(kx, ky) * top * top;
   }
 
   /** sqrt(rho) Z' on the nodes: zeta' + zeta/(2 h). */
@@ -93,7 +135,6 @@ final class Displacement {
 
   /** The X, Y and D that make the form stationary at each node. */
   private void horizontal(int from, int to, double ky) {
-    double[] gravity = atmosphere.gravity;
     double[] alfvenSquared = atmosphere.alfvenSquared;
     double[] gasPerMass = atmosphere.gasPerMass;
     double[] cosmicRayPerMass = atmosphere.cosmicRayPerMass;
@@ -104,7 +145,7 @@ final class Displacement {
     double acrossSquared = ky * ky;
     for (int i = from; i < to; i++) {
       double v = alfvenSquared[i];
-      double fall = gravity[i] * zeta[i];
+      double fall = force[i];
       double slope = verticalSlope[i];
       double stiffness = gas * gasPerMass[i] + cosmicRay * cosmicRayPerMass[i];
       double q = 1.0 / (growthSquared + stiffness * alongSquared);
@@ -139,7 +180,7 @@ final class Displacement {
       double stiffness = gas * atmosphere.gasPerMass[i] + cosmicRay * cosmicRays;
       inertia += w * (x * x + y * y + z * z);
       bending += w * atmosphere.alfvenSquared[i] * (y * y + z * z);
-      work += w * x * (stiffness * d - atmosphere.gravity[i] * z);
+      work += w * x * (stiffness * d - force[i]);
       answer += w * cosmicRays * d * d;
       gasAnswer += w * atmosphere.gasPerMass[i] * d * d;
     }
@@ -157,6 +198,7 @@ final class Displacement {
     byWavenumber = 0.0;
     int last = atmosphere.nodes() - 1;
     zeta[last] = 1.0;
+    force[last] = atmosphere.gravity[last];
     verticalSlope[last] = 0.5 * atmosphere.inverseScaleHeight[last];
     horizontal(last, last + 1, ky);
     slopes(last, last + 1, 1.0);
@@ -171,17 +213,40 @@ final class Displacement {
     int last = atmosphere.nodes() - 1;
     double[] sums = new double[7];
     addWork(sums, 0, last + 1, 1.0);
+    double gravitation = atmosphere.gravitating ? gravitation() : 0.0;
     if (decay > 0.0) {
-      double below = verticalSlope[last];
-      verticalSlope[last] = (0.5 * atmosphere.inverseScaleHeight[last] - decay) * zeta[last];
-      horizontal(last, last + 1, ky);
+      double below = aboveTop(last);
       addWork(sums, last, last + 1, 0.5 / (decay * atmosphere.weight[last]));
       verticalSlope[last] = below;
+      force[last] += atmosphere.jeansFrequency[last] * potential[last];
       horizontal(last, last + 1, ky);
     }
     double inertia = sums[6];
     return new WorkTerms(-sums[0] / inertia, -sums[1] / inertia, -sums[2] / inertia, -sums[3] / inertia,
-        -sums[4] / inertia, -sums[5] / inertia, -topSurface * zeta[last] * zeta[last] / inertia);
+        -sums[4] / inertia, -sums[5] / inertia, -topSurface * zeta[last] * zeta[last] / inertia,
+        -gravitation / inertia);
+  }
+
+  /** The terms of the form that hold the potential. */
+  private double gravitation() {
+    ReferenceElement element = atmosphere.mesh.reference();
+    int n = element.degree() + 1;
+    double waveSquared = kx * kx + ky * ky;
+    double sum = 0.0;
+    for (int i = 0; i < potential.length; i++) {
+      int start = i / n * n;
+      double slope = 0.0;
+      for (int j = 0; j < n; j++) {
+        slope += element.derivative()[(i - start) * n + j] * potential[start + j];
+      }
+      slope *= 2.0 / atmosphere.mesh.length(i / n);
+      double compression = divergence[i] - atmosphere.inverseScaleHeight[i] * zeta[i];
+      sum += atmosphere.weight[i] * (slope * slope + waveSquared * potential[i] * potential[i]
+          - 2.0 * atmosphere.jeansFrequency[i] * potential[i] * compression);
+    }
+    int last = potential.length - 1;
+    double sheet = 2.0 * atmosphere.jeansFrequency[last] * potential[last] * zeta[last];
+    return sum + Math.sqrt(waveSquared) * potential[last] * potential[last] + sheet;
   }
 
   private void addWork(double[] sums, int from, int to, double factor) {
@@ -208,7 +273,8 @@ final class Displacement {
       double slope = verticalSlope[i];
       double v = atmosphere.alfvenSquared[i];
       double flat = s * s + kx * kx * v + atmosphere.gravity[i] * atmosphere.inverseScaleHeight[i];
-      magnitude += atmosphere.weight[i] * ((atmosphere.gasPerMass[i] + v) * slope * slope + flat * z * z);
+      double pull = Math.abs(atmosphere.jeansFrequency[i] * potential[i]);
+      magnitude += atmosphere.weight[i] * (pull * (pull + Math.abs(slope)) + (atmosphere.gasPerMass[i] + v) * slope * slope + flat * z * z);
     }
     return ROUNDING * magnitude / (s * byGrowth);
   }

@@ -5,6 +5,7 @@ import org.archspan.boundary.TopBoundary;
 import org.archspan.closure.CosmicRayClosure;
 import org.archspan.closure.GasClosure;
 import org.archspan.disk.Disk;
+import org.archspan.disk.SelfGravity;
 import org.archspan.equilibrium.Equilibrium;
 
 /**
@@ -15,10 +16,11 @@ import org.archspan.equilibrium.Equilibrium;
  * @param cosmicRays      closure of the cosmic rays
  * @param parity          condition at the lower end
  * @param crossWavenumber ky, cm^-1, not negative
+ * @param perturbedGravity whether the gas feels the gravity of its own perturbation
  * @param tolerance       requested relative error of growth rates, dimensionless
  */
 public record ModeProblem(Equilibrium equilibrium, GasClosure gas, CosmicRayClosure cosmicRays, Parity parity,
-    double crossWavenumber, double tolerance) {
+    double crossWavenumber, boolean perturbedGravity, double tolerance) {
   /** Refuses a tolerance that double precision cannot reach, and a parity that the domain does not have. */
   public ModeProblem {
     if (!(tolerance >= 1e-12 && tolerance <= 1e-2)) {
@@ -34,22 +36,28 @@ public record ModeProblem(Equilibrium equilibrium, GasClosure gas, CosmicRayClos
     }
   }
 
+  /** A light gas. */
+  public ModeProblem(Equilibrium equilibrium, GasClosure gas, CosmicRayClosure cosmicRays, Parity parity,
+      double crossWavenumber, double tolerance) {
+    this(equilibrium, gas, cosmicRays, parity, crossWavenumber, false, tolerance);
+  }
+
   /** The problem of a disk whose equilibrium is known. */
   public static ModeProblem of(Disk disk, Equilibrium equilibrium, Parity parity, double crossWavenumber,
       double tolerance) {
     return new ModeProblem(equilibrium, disk.gasClosure(), disk.cosmicRays().closure(), parity, crossWavenumber,
-        tolerance);
+        disk.selfGravity() == SelfGravity.FULL, tolerance);
   }
 
   /** The same problem with the other symmetry. */
   public ModeProblem withParity(Parity other) {
-    return new ModeProblem(equilibrium, gas, cosmicRays, other, crossWavenumber, tolerance);
+    return new ModeProblem(equilibrium, gas, cosmicRays, other, crossWavenumber, perturbedGravity, tolerance);
   }
 
   /** The same problem for growth so slow that the cosmic rays diffuse meanwhile. */
   ModeProblem withDiffusedCosmicRays() {
     return new ModeProblem(equilibrium, gas, new CosmicRayClosure(cosmicRays.adiabaticIndex(),
-        Double.POSITIVE_INFINITY), parity, crossWavenumber, tolerance);
+        Double.POSITIVE_INFINITY), parity, crossWavenumber, perturbedGravity, tolerance);
   }
 
   boolean bottomFixed() {

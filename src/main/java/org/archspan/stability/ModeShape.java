@@ -117,6 +117,6 @@ final class ModeShape {
     double square = 1.0 / (solver.scales().time() * solver.scales().time());
     return new WorkTerms(scaled.gasCompression() * square, scaled.cosmicRayCompression() * square,
         scaled.fieldCompression() * square, scaled.fieldTension() * square, scaled.weight() * square,
-        scaled.stratification() * square, scaled.topSurface() * square);
+        scaled.stratification() * square, scaled.topSurface() * square, scaled.selfGravity() * square);
   }
 }

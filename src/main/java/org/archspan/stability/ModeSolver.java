@@ -16,8 +16,11 @@ final class ModeSolver {
 
   private static final int MOST_ELEMENTS = 2000;
   private static final int MOST_REFINEMENTS = 24;
+  /** The end of a search need not be exact: where this many do not settle it, the last is taken. */
+  private static final int MARGIN_REFINEMENTS = 8;
   private static final int NODES_PER_HALF_WAVE = 4;
   private static final double HAIR = 1e-9;
+  private static final double NEUTRAL_HAIR = 1e-6;
   /** A mesh is refined to this share of the tolerance, so that warm starts beside its limit do not miss it. */
   private static final double RESERVE = 0.5;
   private static final double CROWDING_MARGIN = 0.95;
@@ -111,9 +114,12 @@ final class ModeSolver {
     return shortestUnstable;
   }
 
-  /** The slowest growth that is told from none. */
+  /**
+   * The slowest growth that is told from none. A gas that holds itself may be neutral to every displacement at the margin:
+   * there s^2 must stand out from rounding.
+   */
   double slowest() {
-    return HAIR * fastestPossible;
+    return (problem.perturbedGravity() ? NEUTRAL_HAIR : HAIR) * fastestPossible;
   }
 
   /** Growth rate of the edge of the continuum above an open top; 0 where there is none. */
@@ -264,7 +270,8 @@ final class ModeSolver {
   /**
    * Shortest wave at which more than {@code order} modes grow, as a wavenumber; 0 when there is none. Towards the margin
    * growth leaves cosmic rays all the time to diffuse, however slowly they do; only then does the number of modes never
-   * rise towards shorter waves.
+   * rise towards shorter waves. A gas that holds itself is found at two small growth rates and continued to none: at a
+   * neutral stratification growth vanishes linearly.
    */
   double marginalWavenumber(int order) {
     if (fastestPossible == 0.0) {
@@ -280,20 +287,39 @@ final class ModeSolver {
     if (Double.isInfinite(high)) {
       return high;
     }
-    double marginal = RootFinder.find(wavenumberAxis(), order, low, high, Double.NaN);
-    return Double.isNaN(marginal) ? 0.0 : marginal;
+    double marginal = marginalWavenumber(order, slowest(), low, high, Double.NaN);
+    if (problem.perturbedGravity() && marginal > 0.0) {
+      marginal += marginal - marginalWavenumber(order, 2.0 * slowest(), low, high, marginal);
+    }
+    return marginal;
   }
 
-  private RootFinder.Axis wavenumberAxis() {
+  private double marginalWavenumber(int order, double growth, double low, double high, double guess) {
+    double start = guess;
+    for (int refinement = 0;; refinement++) {
+      start = RootFinder.find(wavenumberAxis(working, growth), order, low, high, start);
+      if (Double.isNaN(start)) {
+        return 0.0;
+      }
+      double better = RootFinder.find(wavenumberAxis(checking, growth), order, low, high, start);
+      double change = Math.abs(better - start);
+      if (!(change > problem.tolerance() * start) || refinement == MARGIN_REFINEMENTS) {
+        return Double.isNaN(better) ? start : better;
+      }
+      discretise(MeshGrading.split(checking.stiffness().atmosphere(), checking.displacement().zeta));
+    }
+  }
+
+  private RootFinder.Axis wavenumberAxis(Discretisation mesh, double growth) {
     return new RootFinder.Axis() {
       @Override
       public int count(double kx) {
-        return working.stiffness().count(slowest(), kx, ky);
+        return mesh.stiffness().count(growth, kx, ky);
       }
 
       @Override
       public double newtonStep(double kx) {
-        return working.newtonStepInWavenumber(slowest(), kx, ky);
+        return mesh.newtonStepInWavenumber(growth, kx, ky);
       }
     };
   }

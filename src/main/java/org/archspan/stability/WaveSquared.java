@@ -24,9 +24,9 @@ final class WaveSquared {
     bending = lowest * lowest;
   }
 
-  /** The form that is tangent in the middle of an interval of kx^2, taken at one of the interval's ends. */
-  void tangent(double lowest, double highest, double end, double ky) {
+  /** The form that is tangent at one kx^2, taken at one end of an interval of kx. */
+  void tangent(double touching, double end, double ky) {
     exact(end, ky);
-    tangent = 0.5 * (lowest * lowest + highest * highest);
+    tangent = touching;
   }
 }

@@ -11,12 +11,14 @@ package org.archspan.stability;
  * @param weight               gas that is compressed where it sinks and expands where it rises, s^-2: drives
  * @param stratification       gas that is lifted through the falling density, s^-2: resists
  * @param topSurface           work against a free surface at the top, 0 without one, s^-2: resists
+ * @param selfGravity          the gas's own perturbed gravity, 0 where it is left out, s^-2: drives
  */
 public record WorkTerms(double gasCompression, double cosmicRayCompression, double fieldCompression,
-    double fieldTension, double weight, double stratification, double topSurface) {
+    double fieldTension, double weight, double stratification, double topSurface,
+    double selfGravity) {
   /** The sum, s^-2: the square of the growth rate. */
   public double sum() {
     return gasCompression + cosmicRayCompression + fieldCompression + fieldTension + weight + stratification
-        + topSurface;
+        + topSurface + selfGravity;
   }
 }

@@ -73,7 +73,6 @@ class ModelReaderTest {
       "gas | temperature = \"8000 K\" | gas.temperature: given beside gas.dispersion; give one of",
       "gas | mean-molecular-weight = 0.6 | gas.mean-molecular-weight: given without gas.temperature",
       "gas | cooling-time = \"2 pc\" | gas.cooling-time: found \"2 pc\", whose dimension is cm",
-      "gas | self-gravity = \"full\" | gas.self-gravity: found \"full\"; known, but not solved by this version",
       "gas | self-gravity = \"ful\" | gas.self-gravity: found \"ful\"; allowed are \"off\", \"equilibrium\", \"full\"; did you mean \"full\"?",
       "field | pressure-ratio = -0.1 | model.toml:6: field.pressure-ratio: found -0.1; allowed is a finite number 0 or greater",
       "field | pressure-ratio = \"1\" | model.toml:6: field.pressure-ratio: found \"1\"; a number without unit is needed",

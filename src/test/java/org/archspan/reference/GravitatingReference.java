@@ -1,0 +1,197 @@
+package org.archspan.reference;
+
+import dev.ludovic.netlib.lapack.JavaLAPACK;
+import java.util.Arrays;
+import java.util.function.ToDoubleFunction;
+import java.util.stream.IntStream;
+import org.archspan.boundary.Parity;
+import org.archspan.boundary.TopBoundary;
+import org.archspan.closure.GasClosure;
+import org.archspan.equilibrium.Equilibrium;
+import org.archspan.equilibrium.GasState;
+import org.archspan.units.Constants;
+import org.netlib.util.intW;
+
+/**
+ * The full problem in (X, Y, Z, psi) of a gas that feels its own perturbed gravity, nothing eliminated, by collocation on
+ * Chebyshev points and LAPACK's dense generalised eigenvalues (dggev). Cosmic rays without response.
+ *
+ * <p>Variables carry sqrt(rho); phi = sqrt(4 pi G) psi, w = sqrt(4 pi G rho). With {@code d} the divergence,
+ * {@code q = G d - g Z - w psi}, {@code P = q + 2 m (d - kx X)} and {@code L = d ln rho/dz}: {@code s^2 X = -kx q},
+ * {@code s^2 Y = -ky P - 2 m kx^2 Y}, {@code s^2 Z = g d + g L Z + w L psi - 2 m kx^2 Z + P' + (L/2) P},
+ * {@code 0 = psi'' - k^2 psi + w (d + L Z)}.
+ */
+final class GravitatingReference {
+  private final int n;
+  private final Parity parity;
+  private final TopBoundary top;
+  private final double length;
+  private final double speed;
+  private final double[][] derivative;
+  private final double[] g;
+  private final double[] slope;
+  private final double[] tension;
+  private final double[] stiffness;
+  private final double[] jeans;
+  private double[] left;
+  private double[] right;
+  private double kx;
+  private double ky;
+
+  GravitatingReference(Equilibrium equilibrium, GasClosure gas, Parity parity, int points) {
+    n = points;
+    this.parity = parity;
+    top = equilibrium.topBoundary();
+    length = equilibrium.scaleHeight();
+    speed = equilibrium.dispersion();
+    double height = equilibrium.top() / length;
+    derivative = Chebyshev.derivative(points, height);
+    GasState[] states = Arrays.stream(Chebyshev.points(points, 0.0, height))
+        .mapToObj(z -> equilibrium.at(z * length)).toArray(GasState[]::new);
+    double unit = speed * speed;
+    g = tabulate(states, s -> s.gravity() * length / unit);
+    slope = tabulate(states, s -> s.logDensityGradient() * length);
+    tension = tabulate(states, s -> 2.0 * s.magneticPerMass() / unit);
+    stiffness = tabulate(states, s -> gas.adiabaticIndex() * s.gasPerMass() / unit);
+    jeans = tabulate(states,
+        s -> Math.sqrt(4.0 * Math.PI * Constants.GRAVITATIONAL_CONSTANT * s.density()) * length / speed);
+  }
+
+  private static double[] tabulate(GasState[] states, ToDoubleFunction<GasState> quantity) {
+    return Arrays.stream(states).mapToDouble(quantity).toArray();
+  }
+
+  /** All growing modes, fastest first, s^-1; wavenumbers in cm^-1. */
+  double[] growthRates(double along, double across) {
+    kx = along * length;
+    ky = across * length;
+    left = new double[16 * n * n];
+    right = new double[16 * n * n];
+    for (int i = 0; i < n; i++) {
+      gasPressure(i, i, -kx);
+      totalPressure(n + i, i, -ky);
+      add(n + i, n + i, -tension[i] * kx * kx);
+      vertical(i);
+      potential(i);
+      IntStream.of(i, n + i, 2 * n + i).forEach(row -> right[row + 4 * n * row] = 1.0);
+    }
+    ends();
+    return Arrays.stream(positive()).map(v -> Math.sqrt(v) * speed / length).toArray();
+  }
+
+  private void add(int row, int column, double value) {
+    left[row + 4 * n * column] += value;
+  }
+
+  private void vertical(int i) {
+    int row = 2 * n + i;
+    divergence(row, i, g[i]);
+    add(row, 2 * n + i, g[i] * slope[i] - tension[i] * kx * kx);
+    add(row, 3 * n + i, jeans[i] * slope[i]);
+    for (int j = 0; j < n; j++) {
+      totalPressure(row, j, derivative[i][j] + (i == j ? 0.5 * slope[i] : 0.0));
+    }
+  }
+
+  private void potential(int i) {
+    int row = 3 * n + i;
+    for (int j = 0; j < n; j++) {
+      for (int m = 0; m < n; m++) {
+        add(row, 3 * n + m, derivative[i][j] * derivative[j][m]);
+      }
+    }
+    add(row, 3 * n + i, -kx * kx - ky * ky);
+    divergence(row, i, jeans[i]);
+    add(row, 2 * n + i, jeans[i] * slope[i]);
+  }
+
+  private void divergence(int row, int i, double factor) {
+    add(row, i, factor * kx);
+    perpendicular(row, i, factor);
+  }
+
+  private void perpendicular(int row, int i, double factor) {
+    add(row, n + i, factor * ky);
+    add(row, 2 * n + i, -0.5 * factor * slope[i]);
+    for (int j = 0; j < n; j++) {
+      add(row, 2 * n + j, factor * derivative[i][j]);
+    }
+  }
+
+  private void gasPressure(int row, int i, double factor) {
+    divergence(row, i, factor * stiffness[i]);
+    add(row, 2 * n + i, -factor * g[i]);
+    add(row, 3 * n + i, -factor * jeans[i]);
+  }
+
+  private void totalPressure(int row, int i, double factor) {
+    gasPressure(row, i, factor);
+    perpendicular(row, i, factor * tension[i]);
+  }
+
+  private void clear(int row) {
+    for (int column = 0; column < 4 * n; column++) {
+      left[row + 4 * n * column] = 0.0;
+      right[row + 4 * n * column] = 0.0;
+    }
+  }
+
+  private void ends() {
+    boolean mirror = parity == Parity.MIRROR;
+    vertical(0, mirror);
+    clear(3 * n);
+    if (mirror) {
+      slopeOfPotential(3 * n, 0);
+    } else {
+      add(3 * n, 3 * n, 1.0);
+    }
+    int last = n - 1;
+    vertical(last, top == TopBoundary.LID);
+    int row = 3 * n + last;
+    clear(row);
+    slopeOfPotential(row, last);
+    add(row, row, Math.hypot(kx, ky));
+    add(row, 2 * n + last, top == TopBoundary.FREE ? jeans[last] : 0.0);
+  }
+
+  private void slopeOfPotential(int row, int i) {
+    for (int j = 0; j < n; j++) {
+      add(row, 3 * n + j, derivative[i][j]);
+    }
+  }
+
+  /** Z = 0; or no Lagrangian change of the total pressure at a free surface, no change at all at a midplane that flexes. */
+  private void vertical(int node, boolean rigid) {
+    int row = 2 * n + node;
+    clear(row);
+    if (rigid) {
+      add(row, row, 1.0);
+    } else {
+      totalPressure(row, node, 1.0);
+    }
+    if (!rigid && node > 0) {
+      add(row, row, g[node]);
+      add(row, 3 * n + node, jeans[node]);
+    }
+  }
+
+  private double[] positive() {
+    int size = 4 * n;
+    double[] real = new double[size];
+    double[] imaginary = new double[size];
+    double[] denominator = new double[size];
+    double[] work = new double[16 * size];
+    intW info = new intW(0);
+    JavaLAPACK.getInstance().dggev("N", "N", size, left, size, right, size, real, imaginary, denominator,
+        new double[1], 1, new double[1], 1, work, work.length, info);
+    if (info.val != 0) {
+      throw new IllegalStateException("dggev did not converge: info " + info.val);
+    }
+    // infinite eigenvalues (rows without s^2) have a vanishing denominator; 1e-8: rounding of the finite ones
+    double[] ascending = IntStream.range(0, size)
+        .filter(i -> Math.abs(denominator[i]) > 1e-9 * Math.abs(real[i]) && Math.abs(imaginary[i]) < 1e-8)
+        .mapToDouble(i -> real[i] / denominator[i]).filter(v -> v > 1e-7).sorted().toArray();
+    int end = ascending.length - 1;
+    return IntStream.rangeClosed(0, end).mapToDouble(i -> ascending[end - i]).toArray();
+  }
+}
