@@ -12,13 +12,20 @@ import org.archspan.gravity.GravityLaw;
  * @param gasClosure  how it answers compression
  * @param selfGravity where its own gravity acts
  * @param field       the magnetic field
+ * @param fieldTurn   rate at which its direction turns with height above the lower end, rad cm^-1; 0 for a straight field
  * @param cosmicRays  the cosmic rays
  * @param gravity     external gravity, the sum of these laws; empty only for a gas held by its own
  * @param rotation    about the vertical axis; empty: none
  * @param domain      the range of heights
  */
-public record Disk(Gas gas, GasClosure gasClosure, SelfGravity selfGravity, MagneticField field, CosmicRays cosmicRays,
-    List<GravityLaw> gravity, Optional<Rotation> rotation, Domain domain) {
+public record Disk(Gas gas, GasClosure gasClosure, SelfGravity selfGravity, MagneticField field, double fieldTurn,
+    CosmicRays cosmicRays, List<GravityLaw> gravity, Optional<Rotation> rotation, Domain domain) {
+  /** A disk with a straight field. */
+  public Disk(Gas gas, GasClosure gasClosure, SelfGravity selfGravity, MagneticField field, CosmicRays cosmicRays,
+      List<GravityLaw> gravity, Optional<Rotation> rotation, Domain domain) {
+    this(gas, gasClosure, selfGravity, field, 0.0, cosmicRays, gravity, rotation, domain);
+  }
+
   /** A disk of light gas that does not rotate. */
   public Disk(Gas gas, GasClosure gasClosure, MagneticField field, CosmicRays cosmicRays, List<GravityLaw> gravity,
       Domain domain) {
@@ -27,6 +34,6 @@ public record Disk(Gas gas, GasClosure gasClosure, SelfGravity selfGravity, Magn
 
   /** The same disk without rotation. */
   public Disk withoutRotation() {
-    return new Disk(gas, gasClosure, selfGravity, field, cosmicRays, gravity, Optional.empty(), domain);
+    return new Disk(gas, gasClosure, selfGravity, field, fieldTurn, cosmicRays, gravity, Optional.empty(), domain);
   }
 }

@@ -32,9 +32,15 @@ final class Atmosphere {
   final double[] jeansFrequency;
   /** Whether it acts. */
   final boolean gravitating;
+  /** Components of the wavevector along and across the local field, for each unit of kx: 1 and 0 in a straight field. */
+  final double[] alongShare;
+  final double[] acrossShare;
+  /** Whether they differ from that. */
+  final boolean turning;
 
-  Atmosphere(Equilibrium equilibrium, Scales scales, Mesh mesh, boolean gravitating) {
+  Atmosphere(Equilibrium equilibrium, Scales scales, Mesh mesh, boolean gravitating, FieldTurn turn) {
     this.gravitating = gravitating;
+    turning = turn.turns();
     this.mesh = mesh;
     height = mesh.nodes();
     int n = height.length;
@@ -49,6 +55,8 @@ final class Atmosphere {
     slopeWeight = new double[n];
     mixedWeight = new double[n];
     jeansFrequency = new double[n];
+    alongShare = new double[n];
+    acrossShare = new double[n];
     double[] reference = mesh.reference().weights();
     double energy = scales.speed() * scales.speed();
     for (int i = 0; i < n; i++) {
@@ -64,6 +72,9 @@ final class Atmosphere {
       inverseScaleHeight[i] = -state.logDensityGradient() * scales.length();
       fall[i] = gravity[i] * inverseScaleHeight[i];
       gravitySquared[i] = gravity[i] * gravity[i];
+      double angle = turn.angle(height[i] * scales.length() - equilibrium.bottom());
+      alongShare[i] = Math.cos(angle);
+      acrossShare[i] = Math.sin(angle);
       jeansFrequency[i] = gravitating
           ? scales.time() * Math.sqrt(4.0 * Math.PI * Constants.GRAVITATIONAL_CONSTANT * state.density()) : 0.0;
     }

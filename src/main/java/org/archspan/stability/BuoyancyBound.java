@@ -10,6 +10,8 @@ package org.archspan.stability;
  * {@code kx^2 >= N/v_A^2 + omega^2/(gamma p/rho)} where N > 0, and once {@code kx^2 >= omega^2 max(rho/(gamma p), h/g)} where
  * N <= 0 (h = -d ln(rho)/dz).
  *
+ * <p>Where the field turns, v_A^2 is reduced by the square of the cosine between wave and field.
+ *
  * @param growth     no growth rate exceeds this
  * @param wavenumber no wave with a larger kx grows; infinite without field
  */
@@ -42,7 +44,8 @@ record BuoyancyBound(double growth, double wavenumber) {
     if (drive > 0.0) {
       double h = atmosphere.inverseScaleHeight[i];
       double excess = h < 0.0 && jeansSquared > 0.0 ? drive * (1.0 - stiffness * h / atmosphere.gravity[i]) : drive;
-      return excess / atmosphere.alfvenSquared[i] + compression;
+      double share = atmosphere.alongShare[i];
+      return excess / (share * share * atmosphere.alfvenSquared[i]) + compression;
     }
     double rise = jeansSquared == 0.0 || atmosphere.gravity[i] == 0.0 ? 0.0
         : jeansSquared * atmosphere.inverseScaleHeight[i] / atmosphere.gravity[i];

@@ -29,6 +29,14 @@ final class CondensedForm {
     relief = new double[nodes];
   }
 
+  /** Sets the coefficients of one node. */
+  void put(int i, double newA, double newB, double newC, double newStiffness) {
+    a[i] = newA;
+    b[i] = newB;
+    c[i] = newC;
+    stiffness[i] = newStiffness;
+  }
+
   /** Resistance to compression per mass at each node, as last filled. */
   double[] stiffness() {
     return stiffness;

@@ -10,7 +10,8 @@ final class Discretisation {
   private final Displacement displacement;
 
   Discretisation(ModeProblem problem, Scales scales, Mesh mesh) {
-    Atmosphere atmosphere = new Atmosphere(problem.equilibrium(), scales, mesh, problem.perturbedGravity());
+    Atmosphere atmosphere = new Atmosphere(problem.equilibrium(), scales, mesh, problem.perturbedGravity(),
+        problem.turn());
     PressureResponse response = new PressureResponse(problem.gas(), problem.cosmicRays(), scales);
     stiffness = DynamicStiffness.of(problem, atmosphere, response);
     displacement = new Displacement(atmosphere, response);

@@ -17,6 +17,10 @@ final class Displacement {
   private final PressureResponse response;
   private final double[] verticalSlope;
   private final double[] force;
+  private final double[] gasStiffness;
+  private final double[] cosmicRayStiffness;
+  private final double[] stiffnessByGrowth;
+  private final double[] stiffnessByWavenumber;
   /** sqrt(rho) times X, Y, Z and the divergence D on the nodes. */
   final double[] along;
   final double[] across;
@@ -46,6 +50,10 @@ final class Displacement {
     divergence = new double[n];
     potential = new double[n];
     force = new double[n];
+    gasStiffness = new double[n];
+    cosmicRayStiffness = new double[n];
+    stiffnessByGrowth = new double[n];
+    stiffnessByWavenumber = new double[n];
   }
 
   /**
@@ -61,11 +69,11 @@ final class Displacement {
     kx = newKx;
     ky = newKy;
     decay = newDecay;
-    response.evaluate(growth, kx);
+    int last = atmosphere.nodes() - 1;
+    soften(0, last + 1);
     differentiate();
     byGrowth = 0.0;
     byWavenumber = 0.0;
-    int last = atmosphere.nodes() - 1;
     weighDown();
     if (decay > 0.0) {
       double below = aboveTop(last);
@@ -133,30 +141,46 @@ final class Displacement {
     }
   }
 
+  /** How stiff gas and cosmic rays are at each node, and how that changes with s and kx. */
+  private void soften(int from, int to) {
+    response.evaluate(growth, kx);
+    for (int i = from; i < to; i++) {
+      if (atmosphere.turning) {
+        response.evaluate(growth, Math.abs(atmosphere.alongShare[i]) * kx);
+      }
+      double cosmicRays = atmosphere.cosmicRayPerMass[i];
+      double gas = atmosphere.gasPerMass[i];
+      gasStiffness[i] = response.gas * gas;
+      cosmicRayStiffness[i] = response.cosmicRay * cosmicRays;
+      stiffnessByGrowth[i] = response.gasByGrowth * gas + response.cosmicRayByGrowth * cosmicRays;
+      stiffnessByWavenumber[i] = response.cosmicRayByWavenumber * Math.abs(atmosphere.alongShare[i]) * cosmicRays;
+    }
+  }
+
   /** The X, Y and D that make the form stationary at each node. */
-  private void horizontal(int from, int to, double ky) {
+  private void horizontal(int from, int to, double acrossStraight) {
     double[] alfvenSquared = atmosphere.alfvenSquared;
-    double[] gasPerMass = atmosphere.gasPerMass;
-    double[] cosmicRayPerMass = atmosphere.cosmicRayPerMass;
-    double gas = response.gas;
-    double cosmicRay = response.cosmicRay;
+    double[] alongShare = atmosphere.alongShare;
+    double[] acrossShare = atmosphere.acrossShare;
     double growthSquared = growth * growth;
-    double alongSquared = kx * kx;
-    double acrossSquared = ky * ky;
     for (int i = from; i < to; i++) {
       double v = alfvenSquared[i];
       double fall = force[i];
       double slope = verticalSlope[i];
-      double stiffness = gas * gasPerMass[i] + cosmicRay * cosmicRayPerMass[i];
+      double stiffness = gasStiffness[i] + cosmicRayStiffness[i];
+      double waveAlong = kx * alongShare[i];
+      double waveAcross = acrossStraight + kx * acrossShare[i];
+      double alongSquared = waveAlong * waveAlong;
       double q = 1.0 / (growthSquared + stiffness * alongSquared);
       double m = growthSquared * q;
       double squeeze = m * stiffness + v;
-      double y = -ky * (squeeze * slope - m * fall) / (growthSquared + alongSquared * v + squeeze * acrossSquared);
-      double perpendicular = ky * y + slope;
-      double x = -kx * q * (stiffness * perpendicular - fall);
+      double y = -waveAcross * (squeeze * slope - m * fall)
+          / (growthSquared + alongSquared * v + squeeze * waveAcross * waveAcross);
+      double perpendicular = waveAcross * y + slope;
+      double x = -waveAlong * q * (stiffness * perpendicular - fall);
       along[i] = x;
       across[i] = y;
-      divergence[i] = kx * x + perpendicular;
+      divergence[i] = waveAlong * x + perpendicular;
     }
   }
 
@@ -164,39 +188,37 @@ final class Displacement {
   private void slopes(int from, int to, double factor) {
     double[] weight = atmosphere.weight;
     double inertia = 0.0;
-    double bending = 0.0;
     double work = 0.0;
     double answer = 0.0;
-    double gasAnswer = 0.0;
-    double gas = response.gas;
-    double cosmicRay = response.cosmicRay;
+    double softening = 0.0;
     for (int i = from; i < to; i++) {
       double x = along[i];
       double y = across[i];
       double z = zeta[i];
       double d = divergence[i];
       double w = weight[i];
-      double cosmicRays = atmosphere.cosmicRayPerMass[i];
-      double stiffness = gas * atmosphere.gasPerMass[i] + cosmicRay * cosmicRays;
+      double v = atmosphere.alfvenSquared[i];
+      double c = atmosphere.alongShare[i];
+      double s = atmosphere.acrossShare[i];
+      double perpendicular = d - kx * c * x;
+      double pressure = (gasStiffness[i] + cosmicRayStiffness[i]) * d - force[i];
       inertia += w * (x * x + y * y + z * z);
-      bending += w * atmosphere.alfvenSquared[i] * (y * y + z * z);
-      work += w * x * (stiffness * d - force[i]);
-      answer += w * cosmicRays * d * d;
-      gasAnswer += w * atmosphere.gasPerMass[i] * d * d;
+      work += w * (pressure * (c * x + s * y) + v * (perpendicular * s * y + kx * c * c * (y * y + z * z)));
+      answer += w * stiffnessByGrowth[i] * d * d;
+      softening += w * stiffnessByWavenumber[i] * d * d;
     }
-    byGrowth += factor * (2.0 * growth * inertia + response.gasByGrowth * gasAnswer
-        + response.cosmicRayByGrowth * answer);
-    byWavenumber += factor * (2.0 * (work + kx * bending) + response.cosmicRayByWavenumber * answer);
+    byGrowth += factor * (2.0 * growth * inertia + answer);
+    byWavenumber += factor * (2.0 * work + softening);
   }
 
   /** Slopes of the form of the atmosphere at the top alone, for zeta = 1 without vertical variation. */
   void uniformAtTop(double newGrowth, double newKx, double ky) {
     growth = newGrowth;
     kx = newKx;
-    response.evaluate(growth, kx);
     byGrowth = 0.0;
     byWavenumber = 0.0;
     int last = atmosphere.nodes() - 1;
+    soften(last, last + 1);
     zeta[last] = 1.0;
     force[last] = atmosphere.gravity[last];
     verticalSlope[last] = 0.5 * atmosphere.inverseScaleHeight[last];
@@ -253,12 +275,13 @@ final class Displacement {
     for (int i = from; i < to; i++) {
       double w = factor * atmosphere.weight[i];
       double d = divergence[i];
-      double perpendicular = d - kx * along[i];
+      double waveAlong = kx * atmosphere.alongShare[i];
+      double perpendicular = d - waveAlong * along[i];
       double sideways = across[i] * across[i] + zeta[i] * zeta[i];
-      sums[0] += w * response.gas * atmosphere.gasPerMass[i] * d * d;
-      sums[1] += w * response.cosmicRay * atmosphere.cosmicRayPerMass[i] * d * d;
+      sums[0] += w * gasStiffness[i] * d * d;
+      sums[1] += w * cosmicRayStiffness[i] * d * d;
       sums[2] += w * atmosphere.alfvenSquared[i] * perpendicular * perpendicular;
-      sums[3] += w * kx * kx * atmosphere.alfvenSquared[i] * sideways;
+      sums[3] += w * waveAlong * waveAlong * atmosphere.alfvenSquared[i] * sideways;
       sums[4] -= w * 2.0 * atmosphere.gravity[i] * zeta[i] * d;
       sums[5] += w * atmosphere.fall[i] * zeta[i] * zeta[i];
       sums[6] += w * (along[i] * along[i] + sideways);
@@ -274,7 +297,8 @@ final class Displacement {
       double v = atmosphere.alfvenSquared[i];
       double flat = s * s + kx * kx * v + atmosphere.gravity[i] * atmosphere.inverseScaleHeight[i];
       double pull = Math.abs(atmosphere.jeansFrequency[i] * potential[i]);
-      magnitude += atmosphere.weight[i] * (pull * (pull + Math.abs(slope)) + (atmosphere.gasPerMass[i] + v) * slope * slope + flat * z * z);
+      magnitude += atmosphere.weight[i] * (pull * (pull + Math.abs(slope))
+          + (atmosphere.gasPerMass[i] + v) * slope * slope + flat * z * z);
     }
     return ROUNDING * magnitude / (s * byGrowth);
   }

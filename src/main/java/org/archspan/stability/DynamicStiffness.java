@@ -23,6 +23,7 @@ abstract sealed class DynamicStiffness permits LightStiffness, GravitatingStiffn
   final CondensedForm form;
   final WaveSquared wave = new WaveSquared();
   final boolean[] crowded;
+  final TurningForm turning;
   private final PressureResponse response;
   private long factorisations;
 
@@ -34,6 +35,7 @@ abstract sealed class DynamicStiffness permits LightStiffness, GravitatingStiffn
     this.element = atmosphere.mesh.reference();
     this.elements = atmosphere.mesh.elements();
     this.form = new CondensedForm(atmosphere.nodes());
+    this.turning = new TurningForm(atmosphere.turning ? atmosphere.nodes() : 0, response);
     this.crowded = new boolean[elements];
   }
 
@@ -72,11 +74,11 @@ abstract sealed class DynamicStiffness permits LightStiffness, GravitatingStiffn
   /** Whether the form at s is positive for every kx between two values: no mode grows faster at any of them. */
   boolean positiveBetween(double growth, double lowest, double highest, double ky) {
     double touching = tangentPoint(lowest, highest);
-    wave.tangent(touching, lowest, ky);
+    wave.tangent(touching, lowest, highest, ky);
     if (count(growth, highest) > 0) {
       return false;
     }
-    wave.tangent(touching, highest, ky);
+    wave.tangent(touching, highest, highest, ky);
     return count(growth, highest) == 0;
   }
 
@@ -87,8 +89,12 @@ abstract sealed class DynamicStiffness permits LightStiffness, GravitatingStiffn
 
   private int count(double growth, double softestAt) {
     factorisations++;
-    response.evaluate(growth, softestAt);
-    form.fill(atmosphere, 0, atmosphere.nodes(), growth * growth, wave, response.gas, response.cosmicRay);
+    if (atmosphere.turning) {
+      turning.fill(form, atmosphere, growth, wave, softestAt);
+    } else {
+      response.evaluate(growth, softestAt);
+      form.fill(atmosphere, 0, atmosphere.nodes(), growth * growth, wave, response.gas, response.cosmicRay);
+    }
     if (!top.evaluate(form, atmosphere, atmosphere.nodes() - 1)) {
       return INFINITE;
     }

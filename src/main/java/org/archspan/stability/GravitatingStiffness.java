@@ -46,7 +46,11 @@ final class GravitatingStiffness extends DynamicStiffness {
 
   @Override
   int factor(double growthSquared) {
-    potential.fill(atmosphere, growthSquared, wave, form.stiffness());
+    if (atmosphere.turning) {
+      potential.fill(atmosphere, wave, turning);
+    } else {
+      potential.fill(atmosphere, growthSquared, wave, form.stiffness());
+    }
     weigh();
     double[] mixedWeight = atmosphere.mixedWeight;
     double[] weight = atmosphere.weight;

@@ -17,10 +17,11 @@ import org.archspan.equilibrium.Equilibrium;
  * @param parity          condition at the lower end
  * @param crossWavenumber ky, cm^-1, not negative
  * @param perturbedGravity whether the gas feels the gravity of its own perturbation
+ * @param turn            of the field with height; the wavenumber is then that of the whole wave, not of its part along the field
  * @param tolerance       requested relative error of growth rates, dimensionless
  */
 public record ModeProblem(Equilibrium equilibrium, GasClosure gas, CosmicRayClosure cosmicRays, Parity parity,
-    double crossWavenumber, boolean perturbedGravity, double tolerance) {
+    double crossWavenumber, boolean perturbedGravity, FieldTurn turn, double tolerance) {
   /** Refuses a tolerance that double precision cannot reach, and a parity that the domain does not have. */
   public ModeProblem {
     if (!(tolerance >= 1e-12 && tolerance <= 1e-2)) {
@@ -34,30 +35,40 @@ public record ModeProblem(Equilibrium equilibrium, GasClosure gas, CosmicRayClos
       throw new IllegalArgumentException("cross-field wavenumber must be finite and not negative, found "
           + crossWavenumber);
     }
+    if (turn.turns() && (crossWavenumber != 0.0 || equilibrium.topBoundary() == TopBoundary.OPEN)) {
+      throw new IllegalArgumentException("where the field turns a wave is given by its direction, and the top cannot be open");
+    }
   }
 
   /** A light gas. */
   public ModeProblem(Equilibrium equilibrium, GasClosure gas, CosmicRayClosure cosmicRays, Parity parity,
       double crossWavenumber, double tolerance) {
-    this(equilibrium, gas, cosmicRays, parity, crossWavenumber, false, tolerance);
+    this(equilibrium, gas, cosmicRays, parity, crossWavenumber, false, FieldTurn.NONE, tolerance);
   }
 
   /** The problem of a disk whose equilibrium is known. */
   public static ModeProblem of(Disk disk, Equilibrium equilibrium, Parity parity, double crossWavenumber,
       double tolerance) {
     return new ModeProblem(equilibrium, disk.gasClosure(), disk.cosmicRays().closure(), parity, crossWavenumber,
-        disk.selfGravity() == SelfGravity.FULL, tolerance);
+        disk.selfGravity() == SelfGravity.FULL, FieldTurn.NONE, tolerance);
+  }
+
+  /** The problem of a wave of a given direction in a disk whose field turns with height. */
+  public static ModeProblem turning(Disk disk, Equilibrium equilibrium, Parity parity, double direction,
+      double tolerance) {
+    return new ModeProblem(equilibrium, disk.gasClosure(), disk.cosmicRays().closure(), parity, 0.0,
+        disk.selfGravity() == SelfGravity.FULL, new FieldTurn(disk.fieldTurn(), direction), tolerance);
   }
 
   /** The same problem with the other symmetry. */
   public ModeProblem withParity(Parity other) {
-    return new ModeProblem(equilibrium, gas, cosmicRays, other, crossWavenumber, perturbedGravity, tolerance);
+    return new ModeProblem(equilibrium, gas, cosmicRays, other, crossWavenumber, perturbedGravity, turn, tolerance);
   }
 
   /** The same problem for growth so slow that the cosmic rays diffuse meanwhile. */
   ModeProblem withDiffusedCosmicRays() {
     return new ModeProblem(equilibrium, gas, new CosmicRayClosure(cosmicRays.adiabaticIndex(),
-        Double.POSITIVE_INFINITY), parity, crossWavenumber, perturbedGravity, tolerance);
+        Double.POSITIVE_INFINITY), parity, crossWavenumber, perturbedGravity, turn, tolerance);
   }
 
   boolean bottomFixed() {

@@ -19,6 +19,13 @@ final class PotentialForm {
     own = new double[nodes];
   }
 
+  /** Fills the coefficients at all nodes where the field turns, after that form. O(nodes), no allocation. */
+  void fill(Atmosphere atmosphere, WaveSquared wave, TurningForm turning) {
+    System.arraycopy(turning.mixed, 0, slope, 0, slope.length);
+    System.arraycopy(turning.relief, 0, own, 0, own.length);
+    couple(atmosphere, wave.bending);
+  }
+
   /** Fills the coefficients at all nodes, after the form without gravity. O(nodes), no allocation. */
   void fill(Atmosphere atmosphere, double growthSquared, WaveSquared wave, double[] stiffness) {
     double tangent = wave.tangent;

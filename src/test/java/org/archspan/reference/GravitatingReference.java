@@ -35,8 +35,10 @@ final class GravitatingReference {
   private final double[] jeans;
   private double[] left;
   private double[] right;
-  private double kx;
-  private double ky;
+  private final double[] kx;
+  private final double[] ky;
+  private double waveSquared;
+  private final double[] height;
 
   GravitatingReference(Equilibrium equilibrium, GasClosure gas, Parity parity, int points) {
     n = points;
@@ -44,9 +46,11 @@ final class GravitatingReference {
     top = equilibrium.topBoundary();
     length = equilibrium.scaleHeight();
     speed = equilibrium.dispersion();
-    double height = equilibrium.top() / length;
-    derivative = Chebyshev.derivative(points, height);
-    GasState[] states = Arrays.stream(Chebyshev.points(points, 0.0, height))
+    derivative = Chebyshev.derivative(points, equilibrium.top() / length);
+    height = Chebyshev.points(points, 0.0, equilibrium.top() / length);
+    kx = new double[n];
+    ky = new double[n];
+    GasState[] states = Arrays.stream(height)
         .mapToObj(z -> equilibrium.at(z * length)).toArray(GasState[]::new);
     double unit = speed * speed;
     g = tabulate(states, s -> s.gravity() * length / unit);
@@ -63,14 +67,29 @@ final class GravitatingReference {
 
   /** All growing modes, fastest first, s^-1; wavenumbers in cm^-1. */
   double[] growthRates(double along, double across) {
-    kx = along * length;
-    ky = across * length;
+    Arrays.fill(kx, along * length);
+    Arrays.fill(ky, across * length);
+    return growthRates();
+  }
+
+  /** The same in a field that turns by {@code rate} (rad cm^-1), for a wave in a direction (rad). */
+  double[] growthRates(double wavenumber, double direction, double rate) {
+    for (int i = 0; i < n; i++) {
+      double angle = direction - rate * height[i] * length;
+      kx[i] = wavenumber * length * Math.cos(angle);
+      ky[i] = wavenumber * length * Math.sin(angle);
+    }
+    return growthRates();
+  }
+
+  private double[] growthRates() {
+    waveSquared = kx[0] * kx[0] + ky[0] * ky[0];
     left = new double[16 * n * n];
     right = new double[16 * n * n];
     for (int i = 0; i < n; i++) {
-      gasPressure(i, i, -kx);
-      totalPressure(n + i, i, -ky);
-      add(n + i, n + i, -tension[i] * kx * kx);
+      gasPressure(i, i, -kx[i]);
+      totalPressure(n + i, i, -ky[i]);
+      add(n + i, n + i, -tension[i] * kx[i] * kx[i]);
       vertical(i);
       potential(i);
       IntStream.of(i, n + i, 2 * n + i).forEach(row -> right[row + 4 * n * row] = 1.0);
@@ -86,7 +105,7 @@ final class GravitatingReference {
   private void vertical(int i) {
     int row = 2 * n + i;
     divergence(row, i, g[i]);
-    add(row, 2 * n + i, g[i] * slope[i] - tension[i] * kx * kx);
+    add(row, 2 * n + i, g[i] * slope[i] - tension[i] * kx[i] * kx[i]);
     add(row, 3 * n + i, jeans[i] * slope[i]);
     for (int j = 0; j < n; j++) {
       totalPressure(row, j, derivative[i][j] + (i == j ? 0.5 * slope[i] : 0.0));
@@ -100,18 +119,18 @@ final class GravitatingReference {
         add(row, 3 * n + m, derivative[i][j] * derivative[j][m]);
       }
     }
-    add(row, 3 * n + i, -kx * kx - ky * ky);
+    add(row, 3 * n + i, -waveSquared);
     divergence(row, i, jeans[i]);
     add(row, 2 * n + i, jeans[i] * slope[i]);
   }
 
   private void divergence(int row, int i, double factor) {
-    add(row, i, factor * kx);
+    add(row, i, factor * kx[i]);
     perpendicular(row, i, factor);
   }
 
   private void perpendicular(int row, int i, double factor) {
-    add(row, n + i, factor * ky);
+    add(row, n + i, factor * ky[i]);
     add(row, 2 * n + i, -0.5 * factor * slope[i]);
     for (int j = 0; j < n; j++) {
       add(row, 2 * n + j, factor * derivative[i][j]);
@@ -150,7 +169,7 @@ final class GravitatingReference {
     int row = 3 * n + last;
     clear(row);
     slopeOfPotential(row, last);
-    add(row, row, Math.hypot(kx, ky));
+    add(row, row, Math.sqrt(waveSquared));
     add(row, 2 * n + last, top == TopBoundary.FREE ? jeans[last] : 0.0);
   }
 

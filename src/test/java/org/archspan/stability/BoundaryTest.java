@@ -111,7 +111,7 @@ class BoundaryTest {
     Equilibrium layer = new UniformLayer(depth, 1e10);
     Scales scales = new Scales(1.0, 1.0);
     Mesh mesh = new Mesh(new double[] {0.0, 2.0, 4.0, 6.0, 7.0, 8.0}, 10);
-    Atmosphere atmosphere = new Atmosphere(layer, scales, mesh, false);
+    Atmosphere atmosphere = new Atmosphere(layer, scales, mesh, false, FieldTurn.NONE);
     PressureResponse response =
         new PressureResponse(new GasClosure(1.0), CosmicRayClosure.instantDiffusion(), scales);
     DynamicStiffness stiffness = new LightStiffness(atmosphere, response, true, TopBoundary.FREE);
