@@ -39,8 +39,7 @@ final class DispersionCommand extends ModelCommand {
     }
     Equilibrium equilibrium = EquilibriumBuilder.build(model.disk(), common.tolerance);
     DispersionStudy study = new DispersionStudy(model.disk(), equilibrium, model.options());
-    double[] wavenumbers = across.isEmpty() ? new double[] {study.modelCrossWavenumber()}
-        : across.stream().mapToDouble(CrossWavelength::wavenumber).toArray();
+    double[] wavenumbers = across.stream().mapToDouble(CrossWavelength::wavenumber).toArray();
     List<GrowthCurve> curves = study.solve(wavenumbers, orders, points);
     if (common.out != null) {
       new FigureFiles(common.out, common.overwrite).dispersion(curves, GrowthTable.of(curves, model.units()),

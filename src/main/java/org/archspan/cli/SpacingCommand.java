@@ -7,7 +7,6 @@ import org.archspan.report.SpacingText;
 import org.archspan.report.SpacingFiles;
 import org.archspan.spacing.SpacingResult;
 import org.archspan.spacing.SpacingStudy;
-import org.archspan.spacing.WaveRange;
 import picocli.CommandLine.Command;
 
 /** The main job. */
@@ -18,15 +17,14 @@ final class SpacingCommand extends ModelCommand {
   @Override
   void solve(Model model) throws IOException {
     SpacingResult result = solved(model);
-    double across = WaveRange.of(model.options(), result.equilibrium()).crossWavenumber();
     String json = SpacingJson.text(echo(model), result, model.units());
     if (common.out != null) {
-      String text = SpacingText.text(model.title(), model.disk(), across, result, model.units(), 88);
+      String text = SpacingText.text(model.title(), model.disk(), result, model.units(), 88);
       new SpacingFiles(result, model.disk(), model.options(), model.units()).write(common.out, json, text,
           echo(model), common.overwrite);
     }
     print(() -> json,
-        () -> SpacingText.text(model.title(), model.disk(), across, result, model.units(), width()));
+        () -> SpacingText.text(model.title(), model.disk(), result, model.units(), width()));
   }
 
   private static SpacingResult solved(Model model) {

@@ -1,8 +1,11 @@
 package org.archspan.equilibrium;
 
 import java.util.Locale;
+import java.util.Optional;
+import org.archspan.boundary.TopBoundary;
 import org.archspan.disk.CosmicRays;
 import org.archspan.disk.Disk;
+import org.archspan.disk.Domain;
 import org.archspan.disk.Gas;
 import org.archspan.disk.GasComponent;
 import org.archspan.disk.MagneticField;
@@ -30,12 +33,25 @@ public final class EquilibriumBuilder {
     double sides = disk.domain().aboutMidplane() ? 2.0 : 1.0;
     double surfaceDensity = sides * columnAbove(stratification, bottom);
     double scaleHeight = surfaceDensity / (sides * Math.exp(stratification.logDensity(bottom)));
-    DomainEnd end = DomainEnd.of(disk.domain(), stratification, bottom, scaleHeight, tolerance);
+    DomainEnd end = DomainEnd.of(closedWhereTurning(disk), stratification, bottom, scaleHeight, tolerance);
     if (stratification instanceof BalanceStratification balance) {
       FieldSupport.require(balance, bottom, end.top());
     }
     return new BoundedEquilibrium(stratification, bottom, end.top(), disk.domain().aboutMidplane(), end.boundary(),
         surfaceDensity);
+  }
+
+  /** Above an open top the atmosphere must be uniform, and a field that goes on turning is not. */
+  private static Domain closedWhereTurning(Disk disk) {
+    Domain domain = disk.domain();
+    if (disk.fieldTurn() == 0.0) {
+      return domain;
+    }
+    if (domain.topBoundary().filter(boundary -> boundary == TopBoundary.OPEN).isPresent()) {
+      throw new RefusedModelException("an open top needs a uniform atmosphere above it, and there this field goes on turning"
+          + " (field.turn); use domain.top-boundary = \"lid\"");
+    }
+    return new Domain(domain.floor(), domain.top(), Optional.of(domain.topBoundary().orElse(TopBoundary.LID)));
   }
 
   private static void requireGravity(Disk disk) {

@@ -52,6 +52,11 @@ final class FieldReader {
     return new MagneticField.Balance(inputs.number("field.strength"));
   }
 
+  /** Rate at which the field turns with height, rad cm^-1. */
+  double turn() {
+    return inputs.number("field.turn").orElse(0.0);
+  }
+
   CosmicRays cosmicRays() {
     inputs.oneOf("cosmic-rays.pressure-ratio", "cosmic-rays.pressure");
     CosmicRayClosure closure = new CosmicRayClosure(inputs.number("cosmic-rays.adiabatic-index").orElse(4.0 / 3.0),

@@ -92,7 +92,7 @@ public final class ModelReader {
     SurroundingsReader surroundings = new SurroundingsReader(inputs);
     Arm arm = surroundings.arm();
     Disk disk = new Disk(gas, gasReader.closure(), gasReader.selfGravity(), fieldReader.field(gas),
-        fieldReader.cosmicRays(), gravity, surroundings.rotation(), surroundings.domain());
+        fieldReader.turn(), fieldReader.cosmicRays(), gravity, surroundings.rotation(), surroundings.domain());
     Map<String, String> given = new LinkedHashMap<>();
     inputs.entries().forEach((key, entry) -> given.put(key, String.valueOf(entry.value())));
     return new Model(source, inputs.text("title").orElse(source), disk, surroundings.options(arm, tolerance), arm,

@@ -165,6 +165,8 @@ public final class Schema {
         "what bounds the gas above", "open", "lid", "free"));
     specs.add(new KeySpec("waves.cross-wavelength", HEIGHT, "pc", POSITIVE, List.of("infinite", "arm-width"), "infinite",
         "wavelength across the field; arm-width: half a wave across the arm"));
+    specs.add(quantity("waves.direction", "deg", ANY, "searched", "of the wavevector from the field at the lower end, where"
+        + " the field turns"));
     specs.add(choice("waves.parity", "both", "symmetry about the midplane", "mirror", "flexing", "both"));
     specs.add(height("waves.shortest", "found automatically", "shortest wave to search"));
     specs.add(height("waves.longest", "found automatically", "longest wave to search"));

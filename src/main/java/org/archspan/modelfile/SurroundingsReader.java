@@ -54,7 +54,7 @@ final class SurroundingsReader {
         .orElse(standard.parities());
     inOrder("waves.shortest", inputs.height("waves.shortest"), "waves.longest", inputs.height("waves.longest"));
     return new SearchOptions(crossWavelength(arm), parities, inputs.height("waves.shortest"),
-        inputs.height("waves.longest"), inputs.height("waves.gathering-height").orElse(standard.gatheringHeight()),
+        inputs.height("waves.longest"), inputs.number("waves.direction"), inputs.height("waves.gathering-height").orElse(standard.gatheringHeight()),
         tolerance, (int) inputs.number("waves.branches").orElse(standard.branches()));
   }
 

@@ -3,6 +3,7 @@ package org.archspan.report;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.OptionalDouble;
 import java.util.LinkedHashMap;
 import org.archspan.closure.CosmicRayClosure;
 import org.archspan.disk.CosmicRays;
@@ -13,6 +14,7 @@ import org.archspan.disk.SelfGravity;
 import org.archspan.equilibrium.Equilibrium;
 import org.archspan.equilibrium.GasState;
 import org.archspan.gravity.GravityLaw;
+import org.archspan.spacing.WaveRange;
 import org.archspan.units.OutputUnits;
 
 /** What a result rests on, in words. */
@@ -20,25 +22,35 @@ public final class Assumptions {
   private Assumptions() {
   }
 
+  private static final WaveRange ANY = new WaveRange(0.0, Double.POSITIVE_INFINITY, 0.0, OptionalDouble.empty());
+
   /** Subject and statement, in the order in which a paper gives them. */
-  public static Map<String, String> of(Disk disk, Equilibrium equilibrium, double crossWavenumber,
+  public static Map<String, String> of(Disk disk, Equilibrium equilibrium, WaveRange range,
       OutputUnits units) {
     Map<String, String> lines = new LinkedHashMap<>();
     GasState bottom = equilibrium.at(equilibrium.bottom());
     lines.put("gas", gas(disk, equilibrium, units));
-    lines.put("field", field(disk, bottom, units));
+    lines.put("field", field(disk, equilibrium, units));
     lines.put("cosmic rays", cosmicRays(disk.cosmicRays(), bottom));
     lines.put("gravity", gravity(disk, equilibrium));
     lines.put("domain", domain(equilibrium, units));
-    lines.put("waves", crossWavenumber == 0.0 ? "along the field, uniform across it (ky = 0)"
-        : "wavelength across the field " + Numbers.length(2.0 * Math.PI / crossWavenumber, units));
+    lines.put("waves", waves(range, units));
     return lines;
+  }
+
+  private static String waves(WaveRange range, OutputUnits units) {
+    if (range.direction().isPresent()) {
+      return "in the direction " + Numbers.plain(Math.toDegrees(range.direction().getAsDouble()))
+          + " degrees from the field at the lower end; their crests run at right angles to it";
+    }
+    return range.crossWavenumber() == 0.0 ? "along the field, uniform across it (ky = 0)"
+        : "wavelength across the field " + Numbers.length(2.0 * Math.PI / range.crossWavenumber(), units);
   }
 
   /** A text that opens with the title and what holds for every wave. */
   static TextBlock block(String title, Disk disk, Equilibrium equilibrium, OutputUnits units, int width) {
     TextBlock block = new TextBlock(width).heading(title).heading("Assumed");
-    of(disk, equilibrium, 0.0, units).forEach((subject, words) -> {
+    of(disk, equilibrium, ANY, units).forEach((subject, words) -> {
       if (!subject.equals("waves")) {
         block.labelled(subject, words);
       }
@@ -60,11 +72,17 @@ public final class Assumptions {
     return kind + "; adiabatic index of the perturbations " + Numbers.given(disk.gasClosure().adiabaticIndex()) + cooling;
   }
 
-  private static String field(Disk disk, GasState bottom, OutputUnits units) {
+  private static String field(Disk disk, Equilibrium equilibrium, OutputUnits units) {
+    GasState bottom = equilibrium.at(equilibrium.bottom());
     if (bottom.magneticPerMass() == 0.0 && !(disk.field() instanceof MagneticField.Balance)) {
       return "none";
     }
     String strength = Numbers.given(units.field(bottom.fieldStrength())) + " " + units.field() + " at the lower end";
+    if (disk.fieldTurn() != 0.0) {
+      strength += ", turning by " + Numbers.plain(Math.toDegrees(disk.fieldTurn()) * units.centimetresPerLength())
+          + " degrees for each " + units.length() + " of height" + (equilibrium.aboutMidplane()
+              ? " on both sides of the midplane, mirror images of each other" : "");
+    }
     if (disk.field() instanceof MagneticField.Balance) {
       return strength + "; at each height what the force balance leaves over";
     }

@@ -27,7 +27,9 @@ public final class ModeText {
       case FLOOR -> "above a rigid floor";
     };
     block.labelled("symmetry", parity + ", order " + mode.order())
-        .labelled("wavelength", Numbers.length(2.0 * Math.PI / mode.wavenumber(), units) + " along the field")
+        .labelled("wavelength", Numbers.length(2.0 * Math.PI / mode.wavenumber(), units)
+            + (disk.fieldTurn() == 0.0 ? " along the field"
+                : " along the wavevector; amplitudes along and across are those of the field at each height"))
         .labelled("growth time", Numbers.time(1.0 / mode.growthRate(), units))
         .labelled("centroid", Numbers.length(mode.centroidHeight(), units) + " (kinetic energy)")
         .labelled("column", mode.parity() == Parity.FLEXING

@@ -29,6 +29,11 @@ public final class SpacingJson {
     json.put("fastest", result.fastest().map(this::peak).orElse(null));
     json.put("branches", result.branches().stream().map(this::peak).toList());
     json.put("spacing", result.spacingPeak().map(this::spacing).orElse(null));
+    if (result.range().direction().isPresent()) {
+      double direction = Math.toDegrees(result.range().direction().getAsDouble());
+      json.put("wave-direction", direction, "deg");
+      json.put("crest-direction", direction > 0.0 ? direction - 90.0 : direction + 90.0, "deg");
+    }
     json.put("limit-across", new Json()
         .put("growth-rate", units.rate(result.acrossLimit().growthRate()), "1/" + units.time())
         .put("wavelength", units.length(2.0 * Math.PI / result.acrossLimit().wavenumber()), units.length())

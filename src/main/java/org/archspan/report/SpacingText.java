@@ -28,12 +28,11 @@ public final class SpacingText {
   }
 
   /** The whole summary, wrapped to a width in characters. */
-  public static String text(String title, Disk disk, double crossWavenumber, SpacingResult result, OutputUnits units,
-      int width) {
+  public static String text(String title, Disk disk, SpacingResult result, OutputUnits units, int width) {
     SpacingText text = new SpacingText(disk, result, units, width);
     text.block.heading(title);
     text.block.heading("Assumed");
-    Assumptions.of(disk, result.equilibrium(), crossWavenumber, units).forEach(text.block::labelled);
+    Assumptions.of(disk, result.equilibrium(), result.range(), units).forEach(text.block::labelled);
     text.baseState();
     text.found();
     text.sure();
@@ -67,7 +66,7 @@ public final class SpacingText {
           + Numbers.change(peak.tallerGrowthChange()) + ".");
     }
     shortAcross();
-    result.longestStableWavelength().ifPresent(shortest -> block.sentence("Waves along the field shorter than "
+    result.longestStableWavelength().ifPresent(shortest -> block.sentence("Waves " + (directed() ? "in that direction" : "along the field") + " shorter than "
         + Numbers.length(shortest, units) + " are stable."));
   }
 
@@ -84,7 +83,7 @@ public final class SpacingText {
   }
 
   private void stable() {
-    block.sentence("Stable: no wave with the given wavelength across the field grows" + range() + ".");
+    block.sentence("Stable: no wave " + whose() + " grows" + range() + ".");
     if (result.acrossLimit().growthRate() > 0.0) {
       block.sentence("Shorter waves across the field do grow: infinitely short ones in "
           + Numbers.time(1.0 / result.acrossLimit().growthRate(), units) + " at a height of "
@@ -137,8 +136,19 @@ public final class SpacingText {
     String parity = peak.continuum() || peak.parity() == Parity.FLOOR ? ""
         : peak.parity() == Parity.MIRROR ? " (mirror-symmetric about the midplane)" : " (flexing the midplane)";
     return who + parity + " has a wavelength of "
-        + Numbers.length(peak.wavelength(), peak.wavelengthError(), units) + " along the field; its growth time is "
+        + Numbers.length(peak.wavelength(), peak.wavelengthError(), units) + whither(result, peak, units) + "; its growth time is "
         + Numbers.time(peak.growthTime(), peak.growthError(), units) + ".";
+  }
+
+  /** Along what the wavelength is measured. */
+  private static String whither(SpacingResult result, BranchPeak peak, OutputUnits units) {
+    if (result.range().direction().isEmpty()) {
+      return " along the field";
+    }
+    double direction = result.range().direction().getAsDouble();
+    String lower = result.equilibrium().aboutMidplane() ? "the field at the midplane" : "the field on the floor";
+    return " at " + Numbers.plain(Math.toDegrees(direction)) + " degrees from " + lower + ", along which its crests are "
+        + Numbers.length(result.range().crestSpacing(peak.wavelength()), units) + " apart";
   }
 
   private void complex(CloudComplex complex) {
@@ -163,7 +173,7 @@ public final class SpacingText {
       return;
     }
     block.sentence("Proved by counting the modes on " + result.certificate().intervals() + " intervals of wavenumber"
-        + " that leave no gap: no wave with the given wavelength across the field grows faster than "
+        + " that leave no gap: no wave " + whose() + " grows faster than "
         + Numbers.rateBound(result.certificate().bound(), units) + range() + ".");
     BranchPeak peak = result.spacingPeak().orElseThrow();
     block.sentence("Estimated relative errors: growth rate below " + Numbers.error(peak.growthError())
@@ -176,9 +186,21 @@ public final class SpacingText {
     return count == 1 ? "one mode" : count + " modes";
   }
 
+  private String along() {
+    return directed() ? "" : " along it";
+  }
+
+  private boolean directed() {
+    return result.range().direction().isPresent();
+  }
+
+  private String whose() {
+    return directed() ? "in that direction" : "with the given wavelength across the field";
+  }
+
   private String range() {
     boolean all = result.certificate().shortest() == 0.0 && Double.isInfinite(result.certificate().longest());
-    return all ? ", at any wavelength along it" : ", at wavelengths along it from "
+    return all ? ", at any wavelength" + along() : ", at wavelengths" + along() + " from "
         + Numbers.length(result.certificate().shortest(), units) + " to "
         + Numbers.length(result.certificate().longest(), units);
   }

@@ -10,7 +10,6 @@ import org.archspan.disk.RefusedModelException;
 import org.archspan.equilibrium.Equilibrium;
 import org.archspan.stability.BranchSolver;
 import org.archspan.stability.GrowthPoint;
-import org.archspan.stability.ModeProblem;
 import org.archspan.stability.Peak;
 
 /** Finds the fastest mode of every branch of every parity over a range of waves. */
@@ -43,8 +42,7 @@ final class BranchSearch {
   BranchSearch(Disk disk, Equilibrium equilibrium, SearchOptions options, WaveRange range, int branches) {
     this.range = range;
     for (Parity parity : parities(options.parities(), equilibrium)) {
-      solvers.add(new BranchSolver(ModeProblem.of(disk, equilibrium, parity, range.crossWavenumber(),
-          options.tolerance())));
+      solvers.add(new BranchSolver(range.problem(disk, equilibrium, parity, options.tolerance())));
     }
     if (Double.isInfinite(solvers.get(0).marginalWavenumber(0)) && Double.isInfinite(range.highest())) {
       throw new RefusedModelException("somewhere the gas has no field and is unstable: growth then rises without limit"

@@ -8,7 +8,6 @@ import org.archspan.disk.RefusedModelException;
 import org.archspan.equilibrium.Equilibrium;
 import org.archspan.stability.BranchSolver;
 import org.archspan.stability.GrowthCurve;
-import org.archspan.stability.ModeProblem;
 
 /** Growth curves for several cross-field wavelengths, orders and parities. Immutable. */
 public final class DispersionStudy {
@@ -25,25 +24,25 @@ public final class DispersionStudy {
     this.options = options;
   }
 
-  /** The cross-field wavenumber of the model, cm^-1. */
-  public double modelCrossWavenumber() {
-    return WaveRange.of(options, equilibrium).crossWavenumber();
-  }
-
   /**
    * The curves; branches that grow nowhere are left out.
    *
-   * @param across cross-field wavenumbers, cm^-1
+   * @param across cross-field wavenumbers, cm^-1; empty: the model's own, or the direction of its waves
    * @param orders mode orders from 0
    * @param points wavelengths on each curve
    * @throws RefusedModelException when growth has no short end and none is given
    */
   public List<GrowthCurve> solve(double[] across, int orders, int points) {
-    WaveRange range = WaveRange.of(options, equilibrium);
+    WaveRange range = WaveRange.of(disk, equilibrium, options);
+    if (range.direction().isPresent() && across.length > 0) {
+      throw new RefusedModelException("wavelengths across the field have no meaning where the field turns (field.turn); fix"
+          + " the direction with waves.direction");
+    }
     List<GrowthCurve> curves = new ArrayList<>();
-    for (double ky : across) {
+    for (double ky : across.length == 0 ? new double[] {range.crossWavenumber()} : across) {
+      WaveRange waves = new WaveRange(range.lowest(), range.highest(), ky, range.direction());
       for (Parity parity : BranchSearch.parities(options.parities(), equilibrium)) {
-        BranchSolver solver = new BranchSolver(ModeProblem.of(disk, equilibrium, parity, ky, options.tolerance()));
+        BranchSolver solver = new BranchSolver(waves.problem(disk, equilibrium, parity, options.tolerance()));
         for (int order = 0; order < orders; order++) {
           curve(solver, order, range, points).ifPresent(curves::add);
         }

@@ -32,6 +32,10 @@ final class Findings {
       findings.aboutSpacing(equilibrium, branches, peak, spacing, options);
       findings.aboutSpacingMode(spacing.map(branches::get).orElse(peak), equilibrium);
     });
+    if (range.direction().isPresent() && options.direction().isEmpty()) {
+      findings.sentences.add("The direction is the best of a scan in steps of 5 degrees, refined; within it the fastest"
+          + " wavelength is proved, between the directions of the scan it is not.");
+    }
     if (disk.selfGravity() == SelfGravity.FULL) {
       findings.aboutGasAbove(equilibrium);
     }
@@ -71,8 +75,8 @@ final class Findings {
       sentences.add("Only waves between waves.shortest and waves.longest were searched: the gas is stable there, and may"
           + " be unstable to others.");
     } else if (range.endsAt(fastest.get().wavenumber())) {
-      sentences.add("The fastest wave lies at the end of the range between waves.shortest and waves.longest: growth"
-          + " rises beyond it.");
+      sentences.add("The fastest wave lies at the end of the range of wavelengths that was searched (waves.shortest,"
+          + " waves.longest): growth rises beyond it.");
     }
   }
 

@@ -8,7 +8,6 @@ import org.archspan.boundary.Parity;
 import org.archspan.disk.Disk;
 import org.archspan.stability.BranchSolver;
 import org.archspan.stability.GrowthCurve;
-import org.archspan.stability.ModeProblem;
 
 /** Growth against wavelength of the branches that are reported. */
 public final class GrowthCurves {
@@ -20,14 +19,14 @@ public final class GrowthCurves {
 
   /** One curve for each branch of a result, from the shortest wave that grows to well beyond the fastest. */
   public static List<GrowthCurve> of(SpacingResult result, Disk disk, SearchOptions options) {
-    WaveRange range = WaveRange.of(options, result.equilibrium());
+    WaveRange range = result.range();
     double slowest = result.branches().stream().mapToDouble(BranchPeak::wavenumber).filter(k -> k > 0.0).min()
         .orElse(0.0);
     Map<Parity, BranchSolver> solvers = new EnumMap<>(Parity.class);
     List<GrowthCurve> curves = new ArrayList<>();
     for (BranchPeak peak : result.branches()) {
       BranchSolver solver = solvers.computeIfAbsent(peak.parity(), parity -> new BranchSolver(
-          ModeProblem.of(disk, result.equilibrium(), parity, range.crossWavenumber(), options.tolerance())));
+          range.problem(disk, result.equilibrium(), parity, options.tolerance())));
       double highest = Math.min(range.highest(), solver.marginalWavenumber(peak.order()));
       double lowest = Math.max(range.lowest(), slowest / LONGEST_OVER_FASTEST);
       if (lowest > 0.0 && lowest < highest && Double.isFinite(highest)) {

@@ -6,7 +6,6 @@ import org.archspan.disk.Disk;
 import org.archspan.equilibrium.Equilibrium;
 import org.archspan.stability.BranchSolver;
 import org.archspan.stability.EigenMode;
-import org.archspan.stability.ModeProblem;
 import org.archspan.stability.Peak;
 
 /** The shape of one mode. Immutable. */
@@ -42,9 +41,8 @@ public final class ModeStudy {
    * @param wavenumber cm^-1; NaN for the fastest of its branch
    */
   public Optional<EigenMode> mode(Parity parity, int order, double wavenumber) {
-    WaveRange range = WaveRange.of(options, equilibrium);
-    BranchSolver solver = new BranchSolver(
-        ModeProblem.of(disk, equilibrium, parity, range.crossWavenumber(), options.tolerance()));
+    WaveRange range = WaveRange.of(disk, equilibrium, options);
+    BranchSolver solver = new BranchSolver(range.problem(disk, equilibrium, parity, options.tolerance()));
     if (Double.isNaN(wavenumber)) {
       return solver.fastest(order, range.lowest(), range.highest(), 0.0).map(Peak::mode);
     }

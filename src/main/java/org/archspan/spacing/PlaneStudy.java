@@ -11,6 +11,7 @@ import org.archspan.disk.Disk;
 import org.archspan.equilibrium.Equilibrium;
 import org.archspan.stability.BranchSolver;
 import org.archspan.stability.GrowthCurve;
+import org.archspan.stability.GrowthPoint;
 import org.archspan.stability.ModeProblem;
 import org.archspan.stability.ShortCrossWaves;
 
@@ -43,7 +44,7 @@ public final class PlaneStudy {
     double[] across = new double[points];
     for (int i = 0; i < points; i++) {
       along[i] = highest * (i + 0.5) / points;
-      across[i] = ACROSS_OVER_ALONG * highest * i / (points - 1);
+      across[i] = turning() ? highest * (2.0 * i / (points - 1) - 1.0) : ACROSS_OVER_ALONG * highest * i / (points - 1);
     }
     double[][] growth = new double[points][points];
     ExecutorService pool = Executors.newFixedThreadPool(threads);
@@ -70,7 +71,7 @@ public final class PlaneStudy {
     ShortCrossWaves limit = new ShortCrossWaves(equilibrium, disk.gasClosure(), disk.cosmicRays().closure());
     double[] limits = new double[points];
     for (int i = 0; i < points; i++) {
-      limits[i] = limit.fastestAt(along[i]).growthRate();
+      limits[i] = turning() ? limit.fastest().growthRate() : limit.fastestAt(along[i]).growthRate();
     }
     return new PlaneResult(along, across, growth, limits);
   }
@@ -89,12 +90,33 @@ public final class PlaneStudy {
     return new BranchSolver(ModeProblem.of(disk, equilibrium, parity, across, options.tolerance()));
   }
 
+  /** Where the field turns, waves that lean to one side differ from those that lean to the other. */
+  private boolean turning() {
+    return disk.fieldTurn() != 0.0;
+  }
+
   private void fill(double[][] growth, int column, double[] along, double across) {
+    if (turning()) {
+      for (int i = 0; i < along.length; i++) {
+        growth[i][column] = directed(along[i], across);
+      }
+      return;
+    }
     for (Parity parity : BranchSearch.parities(options.parities(), equilibrium)) {
       GrowthCurve curve = solver(parity, across).curve(0, along, false);
       for (int i = 0; i < along.length; i++) {
         growth[i][column] = Math.max(growth[i][column], curve.points().get(i).growthRate());
       }
     }
+  }
+
+  private double directed(double along, double across) {
+    double greatest = 0.0;
+    for (Parity parity : BranchSearch.parities(options.parities(), equilibrium)) {
+      BranchSolver solver = new BranchSolver(ModeProblem.turning(disk, equilibrium, parity, Math.atan2(across, along),
+          options.tolerance()));
+      greatest = Math.max(greatest, solver.growth(Math.hypot(along, across), 0).map(GrowthPoint::growthRate).orElse(0.0));
+    }
+    return greatest;
   }
 }

@@ -11,6 +11,7 @@ import org.archspan.equilibrium.Equilibrium;
  *
  * @param equilibrium             base state
  * @param forceBalanceResidual    greatest |dP/dz + rho g| / (rho g), dimensionless
+ * @param range                   waves that were searched
  * @param branches                one entry for each unstable branch, fastest first; empty when stable
  * @param fastest                 the fastest of all: the first branch, or the halo continuum edge
  * @param spacing                 index into {@code branches} of the fastest that gathers the disk's own gas; empty when
@@ -22,15 +23,16 @@ import org.archspan.equilibrium.Equilibrium;
  * @param gatheringHeight         greatest centroid height that counts as gathering the disk's own gas, cm
  * @param warnings                what a reader of the result must know, one sentence each
  */
-public record SpacingResult(Equilibrium equilibrium, double forceBalanceResidual, List<BranchPeak> branches,
+public record SpacingResult(Equilibrium equilibrium, double forceBalanceResidual, WaveRange range, List<BranchPeak> branches,
     Optional<BranchPeak> fastest, Optional<Integer> spacing, AcrossLimit acrossLimit,
-    OptionalDouble longestStableWavelength, Optional<CloudComplex> complex, Certificate certificate, double gatheringHeight, List<String> warnings) {
+    OptionalDouble longestStableWavelength, Optional<CloudComplex> complex, Certificate certificate,
+    double gatheringHeight, List<String> warnings) {
 
   /** The same result with one more warning. */
   public SpacingResult warned(String warning) {
     List<String> more = new ArrayList<>(warnings);
     more.add(warning);
-    return new SpacingResult(equilibrium, forceBalanceResidual, branches, fastest, spacing, acrossLimit,
+    return new SpacingResult(equilibrium, forceBalanceResidual, range, branches, fastest, spacing, acrossLimit,
         longestStableWavelength, complex, certificate, gatheringHeight, List.copyOf(more));
   }
 

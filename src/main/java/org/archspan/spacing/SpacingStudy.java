@@ -33,7 +33,7 @@ public final class SpacingStudy {
   public SpacingResult solve() {
     Equilibrium equilibrium = EquilibriumBuilder.build(disk, options.tolerance());
     double residual = ForceBalance.required(equilibrium);
-    WaveRange range = WaveRange.of(options, equilibrium);
+    WaveRange range = WaveRange.of(disk, equilibrium, options);
     BranchSearch search = new BranchSearch(disk, equilibrium, options, range, options.branches());
     DomainInfluence influence = new DomainInfluence(disk, equilibrium, options, range);
     List<BranchPeak> branches = influence.judge(search.found()).stream()
@@ -42,9 +42,9 @@ public final class SpacingStudy {
     double gatheringHeight = options.gatheringHeight().resolve(equilibrium.scaleHeight());
     Optional<Integer> spacing = gathering(branches, equilibrium.bottom() + gatheringHeight);
     Optional<CloudComplex> complex = spacing.map(branches::get).or(() -> fastest)
-        .filter(peak -> peak.wavenumber() > 0.0).map(peak -> complex(equilibrium, peak));
+        .filter(peak -> peak.wavenumber() > 0.0).map(peak -> complex(equilibrium, peak, range));
     AcrossLimit acrossLimit = acrossLimit(equilibrium);
-    return new SpacingResult(equilibrium, residual, branches, fastest, spacing,
+    return new SpacingResult(equilibrium, residual, range, branches, fastest, spacing,
         acrossLimit, longestStable(search), complex, search.certificate(), gatheringHeight,
         Findings.of(disk, equilibrium, branches, fastest, spacing, acrossLimit, options, range));
   }
@@ -80,8 +80,8 @@ public final class SpacingStudy {
         : OptionalDouble.empty();
   }
 
-  private CloudComplex complex(Equilibrium equilibrium, BranchPeak peak) {
-    double perWidth = equilibrium.surfaceDensity() * peak.wavelength();
+  private CloudComplex complex(Equilibrium equilibrium, BranchPeak peak, WaveRange range) {
+    double perWidth = equilibrium.surfaceDensity() * range.crestSpacing(peak.wavelength());
     OptionalDouble mass = arm.width().isPresent() ? OptionalDouble.of(perWidth * arm.width().getAsDouble())
         : OptionalDouble.empty();
     OptionalDouble eFoldings = arm.crossingTime().isPresent()

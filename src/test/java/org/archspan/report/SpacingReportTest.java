@@ -64,7 +64,7 @@ class SpacingReportTest {
   }
 
   private static String text(Disk disk, SpacingResult result, int width) {
-    return SpacingText.text("a title", disk, 0.0, result, OutputUnits.galactic(), width);
+    return SpacingText.text("a title", disk, result, OutputUnits.galactic(), width);
   }
 
   @Test
