@@ -14,6 +14,7 @@ import org.archspan.disk.Domain;
 import org.archspan.disk.Gas;
 import org.archspan.disk.Height;
 import org.archspan.disk.MagneticField;
+import org.archspan.disk.SelfGravity;
 import org.archspan.equilibrium.Equilibrium;
 import org.archspan.equilibrium.EquilibriumBuilder;
 import org.archspan.gravity.TanhGravity;
@@ -22,7 +23,7 @@ import org.archspan.modelfile.ShippedModels;
 import org.archspan.stability.ModeProblem;
 import org.archspan.units.Constants;
 
-/** The two models of the race, the same as in {@code peer/base_states.py}. */
+/** The models of the race, the same as in {@code peer/base_states.py}. */
 final class Cases {
   static final double TOLERANCE = 1e-8;
 
@@ -36,6 +37,14 @@ final class Cases {
         List.of(new TanhGravity(3.0, 1.0)), Domain.aboutMidplane(Optional.of(Height.centimetres(10.0)), TopBoundary.LID));
   }
 
+  /** The same with the gas's own gravity: 4 pi G rho = 1 at the midplane, in the base state and on the perturbations. */
+  static Disk heavy() {
+    Disk light = tanh();
+    double density = 1.0 / (4.0 * Math.PI * Constants.GRAVITATIONAL_CONSTANT);
+    return new Disk(new Gas.Isothermal(1.0, OptionalDouble.of(density), OptionalDouble.empty()), light.gasClosure(),
+        SelfGravity.FULL, light.field(), light.cosmicRays(), light.gravity(), Optional.empty(), light.domain());
+  }
+
   /** The thick disk near the Sun, lid at 5 kpc. */
   static Disk thick() {
     try {
@@ -47,17 +56,21 @@ final class Cases {
   }
 
   static Disk disk(String model) {
-    return model.equals("tanh") ? tanh() : thick();
+    return switch (model) {
+      case "tanh" -> tanh();
+      case "heavy" -> heavy();
+      default -> thick();
+    };
   }
 
   /** The wavenumber along the field at which one growth rate is timed. */
   static double along(String model) {
-    return model.equals("tanh") ? 0.4 : 2.0 * Math.PI / (3000.0 * Constants.PARSEC);
+    return !model.equals("thick") ? 0.4 : 2.0 * Math.PI / (3000.0 * Constants.PARSEC);
   }
 
   /** The wavenumber across: none, or oblique. */
   static double across(String model, boolean oblique) {
-    return !oblique ? 0.0 : model.equals("tanh") ? 1.0 : along(model);
+    return !oblique ? 0.0 : !model.equals("thick") ? 1.0 : along(model);
   }
 
   static ModeProblem problem(String model, boolean oblique, Parity parity) {
@@ -66,6 +79,6 @@ final class Cases {
 
   static ModeProblem problem(Disk disk, double across, Parity parity) {
     Equilibrium equilibrium = EquilibriumBuilder.build(disk, TOLERANCE);
-    return new ModeProblem(equilibrium, disk.gasClosure(), disk.cosmicRays().closure(), parity, across, TOLERANCE);
+    return ModeProblem.of(disk, equilibrium, parity, across, TOLERANCE);
   }
 }

@@ -27,7 +27,7 @@ public class CurveBenchmark {
   private static final int POINTS = 100;
 
   /** Model. */
-  @Param({"tanh", "thick"})
+  @Param({"tanh", "thick", "heavy"})
   public String model;
 
   /** Whether ky is positive. */

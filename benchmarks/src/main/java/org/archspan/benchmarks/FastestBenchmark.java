@@ -25,7 +25,7 @@ import org.openjdk.jmh.annotations.Warmup;
 @Fork(2)
 public class FastestBenchmark {
   /** Model. */
-  @Param({"tanh", "thick"})
+  @Param({"tanh", "thick", "heavy"})
   public String model;
 
   /** Symmetry. */
