@@ -1,5 +1,9 @@
 package org.archspan.cli;
 
+import java.io.File;
+import java.io.IOException;
+import java.net.URL;
+import java.util.jar.JarFile;
 import org.archspan.disk.RefusedModelException;
 import org.archspan.modelfile.UnreadableFileException;
 import org.archspan.stability.UnsolvedException;
@@ -11,34 +15,41 @@ import picocli.CommandLine.IVersionProvider;
 /** The command line. */
 @Command(name = "archspan", mixinStandardHelpOptions = true, versionProvider = Main.Version.class,
     description = "Magnetic buoyancy of gas disks and stellar atmospheres: which wave wins, how fast it grows, how far"
-        + " apart the clouds stand.",
-    subcommands = {SpacingCommand.class, EquilibriumCommand.class, DispersionCommand.class, ModeCommand.class,
-        PlaneCommand.class, CheckCommand.class, ModelsCommand.class})
+        + " apart the clouds stand.")
 public final class Main {
   private Main() {
   }
 
-  /** The version in the manifest of the jar. */
+  /** The version and the commit in the manifest of the jar. */
   static final class Version implements IVersionProvider {
     @Override
-    public String[] getVersion() {
+    public String[] getVersion() throws IOException {
       String version = Main.class.getPackage().getImplementationVersion();
-      return new String[] {"Archspan " + (version == null ? "(not packaged)" : version)};
+      return new String[] {"Archspan " + (version == null ? "(not packaged)" : version + commit())};
+    }
+
+    private static String commit() throws IOException {
+      URL code = Main.class.getProtectionDomain().getCodeSource().getLocation();
+      try (JarFile jar = new JarFile(new File(code.getPath()))) {
+        String commit = jar.getManifest().getMainAttributes().getValue("Source-Commit");
+        return commit == null || commit.startsWith("$") ? "" : " (" + commit + ")";
+      }
     }
   }
 
   /** Runs a command and exits with its status. */
   public static void main(String[] arguments) {
     System.setProperty("java.awt.headless", "true");
-    System.exit(commandLine().execute(arguments));
+    System.exit(commandLine(arguments).execute(arguments));
   }
 
-  /** The configured parser, for {@link #main} and for tests. */
-  static CommandLine commandLine() {
+  /** The configured parser for what is called; for anything when nothing is said. */
+  static CommandLine commandLine(String... arguments) {
     CommandLine commandLine = new CommandLine(new Main());
+    new CommandList().addTo(commandLine, arguments);
     commandLine.setUsageHelpAutoWidth(true);
     commandLine.setExecutionExceptionHandler(Main::report);
-    commandLine.setParameterExceptionHandler((fault, arguments) -> {
+    commandLine.setParameterExceptionHandler((fault, given) -> {
       fault.getCommandLine().getErr().println(fault.getMessage());
       fault.getCommandLine().getErr().println("See archspan "
           + (fault.getCommandLine().getParent() == null ? "" : fault.getCommandLine().getCommandName() + " ")

@@ -17,13 +17,12 @@ final class SpacingCommand extends ModelCommand {
   @Override
   void solve(Model model) throws IOException {
     SpacingResult result = solved(model);
-    String json = SpacingJson.text(echo(model), result, model.units());
     if (common.out != null) {
       String text = SpacingText.text(model.title(), model.disk(), result, model.units(), 88);
-      new SpacingFiles(result, model.disk(), model.options(), model.units()).write(common.out, json, text,
-          echo(model), common.overwrite);
+      new SpacingFiles(result, model.disk(), model.options(), model.units()).write(common.out,
+          SpacingJson.text(echo(model), result, model.units()), text, echo(model), common.overwrite);
     }
-    print(() -> json,
+    print(() -> SpacingJson.text(echo(model), result, model.units()),
         () -> SpacingText.text(model.title(), model.disk(), result, model.units(), width()));
   }
 

@@ -181,4 +181,19 @@ class CommandsTest {
         .getAsJsonObject("wavelength");
     assertThat(wavelength.get("unit").getAsString()).isEqualTo("Mm");
   }
+
+  /** Every command has a page for man(1) with its options, and the shell script completes every command. */
+  @Test
+  void theManualAndTheCompletionKnowEveryCommand() {
+    String completion = CommandRun.of("completion").out();
+    String program = CommandRun.of("manual").out();
+    for (String name : Main.commandLine().getSubcommands().keySet()) {
+      String page = CommandRun.of("manual", name).out();
+      assertThat(page).startsWith(".TH ARCHSPAN-" + name.toUpperCase(java.util.Locale.ROOT))
+          .contains(".SH OPTIONS").contains("\\-\\-help").contains(".SH EXIT STATUS");
+      assertThat(program).contains(".B " + name.replace("-", "\\-") + "\n");
+      assertThat(completion).contains(name);
+    }
+    assertThat(CommandRun.of("manual", "spaceing").err()).contains("did you mean spacing?");
+  }
 }
