@@ -16,6 +16,7 @@ final class CommandList {
     commands.put("dispersion", DispersionCommand::new);
     commands.put("mode", ModeCommand::new);
     commands.put("plane", PlaneCommand::new);
+    commands.put("compare", CompareCommand::new);
     commands.put("check", CheckCommand::new);
     commands.put("models", ModelsCommand::new);
     commands.put("manual", ManualCommand::new);

@@ -34,6 +34,11 @@ abstract class ModelCommand implements Callable<Integer> {
       throw new ParameterException(spec.commandLine(), fault);
     });
     solve(read());
+    return status();
+  }
+
+  /** The exit status once it is solved. */
+  int status() {
     return ExitStatus.SOLVED;
   }
 

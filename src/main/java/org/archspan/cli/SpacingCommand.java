@@ -1,6 +1,7 @@
 package org.archspan.cli;
 
 import java.io.IOException;
+import org.archspan.disk.Disk;
 import org.archspan.modelfile.Model;
 import org.archspan.report.SpacingJson;
 import org.archspan.report.SpacingText;
@@ -16,7 +17,7 @@ import picocli.CommandLine.Command;
 final class SpacingCommand extends ModelCommand {
   @Override
   void solve(Model model) throws IOException {
-    SpacingResult result = solved(model);
+    SpacingResult result = solved(model.disk(), model);
     if (common.out != null) {
       String text = SpacingText.text(model.title(), model.disk(), result, model.units(), 88);
       new SpacingFiles(result, model.disk(), model.options(), model.units()).write(common.out,
@@ -26,9 +27,10 @@ final class SpacingCommand extends ModelCommand {
         () -> SpacingText.text(model.title(), model.disk(), result, model.units(), width()));
   }
 
-  private static SpacingResult solved(Model model) {
-    SpacingResult result = new SpacingStudy(model.disk(), model.options(), model.arm()).solve();
-    return model.disk().rotation().isEmpty() ? result
+  /** The answer for a disk with the waves and the arm of a model. */
+  static SpacingResult solved(Disk disk, Model model) {
+    SpacingResult result = new SpacingStudy(disk, model.options(), model.arm()).solve();
+    return disk.rotation().isEmpty() ? result
         : result.warned("Rotation is given in the model but is not solved by this version: it is not in this result,"
             + " and it would slow long waves along the field.");
   }

@@ -36,4 +36,9 @@ public record Disk(Gas gas, GasClosure gasClosure, SelfGravity selfGravity, Magn
   public Disk withoutRotation() {
     return new Disk(gas, gasClosure, selfGravity, field, fieldTurn, cosmicRays, gravity, Optional.empty(), domain);
   }
+
+  /** The same disk of another gas. */
+  public Disk withGas(Gas other) {
+    return new Disk(other, gasClosure, selfGravity, field, fieldTurn, cosmicRays, gravity, rotation, domain);
+  }
 }

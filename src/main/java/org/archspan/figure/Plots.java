@@ -60,7 +60,7 @@ final class Plots {
     return axis;
   }
 
-  private static void dress(ValueAxis axis, FigureStyle style) {
+  static void dress(ValueAxis axis, FigureStyle style) {
     axis.setLabelFont(style.font());
     axis.setTickLabelFont(style.font());
     axis.setLabelPaint(style.ink());

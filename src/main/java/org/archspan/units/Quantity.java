@@ -33,6 +33,12 @@ public record Quantity(double value, Dimension dimension) {
     return new Quantity(value, unit.dimension());
   }
 
+  /** The unit that follows the number of a text, as written; empty where there is none, or no number. */
+  public static String unitOf(String text) {
+    Matcher matcher = NUMBER.matcher(text);
+    return text.length() <= LONGEST && matcher.matches() ? matcher.group(2) : "";
+  }
+
   private static String shortened(String text) {
     return text.length() <= 60 ? text : text.substring(0, 57) + "...";
   }

@@ -41,7 +41,7 @@ class ArchitectureTest {
   private static final List<String> MODEL = List.of("units", "gravity", "closure", "field", "boundary");
   private static final List<String> KERNELS = List.of("linalg", "mesh");
   private static final List<String> NUMBERS = join(List.of(MODEL, KERNELS,
-      List.of("disk", "equilibrium", "stability", "spacing")));
+      List.of("disk", "equilibrium", "stability", "spacing", "comparison")));
 
   /** Every package and the packages that it may use; a new package is added here. */
   private static Map<String, List<String>> mayUse() {
@@ -53,11 +53,12 @@ class ArchitectureTest {
     table.put("mesh", List.of("linalg"));
     table.put("equilibrium", join(List.of(MODEL, KERNELS, List.of("disk"))));
     table.put("stability", join(List.of(MODEL, KERNELS, List.of("disk", "equilibrium"))));
-    table.put("spacing", NUMBERS);
+    table.put("spacing", join(List.of(MODEL, KERNELS, List.of("disk", "equilibrium", "stability"))));
+    table.put("comparison", join(List.of(MODEL, List.of("disk", "equilibrium", "stability", "spacing"))));
     table.put("table", NUMBERS);
     table.put("figure", NUMBERS);
     table.put("report", join(List.of(NUMBERS, List.of("table", "figure"))));
-    table.put("modelfile", join(List.of(MODEL, List.of("disk", "spacing"))));
+    table.put("modelfile", join(List.of(MODEL, List.of("disk", "spacing", "comparison"))));
     table.put("cli", join(List.of(NUMBERS, List.of("table", "figure", "report", "modelfile"))));
     return table;
   }
