@@ -21,4 +21,14 @@ public sealed interface Gas {
    */
   record Stratified(List<GasStratum> strata, OptionalDouble dispersion) implements Gas {
   }
+
+  /**
+   * An atmosphere of layers, each with its own temperature; exactly one of the two amounts is present.
+   *
+   * @param layers         from below, at least one
+   * @param bottomDensity  at the lower end, g cm^-3
+   * @param surfaceDensity g cm^-2
+   */
+  record Layered(List<GasLayer> layers, OptionalDouble bottomDensity, OptionalDouble surfaceDensity) implements Gas {
+  }
 }

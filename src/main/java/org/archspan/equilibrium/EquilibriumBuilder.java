@@ -31,9 +31,10 @@ public final class EquilibriumBuilder {
     requireGravity(disk);
     Stratification stratification = stratification(disk, gravity, bottom);
     double sides = disk.domain().aboutMidplane() ? 2.0 : 1.0;
-    double surfaceDensity = sides * columnAbove(stratification, bottom);
+    double surfaceDensity = sides * stratification.columnAbove(bottom);
     double scaleHeight = surfaceDensity / (sides * Math.exp(stratification.logDensity(bottom)));
     DomainEnd end = DomainEnd.of(closedWhereTurning(disk), stratification, bottom, scaleHeight, tolerance);
+    LayeredBuild.requireInside(disk, bottom, end.top());
     if (stratification instanceof BalanceStratification balance) {
       FieldSupport.require(balance, bottom, end.top());
     }
@@ -83,6 +84,9 @@ public final class EquilibriumBuilder {
   private static Stratification stratification(Disk disk, ExternalGravity gravity, double bottom) {
     if (disk.gas() instanceof Gas.Stratified stratified) {
       return BalanceSplit.build(disk, stratified, gravity, bottom);
+    }
+    if (LayeredBuild.suits(disk)) {
+      return LayeredBuild.build(disk, gravity, bottom);
     }
     double[] dispersionSquared = dispersionSquared(disk.gas());
     if (disk.gas() instanceof Gas.Isothermal gas && gas.surfaceDensity().isPresent()) {
@@ -136,7 +140,7 @@ public final class EquilibriumBuilder {
     return disk.selfGravity() == SelfGravity.OFF ? light : light.withOwnGravity();
   }
 
-  private static double magneticRatio(MagneticField field, double gasPressure) {
+  static double magneticRatio(MagneticField field, double gasPressure) {
     if (field instanceof MagneticField.ConstantRatio constant) {
       return constant.pressureRatio();
     }
@@ -154,16 +158,10 @@ public final class EquilibriumBuilder {
     return ((CosmicRays.BottomPressure) cosmicRays).pressure() / gasPressure;
   }
 
-  /** Column of gas above a level, g cm^-2. */
-  static double columnAbove(Stratification stratification, double bottom) {
-    HeightPanels panels = HeightPanels.of(stratification::logDensity, bottom, stratification.landmarks(),
-        stratification.kinks(), stratification.greatestHeight());
-    return panels.integrate(z -> Math.exp(stratification.logDensity(z)));
-  }
-
-  /** A length in parsecs for messages. */
+  /** A length for messages: in parsecs, or in megametres where that is the smaller number of the two to read. */
   static String parsecs(double length) {
-    return String.format(Locale.ROOT, "%.4g pc", length / Constants.PARSEC);
+    return Math.abs(length) < 1e-6 * Constants.PARSEC ? String.format(Locale.ROOT, "%.4g Mm", length / 1e8)
+        : String.format(Locale.ROOT, "%.4g pc", length / Constants.PARSEC);
   }
 
 }

@@ -18,6 +18,8 @@ public final class ForceBalance {
   private static final int MOST_PIECES = 400;
   /** Rounding of two pressures, relative: the drop between them cannot be known better. */
   private static final double ROUNDING = 1e-15;
+  private static final double AGREEMENT = 1e-13;
+  private static final int MOST_HALVINGS = 12;
 
   private ForceBalance() {
   }
@@ -83,9 +85,22 @@ public final class ForceBalance {
     int pieces = (int) Math.min(MOST_PIECES, Math.ceil(1.0 + fall));
     double sum = 0.0;
     for (int i = 0; i < pieces; i++) {
-      sum += HeightPanels.integrate(weight, from + (to - from) * i / pieces, from + (to - from) * (i + 1) / pieces);
+      double left = from + (to - from) * i / pieces;
+      double right = from + (to - from) * (i + 1) / pieces;
+      sum += integrate(weight, left, right, HeightPanels.integrate(weight, left, right), MOST_HALVINGS);
     }
     return sum;
+  }
+
+  /** Halves a piece until the rule gives the same on both halves. */
+  private static double integrate(DoubleUnaryOperator weight, double from, double to, double whole, int halvings) {
+    double middle = 0.5 * (from + to);
+    double left = HeightPanels.integrate(weight, from, middle);
+    double right = HeightPanels.integrate(weight, middle, to);
+    if (halvings == 0 || Math.abs(left + right - whole) <= AGREEMENT * Math.abs(whole)) {
+      return left + right;
+    }
+    return integrate(weight, from, middle, left, halvings - 1) + integrate(weight, middle, to, right, halvings - 1);
   }
 
   private static double pressure(GasState state, double referenceLogDensity) {

@@ -15,7 +15,7 @@ import org.archspan.units.Constants;
 final class GasGravity implements GravityLaw {
   private static final ReferenceElement RULE = ReferenceElement.ofDegree(16);
   private static final int NODES = RULE.degree() + 1;
-  private static final double[] RUNNING_INTEGRAL = runningIntegral();
+  private static final double[] RUNNING_INTEGRAL = RunningIntegral.matrix(RULE);
   private static final double WIDEST_EFOLDINGS = 1.0;
   private static final double GROWTH = 1.5;
   /** Gas left above the last panel, relative to the column below it. */
@@ -37,22 +37,6 @@ final class GasGravity implements GravityLaw {
 
   private static double fourPiG() {
     return 4.0 * Math.PI * Constants.GRAVITATIONAL_CONSTANT;
-  }
-
-  /** Row-major: entry (i, j) integrates the polynomial that is 1 at node j from -1 to node i. */
-  private static double[] runningIntegral() {
-    double[] matrix = new double[NODES * NODES];
-    double[] values = new double[NODES];
-    for (int i = 0; i < NODES; i++) {
-      double half = 0.5 * (RULE.nodes()[i] + 1.0);
-      for (int q = 0; q < NODES; q++) {
-        RULE.interpolate(-1.0 + half * (1.0 + RULE.nodes()[q]), values);
-        for (int j = 0; j < NODES; j++) {
-          matrix[i * NODES + j] += half * RULE.weights()[q] * values[j];
-        }
-      }
-    }
-    return matrix;
   }
 
   /**

@@ -29,7 +29,7 @@ final class MidplaneDensity {
       double bottom, boolean aboutMidplane, double dispersionSquared, double startingDensity) {
     double sides = aboutMidplane ? 2.0 : 1.0;
     UnivariateFunction excess = logDensity -> Math.log(
-        sides * EquilibriumBuilder.columnAbove(state.apply(Math.exp(logDensity)), bottom) / surfaceDensity);
+        sides * state.apply(Math.exp(logDensity)).columnAbove(bottom) / surfaceDensity);
     double start = Math.log(startingDensity);
     double high = start;
     for (int step = 0; excess.value(high) < 0.0 && step < MOST_EVALUATIONS; step++) {

@@ -16,4 +16,10 @@ interface Stratification {
 
   /** Greatest height for which the state is defined, cm. */
   double greatestHeight();
+
+  /** Column of gas above a level (cm), g cm^-2. */
+  default double columnAbove(double bottom) {
+    return HeightPanels.of(this::logDensity, bottom, landmarks(), kinks(), greatestHeight())
+        .integrate(z -> Math.exp(logDensity(z)));
+  }
 }

@@ -15,7 +15,11 @@ final class FieldReader {
   }
 
   MagneticField field(Gas gas) {
-    inputs.oneOf("field.pressure-ratio", "field.strength");
+    inputs.oneOf("field.pressure-ratio", "field.strength", "field.plasma-beta");
+    if (inputs.text("field.shape").orElse("constant-ratio").equals("sheet")) {
+      return sheet();
+    }
+    refuseOutsideSheet();
     boolean balance = inputs.text("field.shape").orElse("constant-ratio").equals("balance");
     if (gas instanceof Gas.Stratified stratified) {
       return balance(stratified, balance);
@@ -25,8 +29,34 @@ final class FieldReader {
           "a field that the balance leaves over needs a prescribed stratification");
     }
     OptionalDouble strength = inputs.number("field.strength");
+    if (inputs.given("field.plasma-beta")) {
+      return new MagneticField.ConstantRatio(1.0 / inputs.number("field.plasma-beta").orElse(Double.NaN));
+    }
     return strength.isPresent() ? new MagneticField.BottomStrength(strength.getAsDouble())
         : new MagneticField.ConstantRatio(inputs.number("field.pressure-ratio").orElse(0.0));
+  }
+
+  private MagneticField sheet() {
+    inputs.exactlyOneOf("field.pressure-ratio", "field.strength", "field.plasma-beta");
+    double bottom = inputs.required("field.bottom", "a flux sheet begins somewhere");
+    double top = inputs.number("field.top").orElse(Double.POSITIVE_INFINITY);
+    double edge = inputs.required("field.edge", "the half-width of the edges of a flux sheet");
+    if (!(top - bottom >= 2.0 * edge) && inputs.valid("field.top") && inputs.valid("field.bottom")) {
+      inputs.fault("field.top", "found " + inputs.shown("field.top"),
+          "a flux sheet must be at least two edges (field.edge) thick");
+    }
+    OptionalDouble beta = inputs.number("field.plasma-beta");
+    OptionalDouble ratio = beta.isPresent() ? OptionalDouble.of(1.0 / beta.getAsDouble())
+        : inputs.number("field.pressure-ratio");
+    return new MagneticField.Sheet(bottom, top, edge, ratio, inputs.number("field.strength"));
+  }
+
+  private void refuseOutsideSheet() {
+    for (String key : new String[] {"field.bottom", "field.top", "field.edge"}) {
+      if (inputs.given(key)) {
+        inputs.fault(key, "given without field.shape = \"sheet\"", "set the shape, or remove it");
+      }
+    }
   }
 
   private MagneticField balance(Gas.Stratified gas, boolean shapeIsBalance) {
@@ -38,8 +68,10 @@ final class FieldReader {
         inputs.missing("field.shape", allowed);
       }
     }
-    if (inputs.given("field.pressure-ratio")) {
-      inputs.fault("field.pressure-ratio", "given beside gas.stratum", "the balance decides the ratio; remove it");
+    for (String key : new String[] {"field.pressure-ratio", "field.plasma-beta"}) {
+      if (inputs.given(key)) {
+        inputs.fault(key, "given beside gas.stratum", "the balance decides the ratio; remove it");
+      }
     }
     if (gas.dispersion().isPresent() == inputs.given("field.strength")) {
       String allowed = "with gas.stratum give exactly one of gas.dispersion and field.strength; the other follows";

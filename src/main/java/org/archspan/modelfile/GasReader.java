@@ -7,6 +7,7 @@ import java.util.OptionalDouble;
 import org.archspan.closure.GasClosure;
 import org.archspan.disk.Gas;
 import org.archspan.disk.GasComponent;
+import org.archspan.disk.GasLayer;
 import org.archspan.disk.GasStratum;
 import org.archspan.disk.SelfGravity;
 import org.archspan.units.Constants;
@@ -15,6 +16,7 @@ import org.archspan.units.Constants;
 final class GasReader {
   private static final String COMPONENT = "gas.component";
   private static final String STRATUM = "gas.stratum";
+  private static final String LAYER = "gas.layer";
   private final Inputs inputs;
 
   GasReader(Inputs inputs) {
@@ -40,8 +42,16 @@ final class GasReader {
   Gas gas() {
     int components = inputs.tables(COMPONENT);
     int strata = inputs.tables(STRATUM);
+    int layers = inputs.tables(LAYER);
+    if (layers > 0 && components + strata > 0) {
+      inputs.fault(LAYER + ".1", "given beside components or strata", "give layers, or components, or strata");
+    }
     if (components > 0 && strata > 0) {
       inputs.fault(STRATUM + ".1", "given beside " + COMPONENT, "give either components or strata");
+    }
+    if (layers > 0) {
+      refuseBeside(LAYER, "gas.dispersion", "gas.temperature");
+      return layered(layers);
     }
     if (strata > 0) {
       return stratified(strata);
@@ -114,5 +124,45 @@ final class GasReader {
           inputs.required(table + ".height", "each stratum needs one")));
     }
     return new Gas.Stratified(List.copyOf(strata), dispersion(false));
+  }
+
+  private Gas layered(int count) {
+    inputs.exactlyOneOf("gas.midplane-density", "gas.surface-density");
+    List<GasLayer> layers = new ArrayList<>();
+    for (int i = 1; i <= count; i++) {
+      layers.add(layer(LAYER + "." + i, layers));
+    }
+    return new Gas.Layered(List.copyOf(layers), inputs.number("gas.midplane-density"),
+        inputs.number("gas.surface-density"));
+  }
+
+  /** The lowest layer needs neither a lower end nor a blend; each other begins above the one below. */
+  private GasLayer layer(String table, List<GasLayer> below) {
+    double speed = layerSpeed(table);
+    if (below.isEmpty()) {
+      if (inputs.given(table + ".blend")) {
+        inputs.fault(table + ".blend", "given for the lowest layer", "it has no layer below to blend into; remove it");
+      }
+      return new GasLayer(inputs.number(table + ".from").orElse(0.0), speed * speed, 1.0);
+    }
+    double from = inputs.required(table + ".from", "a layer above another begins somewhere");
+    double blend = inputs.required(table + ".blend", "the half-width of the change from the layer below");
+    boolean first = below.size() == 1 && !inputs.given(LAYER + ".1.from");
+    if (!first && from <= below.get(below.size() - 1).from()) {
+      inputs.fault(table + ".from", "found " + inputs.shown(table + ".from"),
+          "layers are listed from below: it must exceed that of the layer before");
+    }
+    return new GasLayer(from, speed * speed, blend);
+  }
+
+  private double layerSpeed(String table) {
+    inputs.exactlyOneOf(table + ".temperature", table + ".dispersion");
+    if (!inputs.given(table + ".temperature")) {
+      return inputs.number(table + ".dispersion").orElse(Double.NaN);
+    }
+    double weight = inputs.required("gas.mean-molecular-weight",
+        "a temperature becomes a speed only with gas.mean-molecular-weight");
+    return Math.sqrt(Constants.BOLTZMANN_CONSTANT * inputs.number(table + ".temperature").orElse(Double.NaN)
+        / (weight * Constants.ATOMIC_MASS));
   }
 }

@@ -124,11 +124,12 @@ public final class Schema {
 
   private static void field(List<KeySpec> specs) {
     specs.add(number("field.pressure-ratio", NOT_NEGATIVE, "0", "alpha, magnetic over gas pressure"));
-    specs.add(quantity("field.strength", "uG", NOT_NEGATIVE, "none", "at the midplane or on the floor"));
+    specs.add(number("field.plasma-beta", POSITIVE, "none", "gas over magnetic pressure: instead of the pressure ratio"));
+    specs.add(quantity("field.strength", "uG", NOT_NEGATIVE, "none", "at the midplane or on the floor; in the middle of a flux sheet"));
     specs.add(choice("field.shape", "constant-ratio", "how the field falls with height", "constant-ratio", "balance",
         "sheet", "table"));
     specs.add(quantity("field.bottom", "Mm", ANY, "none", "lower end of a flux sheet"));
-    specs.add(quantity("field.top", "Mm", ANY, "none", "upper end of a flux sheet"));
+    specs.add(quantity("field.top", "Mm", ANY, "none", "upper end of a flux sheet; none: it fills the space above"));
     specs.add(quantity("field.edge", "Mm", POSITIVE, "none", "half-width of its edges"));
     specs.add(new KeySpec("field.file", TEXT, "", ANY, List.of(), "none", "table of the field"));
     specs.add(quantity("field.turn", "rad/kpc", ANY, "none", "rate at which the direction turns with height"));
@@ -170,7 +171,7 @@ public final class Schema {
     specs.add(choice("waves.parity", "both", "symmetry about the midplane", "mirror", "flexing", "both"));
     specs.add(height("waves.shortest", "found automatically", "shortest wave to search"));
     specs.add(height("waves.longest", "found automatically", "longest wave to search"));
-    specs.add(height("waves.gathering-height", "2 scale-heights",
+    specs.add(height("waves.gathering-height", "2 scale-heights about a midplane, none above a floor",
         "greatest centroid height of a mode that gathers the disk's own gas"));
     specs.add(new KeySpec("waves.branches", INTEGER, "", COUNT, List.of(), "6", "branches reported for each parity"));
     specs.add(quantity("arm.width", "pc", POSITIVE, "none", "width of the spiral arm"));

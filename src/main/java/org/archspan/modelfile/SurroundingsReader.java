@@ -54,8 +54,15 @@ final class SurroundingsReader {
         .orElse(standard.parities());
     inOrder("waves.shortest", inputs.height("waves.shortest"), "waves.longest", inputs.height("waves.longest"));
     return new SearchOptions(crossWavelength(arm), parities, inputs.height("waves.shortest"),
-        inputs.height("waves.longest"), inputs.number("waves.direction"), inputs.height("waves.gathering-height").orElse(standard.gatheringHeight()),
+        inputs.height("waves.longest"), inputs.number("waves.direction"), gatheringHeight(standard),
         tolerance, (int) inputs.number("waves.branches").orElse(standard.branches()));
+  }
+
+  /** Above a floor there is no midplane whose gas a mode must gather, unless a height is asked for. */
+  private Height gatheringHeight(SearchOptions standard) {
+    Height unasked = inputs.height("domain.bottom").isPresent() ? Height.centimetres(Double.POSITIVE_INFINITY)
+        : standard.gatheringHeight();
+    return inputs.height("waves.gathering-height").orElse(unasked);
   }
 
   private Optional<Height> crossWavelength(Arm arm) {

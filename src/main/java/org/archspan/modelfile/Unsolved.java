@@ -5,8 +5,7 @@ import java.util.List;
 /** Physics that the model file can describe but this version does not solve: refused, never ignored. */
 final class Unsolved {
   private static final String ALLOWED = "known, but not solved by this version; remove it";
-  private static final List<String> KEYS = List.of("field.bottom", "field.top",
-      "field.edge", "field.file");
+  private static final List<String> KEYS = List.of("field.file");
 
   private Unsolved() {
   }
@@ -17,10 +16,7 @@ final class Unsolved {
         inputs.fault(key, "found " + inputs.shown(key), ALLOWED);
       }
     }
-    if (inputs.tables("gas.layer") > 0) {
-      inputs.fault("gas.layer.1", "found a layered atmosphere", ALLOWED);
-    }
-    inputs.text("field.shape").filter(word -> word.equals("sheet") || word.equals("table"))
+    inputs.text("field.shape").filter(word -> word.equals("table"))
         .ifPresent(word -> inputs.fault("field.shape", "found \"" + word + "\"", ALLOWED));
   }
 }

@@ -9,6 +9,7 @@ import org.archspan.closure.CosmicRayClosure;
 import org.archspan.disk.CosmicRays;
 import org.archspan.disk.Disk;
 import org.archspan.disk.Gas;
+import org.archspan.disk.GasLayer;
 import org.archspan.disk.MagneticField;
 import org.archspan.disk.SelfGravity;
 import org.archspan.equilibrium.Equilibrium;
@@ -63,6 +64,8 @@ public final class Assumptions {
     if (disk.gas() instanceof Gas.Components several) {
       kind = several.components().size() + " isothermal components in one potential, together "
           + Numbers.plain(equilibrium.dispersion() / 1e5) + " km/s at the lower end";
+    } else if (disk.gas() instanceof Gas.Layered layered) {
+      kind = layers(layered, units);
     } else if (disk.gas() instanceof Gas.Stratified prescribed) {
       kind = "prescribed stratification (" + prescribed.strata().size() + " strata), " + kind
           + (prescribed.dispersion().isPresent() ? "" : " as the force balance demands");
@@ -72,10 +75,33 @@ public final class Assumptions {
     return kind + "; adiabatic index of the perturbations " + Numbers.given(disk.gasClosure().adiabaticIndex()) + cooling;
   }
 
+  private static String layers(Gas.Layered layered, OutputUnits units) {
+    StringBuilder words = new StringBuilder(layered.layers().size() == 1 ? "one layer of " : "layers of ");
+    for (int i = 0; i < layered.layers().size(); i++) {
+      GasLayer layer = layered.layers().get(i);
+      words.append(i == 0 ? "" : ", ").append(Numbers.plain(Math.sqrt(layer.dispersionSquared()) / 1e5)).append(" km/s")
+          .append(i == 0 ? "" : " from " + Numbers.length(layer.from(), units) + " (blend "
+              + Numbers.length(layer.blend(), units) + ")");
+    }
+    return words.toString();
+  }
+
+  private static String sheet(MagneticField.Sheet sheet, Equilibrium equilibrium, OutputUnits units) {
+    GasState middle = equilibrium.at(sheet.middle());
+    return (Double.isInfinite(sheet.top()) ? "fills the space above " + Numbers.length(sheet.bottom(), units)
+        : "a sheet from " + Numbers.length(sheet.bottom(), units) + " to " + Numbers.length(sheet.top(), units))
+        + ", edges of " + Numbers.length(sheet.edge(), units) + "; " + Numbers.given(units.field(middle.fieldStrength()))
+        + " " + units.field() + " and plasma beta " + Numbers.given(middle.plasmaBeta()) + " at "
+        + Numbers.length(sheet.middle(), units);
+  }
+
   private static String field(Disk disk, Equilibrium equilibrium, OutputUnits units) {
     GasState bottom = equilibrium.at(equilibrium.bottom());
     if (bottom.magneticPerMass() == 0.0 && !(disk.field() instanceof MagneticField.Balance)) {
       return "none";
+    }
+    if (disk.field() instanceof MagneticField.Sheet sheet) {
+      return sheet(sheet, equilibrium, units);
     }
     String strength = Numbers.given(units.field(bottom.fieldStrength())) + " " + units.field() + " at the lower end";
     if (disk.fieldTurn() != 0.0) {

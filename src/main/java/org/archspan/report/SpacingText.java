@@ -79,7 +79,7 @@ public final class SpacingText {
         + Numbers.time(1.0 / result.acrossLimit().growthRate(), units) + " at a height of "
         + Numbers.length(result.acrossLimit().height(), units) + (disk.selfGravity() == SelfGravity.FULL
             ? "; they do not feel the gas's own gravity, and long waves may be faster."
-            : ": no ideal wave of this disk is faster."));
+            : ": no ideal wave of this gas is faster."));
   }
 
   private void stable() {
@@ -131,7 +131,7 @@ public final class SpacingText {
       return "The gas is unstable; growth rises towards infinite wavelength along the field, up to one e-folding in "
           + Numbers.time(peak.growthTime(), units) + ".";
     }
-    String who = result.spacing().isPresent() ? "The fastest mode that gathers the disk's own gas"
+    String who = result.spacing().isPresent() && result.equilibrium().aboutMidplane() ? "The fastest mode that gathers the disk's own gas"
         : peak.continuum() ? "The continuum edge of the atmosphere above the disk" : "The fastest mode";
     String parity = peak.continuum() || peak.parity() == Parity.FLOOR ? ""
         : peak.parity() == Parity.MIRROR ? " (mirror-symmetric about the midplane)" : " (flexing the midplane)";
@@ -157,7 +157,8 @@ public final class SpacingText {
           + Numbers.mass(complex.mass().getAsDouble(), units) + ".");
     } else {
       block.sentence("One wavelength holds "
-          + Numbers.mass(complex.massPerWidth() * units.centimetresPerLength(), units) + " for each " + units.length() + " of arm width (no arm is given).");
+          + Numbers.mass(complex.massPerWidth() * units.centimetresPerLength(), units) + " for each " + units.length()
+          + (disk.domain().aboutMidplane() ? " of arm width (no arm is given)." : " across the field."));
     }
     if (complex.eFoldings().isPresent()) {
       block.sentence("While the gas crosses the arm the mode grows by "

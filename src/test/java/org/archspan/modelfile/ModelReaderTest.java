@@ -78,7 +78,7 @@ class ModelReaderTest {
       "field | pressure-ratio = \"1\" | model.toml:6: field.pressure-ratio: found \"1\"; a number without unit is needed",
       "field | strength = \"3 uG\" | field.strength: given beside field.pressure-ratio; give one of",
       "field | shape = \"balance\" | field.shape: \"balance\" without gas.stratum",
-      "field | shape = \"sheet\" | field.shape: found \"sheet\"; known, but not solved",
+      "field | bottom = \"1 Mm\" | field.bottom: given without field.shape = \"sheet\"",
       "gravity | law = \"tan\" | model.toml:8: gravity.law: found \"tan\"; allowed are \"uniform\"",
       "gravity | gradient = \"1 cm/s^2/kpc\" | gravity.gradient: not an input of the law \"tanh\"; its inputs are strength, height",
       "gravity | height = \"160 km/s\" | model.toml:10: gravity.height: found \"160 km/s\"",
