@@ -12,7 +12,7 @@ import org.jfree.chart.axis.ValueAxis;
 import org.jfree.chart.plot.CombinedDomainXYPlot;
 import org.jfree.chart.plot.XYPlot;
 
-/** The base state against height: pressures and density, field and Alfven speed, gravity. */
+/** The base state against height: pressures and density, field and Alfven speed, gravity or temperature. */
 public final class EquilibriumFigure implements Figure {
   private static final int POINTS = 400;
   private static final double DEEPEST = 1e-6;
@@ -65,7 +65,7 @@ public final class EquilibriumFigure implements Figure {
     plot.setOutlineVisible(false);
     plot.add(pressures(), 5);
     plot.add(field(), 4);
-    plot.add(gravity(), 3);
+    plot.add(layered() ? speed() : gravity(), 3);
     for (Object panel : plot.getSubplots()) {
       ((XYPlot) panel).setDomainGridlinesVisible(true);
       ((XYPlot) panel).setDomainGridlinePaint(style.faint());
@@ -121,6 +121,25 @@ public final class EquilibriumFigure implements Figure {
   private static void fromZero(ValueAxis axis, double[] values) {
     double greatest = java.util.Arrays.stream(values).filter(Double::isFinite).max().orElse(0.0);
     axis.setRange(0.0, greatest > 0.0 ? 1.12 * greatest : 1.0);
+  }
+
+  /** Whether the gas has more than one temperature: then that is drawn in place of gravity, which varies little. */
+  private boolean layered() {
+    double first = states[0].gasPerMass();
+    return java.util.Arrays.stream(states).anyMatch(state -> Math.abs(state.gasPerMass() / first - 1.0) > 0.01);
+  }
+
+  private XYPlot speed() {
+    ToDoubleFunction<GasState> speed = state -> Math.sqrt(state.gasPerMass()) / 1e5;
+    double greatest = java.util.Arrays.stream(values(speed)).max().orElse(1.0);
+    double lowest = java.util.Arrays.stream(values(speed)).min().orElse(1.0);
+    boolean decades = greatest > 5.0 * lowest;
+    ValueAxis axis = decades ? Plots.logAxis("c (km/s)", style) : Plots.axis("c (km/s)", style);
+    XYPlot panel = Plots.plot(null, axis, style);
+    panel.setDataset(0, Plots.curve("isothermal speed", height, values(speed)));
+    panel.setRenderer(0, new CurveRenderer(style, 0, 1.2).thin(style.ink()));
+    axis.setRange(decades ? 0.7 * lowest : 0.0, (decades ? 1.4 : 1.12) * greatest);
+    return panel;
   }
 
   private XYPlot gravity() {

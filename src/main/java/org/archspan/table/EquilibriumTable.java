@@ -31,6 +31,7 @@ public final class EquilibriumTable {
         column("field", units.field(), "field strength", states, state -> units.field(state.fieldStrength())),
         column("alfven_speed", "km/s", "Alfven speed", states, state -> state.alfvenSpeed() / 1e5),
         column("plasma_beta", "", "gas over magnetic pressure", states, GasState::plasmaBeta),
+        column("dispersion", "km/s", "isothermal speed", states, state -> Math.sqrt(state.gasPerMass()) / 1e5),
         column("gravity", "cm/s^2", "downward acceleration", states, GasState::gravity),
         column("scale_height", units.length(), "-dz/d ln(density)", states,
             state -> units.length(state.densityScaleHeight()))));
