@@ -44,13 +44,18 @@ final class BranchSearch {
     for (Parity parity : parities(options.parities(), equilibrium)) {
       solvers.add(new BranchSolver(range.problem(disk, equilibrium, parity, options.tolerance())));
     }
-    if (Double.isInfinite(solvers.get(0).marginalWavenumber(0)) && Double.isInfinite(range.highest())) {
-      throw new RefusedModelException("somewhere the gas has no field and is unstable: growth then rises without limit"
-          + " towards short waves and no wavelength is fastest; give waves.shortest, or a field");
-    }
+    requireShortest(solvers.get(0), range);
     halo = solvers.get(0).haloPeak(range.lowest(), range.highest());
     for (BranchSolver solver : solvers) {
       collect(solver, branches);
+    }
+  }
+
+  /** Refuses a search for the fastest wave where shorter waves are always faster. */
+  static void requireShortest(BranchSolver solver, WaveRange range) {
+    if (Double.isInfinite(solver.marginalWavenumber(0)) && Double.isInfinite(range.highest())) {
+      throw new RefusedModelException("somewhere the gas has no field and is unstable: growth then rises without limit"
+          + " towards short waves and no wavelength is fastest; give waves.shortest, or a field");
     }
   }
 

@@ -30,16 +30,20 @@ final class DomainInfluence {
   /** The search in the taller domain; empty where there is no such domain. */
   private static Optional<BranchSearch> search(Disk disk, Equilibrium equilibrium, SearchOptions options,
       WaveRange range) {
-    double top = equilibrium.bottom() + TALLER * (equilibrium.top() - equilibrium.bottom());
-    Equilibrium stretched = equilibrium.withTop(top);
-    if (stretched.top() < top || !(stretched.at(top).magneticPerMass() >= 0.0)) {
-      return Optional.empty();
-    }
+    Optional<Equilibrium> stretched = stretched(equilibrium);
     try {
-      return Optional.of(new BranchSearch(disk, stretched, options, range, options.branches() + MORE_BRANCHES));
+      return stretched.map(state -> new BranchSearch(disk, state, options, range, options.branches() + MORE_BRANCHES));
     } catch (RefusedModelException | UnsolvedException impossible) {
       return Optional.empty();
     }
+  }
+
+  /** The same state in the taller domain; empty where gravity is not known, or the field is not supported, so far up. */
+  static Optional<Equilibrium> stretched(Equilibrium equilibrium) {
+    double top = equilibrium.bottom() + TALLER * (equilibrium.top() - equilibrium.bottom());
+    Equilibrium stretched = equilibrium.withTop(top);
+    return stretched.top() < top || !(stretched.at(top).magneticPerMass() >= 0.0) ? Optional.empty()
+        : Optional.of(stretched);
   }
 
   /** The edge of the continuum above an open top: what the taller domain changes is its error. */

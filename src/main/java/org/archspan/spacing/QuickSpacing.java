@@ -1,0 +1,16 @@
+package org.archspan.spacing;
+
+import java.util.Optional;
+
+/**
+ * The mode that sets the spacing, without proof of the branches beside it, CGS.
+ *
+ * @param wavelength     along the field, cm; infinite where growth rises towards infinite wavelength
+ * @param growthRate     s^-1, positive
+ * @param centroidHeight height of the kinetic-energy centroid, cm; infinite for the halo continuum
+ * @param gathers        whether the mode gathers the disk's own gas; otherwise it is the fastest anywhere
+ * @param heldBy         what confines the mode; empty where that was not asked
+ */
+public record QuickSpacing(double wavelength, double growthRate, double centroidHeight, boolean gathers,
+    Optional<HeldBy> heldBy) {
+}
