@@ -17,6 +17,7 @@ final class CommandList {
     commands.put("mode", ModeCommand::new);
     commands.put("plane", PlaneCommand::new);
     commands.put("compare", CompareCommand::new);
+    commands.put("ensemble", EnsembleCommand::new);
     commands.put("check", CheckCommand::new);
     commands.put("models", ModelsCommand::new);
     commands.put("manual", ManualCommand::new);

@@ -7,6 +7,7 @@ import java.util.jar.JarFile;
 import org.archspan.disk.RefusedModelException;
 import org.archspan.modelfile.UnreadableFileException;
 import org.archspan.stability.UnsolvedException;
+import org.archspan.table.ReadException;
 import org.archspan.table.WriteException;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
@@ -78,7 +79,8 @@ public final class Main {
     if (fault instanceof UnsolvedException) {
       return ExitStatus.UNSOLVED;
     }
-    if (fault instanceof UnreadableFileException || fault instanceof WriteException) {
+    if (fault instanceof UnreadableFileException || fault instanceof WriteException
+        || fault instanceof ReadException) {
       return ExitStatus.FILE;
     }
     return -1;

@@ -7,6 +7,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.archspan.disk.Height;
+import org.archspan.uncertainty.Uncertainty;
 
 /** The checked values of a model by key, and the faults found so far. */
 final class Inputs {
@@ -24,6 +25,24 @@ final class Inputs {
     // densities of nuclei need the mass of each, wherever it stands
     entries.keySet().stream().filter(HydrogenMass::decidedBy).forEach(reader::read);
     entries.keySet().stream().filter(key -> !HydrogenMass.decidedBy(key)).forEach(reader::read);
+  }
+
+  private Inputs(Inputs other) {
+    source = other.source;
+    entries = other.entries;
+    values.putAll(other.values);
+    uncertainties.putAll(other.uncertainties);
+    faults = new ArrayList<>();
+  }
+
+  /** The same inputs with other values (CGS) at some keys, and no faults yet. */
+  Inputs with(List<String> keys, double[] numbers) {
+    Inputs changed = new Inputs(this);
+    for (int i = 0; i < numbers.length; i++) {
+      String key = keys.get(i);
+      changed.values.put(key, values.get(key) instanceof Height ? Height.centimetres(numbers[i]) : (Object) numbers[i]);
+    }
+    return changed;
   }
 
   Entry entry(String key) {

@@ -66,6 +66,16 @@ public record KeySpec(String key, Kind kind, String unit, Range range, List<Stri
       this.highest = highest;
     }
 
+    /** Least number, in the CGS unit of the key; it may itself be excluded. */
+    double lowest() {
+      return lowest;
+    }
+
+    /** Greatest number, in the CGS unit of the key. */
+    double highest() {
+      return highest;
+    }
+
     /** In words, for messages. */
     public String words() {
       return words;

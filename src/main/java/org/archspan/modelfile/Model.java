@@ -4,6 +4,7 @@ import java.util.Map;
 import org.archspan.disk.Disk;
 import org.archspan.spacing.Arm;
 import org.archspan.spacing.SearchOptions;
+import org.archspan.uncertainty.Uncertainty;
 import org.archspan.units.OutputUnits;
 
 /**
@@ -17,7 +18,8 @@ import org.archspan.units.OutputUnits;
  * @param units         units of results
  * @param inputs        every key with its value as given, in the order of the file
  * @param uncertainties of the inputs that have one, by key
+ * @param uncertain     the same model with any values of those inputs
  */
 public record Model(String source, String title, Disk disk, SearchOptions options, Arm arm, OutputUnits units,
-    Map<String, String> inputs, Map<String, Uncertainty> uncertainties) {
+    Map<String, String> inputs, Map<String, Uncertainty> uncertainties, UncertainModel uncertain) {
 }

@@ -6,10 +6,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import org.archspan.disk.Disk;
-import org.archspan.disk.Gas;
 import org.archspan.gravity.GravityLaw;
-import org.archspan.spacing.Arm;
 
 /** Reads a model file, strictly: everything that is wrong is said at once, and nothing is guessed. */
 public final class ModelReader {
@@ -85,17 +82,12 @@ public final class ModelReader {
   private static Model model(Inputs inputs, String source, Path folder, double tolerance)
       throws UnreadableFileException {
     Unsolved.refuse(inputs);
-    GasReader gasReader = new GasReader(inputs);
-    Gas gas = gasReader.gas();
-    FieldReader fieldReader = new FieldReader(inputs);
     List<GravityLaw> gravity = new GravityReader(inputs, folder).laws();
-    SurroundingsReader surroundings = new SurroundingsReader(inputs);
-    Arm arm = surroundings.arm();
-    Disk disk = new Disk(gas, gasReader.closure(), gasReader.selfGravity(), fieldReader.field(gas),
-        fieldReader.turn(), fieldReader.cosmicRays(), gravity, surroundings.rotation(), surroundings.domain());
+    DrawnModel central = DrawnModel.of(inputs, gravity, tolerance);
     Map<String, String> given = new LinkedHashMap<>();
     inputs.entries().forEach((key, entry) -> given.put(key, String.valueOf(entry.value())));
-    return new Model(source, inputs.text("title").orElse(source), disk, surroundings.options(arm, tolerance), arm,
-        surroundings.units(), given, inputs.uncertainties());
+    return new Model(source, inputs.text("title").orElse(source), central.disk(), central.options(), central.arm(),
+        new SurroundingsReader(inputs).units(), given, inputs.uncertainties(),
+        new UncertainModel(inputs, folder, gravity, tolerance));
   }
 }

@@ -3,6 +3,7 @@ package org.archspan.modelfile;
 import java.util.List;
 import java.util.Optional;
 import org.archspan.disk.Height;
+import org.archspan.uncertainty.Uncertainty;
 
 /** Reads {@code { value, normal }}, {@code { value, factor }} and {@code { low, high }}. */
 final class UncertainValue {
@@ -48,7 +49,7 @@ final class UncertainValue {
       if (low.get() < high.get()) {
         double middle = 0.5 * (low.get() + high.get());
         put(middle);
-        inputs.put(key, new Uncertainty(Uncertainty.Shape.RANGE, middle, high.get() - middle));
+        inputs.put(key, uncertainty(Uncertainty.Shape.RANGE, middle, high.get() - middle));
       } else {
         inputs.fault(key + ".high", "the upper end does not exceed the lower one", "low must be less than high");
       }
@@ -61,9 +62,13 @@ final class UncertainValue {
     Optional<Double> spread = normal ? part("normal") : factor();
     if (value.isPresent() && spread.isPresent()) {
       put(value.get());
-      inputs.put(key, new Uncertainty(normal ? Uncertainty.Shape.NORMAL : Uncertainty.Shape.FACTOR, value.get(),
+      inputs.put(key, uncertainty(normal ? Uncertainty.Shape.NORMAL : Uncertainty.Shape.FACTOR, value.get(),
           spread.get()));
     }
+  }
+
+  private Uncertainty uncertainty(Uncertainty.Shape shape, double centre, double spread) {
+    return new Uncertainty(shape, centre, spread, spec.range().lowest(), spec.range().highest());
   }
 
   private void put(double value) {

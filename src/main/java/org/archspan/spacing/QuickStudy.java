@@ -79,8 +79,8 @@ public final class QuickStudy {
       }
       Optional<GrowthPoint> edge = halo.filter(point -> fastest == null || point.growthRate() >= fastest.growthRate());
       if (edge.isPresent()) {
-        return Optional.of(new QuickSpacing(edge.get().wavelength(), edge.get().growthRate(), Double.POSITIVE_INFINITY,
-            false, testLid ? Optional.of(HeldBy.HALO) : Optional.empty()));
+        return Optional.of(new QuickSpacing(edge.get().wavelength(), range.crestSpacing(edge.get().wavelength()),
+            edge.get().growthRate(), Double.POSITIVE_INFINITY, false, testLid ? Optional.of(HeldBy.HALO) : Optional.empty()));
       }
       return fastest == null ? Optional.empty() : Optional.of(spacing(fastest, fastestSolver, false));
     }
@@ -107,7 +107,8 @@ public final class QuickStudy {
     }
 
     private QuickSpacing spacing(Peak peak, BranchSolver solver, boolean gathers) {
-      return new QuickSpacing(2.0 * Math.PI / peak.wavenumber(), peak.growthRate(), peak.mode().centroidHeight(), gathers,
+      double wavelength = 2.0 * Math.PI / peak.wavenumber();
+      return new QuickSpacing(wavelength, range.crestSpacing(wavelength), peak.growthRate(), peak.mode().centroidHeight(), gathers,
           testLid ? Optional.of(heldBy(peak, solver.problem().parity())) : Optional.empty());
     }
 

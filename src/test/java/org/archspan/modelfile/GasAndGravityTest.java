@@ -13,6 +13,7 @@ import org.archspan.disk.Height;
 import org.archspan.disk.MagneticField;
 import org.archspan.gravity.LinearGravity;
 import org.archspan.gravity.UniformGravity;
+import org.archspan.uncertainty.Uncertainty;
 import org.archspan.units.Constants;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -121,9 +122,10 @@ class GasAndGravityTest {
         .replace("\"1.0 cm^-3\"", "{ value = \"1 cm^-3\", factor = 2.0 }"));
     assertThat(((Gas.Isothermal) model.disk().gas()).dispersion()).isEqualTo(7e5);
     assertThat(model.uncertainties().get("gas.dispersion"))
-        .isEqualTo(new Uncertainty(Uncertainty.Shape.RANGE, 7e5, 2e5));
+        .isEqualTo(new Uncertainty(Uncertainty.Shape.RANGE, 7e5, 2e5, 0.0, 2.99792458e10));
     assertThat(model.uncertainties().get("field.strength"))
-        .isEqualTo(new Uncertainty(Uncertainty.Shape.NORMAL, 3e-6, 1e-6));
+        .isEqualTo(new Uncertainty(Uncertainty.Shape.NORMAL, 3e-6, 1e-6, 0.0,
+            Double.POSITIVE_INFINITY));
     Uncertainty density = model.uncertainties().get("gas.midplane-density");
     assertThat(density.centre()).isCloseTo(1.4 * Constants.HYDROGEN_MASS, within(1e-38));
     assertThat(density.spread()).isEqualTo(2.0);

@@ -11,6 +11,7 @@ import java.util.Map;
 import org.archspan.disk.Gas;
 import org.archspan.disk.MagneticField;
 import org.archspan.gravity.UniformGravity;
+import org.archspan.uncertainty.Uncertainty;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -41,11 +42,11 @@ class OverridesTest {
   @Test
   void addsAnUncertaintyToAPlainValue() {
     assertThat(model(PLAIN, "gas.dispersion.normal=1km/s").uncertainties().get("gas.dispersion"))
-        .isEqualTo(new Uncertainty(Uncertainty.Shape.NORMAL, 6.4e5, 1e5));
+        .isEqualTo(new Uncertainty(Uncertainty.Shape.NORMAL, 6.4e5, 1e5, 0.0, 2.99792458e10));
     assertThat(model(PLAIN, "field.pressure-ratio.factor=2").uncertainties().get("field.pressure-ratio"))
-        .isEqualTo(new Uncertainty(Uncertainty.Shape.FACTOR, 1.0, 2.0));
+        .isEqualTo(new Uncertainty(Uncertainty.Shape.FACTOR, 1.0, 2.0, 0.0, Double.POSITIVE_INFINITY));
     assertThat(model(PLAIN, "gas.dispersion.low=5km/s", "gas.dispersion.high=9km/s").uncertainties()
-        .get("gas.dispersion")).isEqualTo(new Uncertainty(Uncertainty.Shape.RANGE, 7e5, 2e5));
+        .get("gas.dispersion")).isEqualTo(new Uncertainty(Uncertainty.Shape.RANGE, 7e5, 2e5, 0.0, 2.99792458e10));
     assertThat(model(PLAIN, "gas.dispersion.normal=1km/s", "gas.dispersion=7km/s").uncertainties()).isEmpty();
     assertThat(messages(read(PLAIN, "gas.dispersion.low=5km/s"))).contains("gas.dispersion: found an incomplete");
   }

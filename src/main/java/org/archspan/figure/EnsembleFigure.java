@@ -1,0 +1,171 @@
+package org.archspan.figure;
+
+import java.awt.BasicStroke;
+import java.awt.Color;
+import java.awt.Graphics2D;
+import java.awt.geom.Rectangle2D;
+import java.util.Map;
+import org.archspan.uncertainty.EnsembleSummary;
+import org.archspan.uncertainty.EnsembleSummary.JointBin;
+import org.archspan.uncertainty.LogHistogram;
+import org.archspan.uncertainty.SobolIndices;
+import org.archspan.uncertainty.UncertainInput;
+import org.archspan.units.OutputUnits;
+import org.jfree.chart.annotations.XYBoxAnnotation;
+import org.jfree.chart.axis.NumberAxis;
+import org.jfree.chart.axis.SymbolAxis;
+import org.jfree.chart.plot.IntervalMarker;
+import org.jfree.chart.plot.ValueMarker;
+import org.jfree.chart.plot.XYPlot;
+import org.jfree.chart.renderer.xy.XYLineAndShapeRenderer;
+import org.jfree.chart.ui.Layer;
+
+/** Histogram of the wavelength, wavelength and growth time together, and what drives the spread. */
+public final class EnsembleFigure implements Figure {
+  private static final int BARS = 40;
+  private final EnsembleSummary summary;
+  private final OutputUnits units;
+  private final FigureStyle style;
+  private final double shortest;
+  private final double longest;
+
+  /** The figure of an ensemble that has a spacing. */
+  public EnsembleFigure(EnsembleSummary summary, OutputUnits units, FigureStyle style) {
+    this.summary = summary;
+    this.units = units;
+    this.style = style;
+    this.shortest = 0.9 * summary.wavelength().quantile(0.002);
+    this.longest = 1.1 * summary.wavelength().quantile(0.998);
+  }
+
+  private boolean driven() {
+    return summary.design().sensitivities() && summary.ofWavelength().groups() > 1;
+  }
+
+  @Override
+  public double width() {
+    return driven() ? FigureStyle.PAGE : 0.68 * FigureStyle.PAGE;
+  }
+
+  @Override
+  public double height() {
+    return 0.36 * FigureStyle.PAGE;
+  }
+
+  @Override
+  public String description() {
+    return "Histogram of the wavelength with its median and its range of 68 per cent, the joint distribution of wavelength and"
+        + " growth time, and the Sobol' indices of the inputs";
+  }
+
+  @Override
+  public Color background() {
+    return style.background();
+  }
+
+  @Override
+  public void draw(Graphics2D graphics, Rectangle2D area) {
+    graphics.setPaint(style.background());
+    graphics.fill(area);
+    double third = driven() ? 0.3 * area.getWidth() : 0.5 * area.getWidth();
+    Plots.chart(histogram(), false, style).draw(graphics,
+        new Rectangle2D.Double(area.getX(), area.getY(), third, area.getHeight()));
+    Plots.chart(joint(), false, style).draw(graphics,
+        new Rectangle2D.Double(area.getX() + third, area.getY(), third, area.getHeight()));
+    if (driven()) {
+      Plots.chart(drivers(), true, style).draw(graphics, new Rectangle2D.Double(area.getX() + 2.0 * third, area.getY(),
+          area.getWidth() - 2.0 * third, area.getHeight()));
+    }
+  }
+
+  private DecadeAxis wavelength() {
+    DecadeAxis axis = Plots.logAxis("wavelength (" + units.length() + ")", style);
+    axis.setRange(shortest, longest);
+    return axis;
+  }
+
+  private XYPlot histogram() {
+    NumberAxis share = Plots.axis("share of draws per bin", style);
+    XYPlot plot = Plots.plot(wavelength(), share, style);
+    XYLineAndShapeRenderer bars = new XYLineAndShapeRenderer(false, false);
+    plot.setRenderer(bars);
+    LogHistogram values = summary.wavelength();
+    double greatest = 0.0;
+    for (int i = 0; i < BARS; i++) {
+      double low = shortest * Math.pow(longest / shortest, (double) i / BARS);
+      double high = shortest * Math.pow(longest / shortest, (i + 1.0) / BARS);
+      double height = values.share(low, high);
+      greatest = Math.max(greatest, height);
+      if (height > 0.0) {
+        bars.addAnnotation(new XYBoxAnnotation(low, 0.0, high, height, new BasicStroke(0.4f), style.background(),
+            style.colour(0)), Layer.FOREGROUND);
+      }
+    }
+    share.setRange(0.0, 1.1 * Math.max(greatest, 1e-6));
+    IntervalMarker middle = new IntervalMarker(values.quantile(0.16), values.quantile(0.84));
+    middle.setPaint(style.shade());
+    middle.setAlpha(1f);
+    plot.addDomainMarker(middle, Layer.BACKGROUND);
+    plot.addDomainMarker(new ValueMarker(values.quantile(0.5), style.colour(1), new BasicStroke(1.2f)), Layer.FOREGROUND);
+    return plot;
+  }
+
+  private XYPlot joint() {
+    DecadeAxis time = Plots.logAxis("growth time (" + units.time() + ")", style);
+    time.setRange(0.9 * summary.growthTime().quantile(0.002), 1.1 * summary.growthTime().quantile(0.998));
+    XYPlot plot = Plots.plot(wavelength(), time, style);
+    XYLineAndShapeRenderer cells = new XYLineAndShapeRenderer(false, false);
+    plot.setRenderer(cells);
+    double greatest = summary.joint().values().stream().mapToLong(Long::longValue).max().orElse(1);
+    for (Map.Entry<JointBin, Long> cell : summary.joint().entrySet()) {
+      int x = cell.getKey().wavelength();
+      int y = cell.getKey().growthTime();
+      if (JointBin.lower(x + 1) > shortest && JointBin.lower(x) < longest
+          && JointBin.lower(y + 1) > time.getLowerBound() && JointBin.lower(y) < time.getUpperBound()) {
+        Color colour = new Color(ColourMap.SEQUENTIAL.colour(1.0 - 0.92 * Math.sqrt(cell.getValue() / greatest)));
+        cells.addAnnotation(new XYBoxAnnotation(JointBin.lower(x), JointBin.lower(y), JointBin.lower(x + 1),
+            JointBin.lower(y + 1), null, null, colour), Layer.BACKGROUND);
+      }
+    }
+    return plot;
+  }
+
+  private XYPlot drivers() {
+    SobolIndices indices = summary.ofWavelength();
+    int inputs = summary.design().inputs().size();
+    String[] names = summary.design().inputs().stream().map(UncertainInput::key)
+        .toArray(String[]::new);
+    SymbolAxis axis = new SymbolAxis(null, names);
+    Plots.dress(axis, style);
+    axis.setGridBandsVisible(false);
+    axis.setRange(-0.6, inputs - 0.4);
+    axis.setInverted(true);
+    axis.setTickLabelFont(style.smallFont());
+    NumberAxis share = Plots.axis("Sobol' index of ln(wavelength)", style);
+    share.setRange(0.0, 1.05);
+    XYPlot plot = Plots.plot(share, axis, style);
+    for (int series = 0; series < 2; series++) {
+      double[] x = new double[inputs];
+      double[] y = new double[inputs];
+      for (int j = 0; j < inputs; j++) {
+        x[j] = Math.max(0.0, series == 0 ? indices.first(j) : indices.total(j));
+        y[j] = j + (series == 0 ? -0.17 : 0.17);
+      }
+      bars(plot, series, x, y);
+    }
+    return plot;
+  }
+
+  private void bars(XYPlot plot, int series, double[] x, double[] y) {
+    XYLineAndShapeRenderer bars = new XYLineAndShapeRenderer(false, true);
+    bars.setSeriesShape(0, new Rectangle2D.Double(-2.0, -2.0, 4.0, 4.0));
+    bars.setSeriesPaint(0, style.colour(series));
+    plot.setDataset(series, Plots.curve(series == 0 ? "first order" : "total", x, y));
+    plot.setRenderer(series, bars);
+    // the axis runs downwards, and so must the boxes
+    for (int j = 0; j < x.length; j++) {
+      bars.addAnnotation(new XYBoxAnnotation(0.0, y[j] + 0.14, x[j], y[j] - 0.14, null, null, style.colour(series)),
+          Layer.BACKGROUND);
+    }
+  }
+}

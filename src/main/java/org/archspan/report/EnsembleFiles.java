@@ -1,0 +1,33 @@
+package org.archspan.report;
+
+import java.nio.file.Path;
+import org.archspan.figure.EnsembleFigure;
+import org.archspan.figure.FigureStyle;
+import org.archspan.table.EnsembleTable;
+import org.archspan.table.WriteException;
+import org.archspan.uncertainty.EnsembleSummary;
+import org.archspan.units.OutputUnits;
+
+/** Everything that an ensemble writes beside its draws. */
+public final class EnsembleFiles {
+  private EnsembleFiles() {
+  }
+
+  /**
+   * Writes tables, figure and summary.
+   *
+   * @param armWidth whether the arm has one, so that masses are whole
+   */
+  public static void write(EnsembleSummary summary, OutputUnits units, boolean armWidth, String json, String text, Path folder,
+      boolean overwrite) throws WriteException {
+    OutputFolder output = new OutputFolder().text("summary.json", json).text("summary.txt", text)
+        .table("ensemble", EnsembleTable.ranges(summary, units, armWidth));
+    if (summary.design().sensitivities()) {
+      output.table("sensitivity", EnsembleTable.sensitivities(summary));
+    }
+    if (summary.wavelength().total() > 0.0) {
+      output.figure("ensemble", new EnsembleFigure(summary, units, FigureStyle.journal()));
+    }
+    output.write(folder, overwrite);
+  }
+}
