@@ -46,13 +46,17 @@ public record GasAmount(HeldAmount held, double surfaceDensity, double bottomDen
     if (held == HeldAmount.NEITHER || held == HeldAmount.BOTH) {
       return disk;
     }
+    boolean column = held == HeldAmount.SURFACE_DENSITY;
+    OptionalDouble bottom = column ? OptionalDouble.empty() : OptionalDouble.of(bottomDensity);
+    OptionalDouble surface = column ? OptionalDouble.of(surfaceDensity) : OptionalDouble.empty();
     if (disk.gas() instanceof Gas.Isothermal gas) {
-      return disk.withGas(held == HeldAmount.SURFACE_DENSITY
-          ? new Gas.Isothermal(gas.dispersion(), OptionalDouble.empty(), OptionalDouble.of(surfaceDensity))
-          : new Gas.Isothermal(gas.dispersion(), OptionalDouble.of(bottomDensity), OptionalDouble.empty()));
+      return disk.withGas(new Gas.Isothermal(gas.dispersion(), bottom, surface));
+    }
+    if (disk.gas() instanceof Gas.Layered gas) {
+      return disk.withGas(new Gas.Layered(gas.layers(), bottom, surface));
     }
     if (disk.gas() instanceof Gas.Components several) {
-      return held == HeldAmount.SURFACE_DENSITY ? withColumn(disk, several)
+      return column ? withColumn(disk, several)
           : disk.withGas(scaled(several, bottomDensity / density(several)));
     }
     throw new RefusedModelException("a prescribed stratification cannot take the amount of another gas");

@@ -11,7 +11,7 @@ final class Overrides {
   /** Choosing one of these drops the others. */
   private static final List<List<String>> ALTERNATIVES = List.of(
       List.of("gas.dispersion", "gas.temperature"), List.of("gas.midplane-density", "gas.surface-density"),
-      List.of("field.pressure-ratio", "field.strength"),
+      List.of("field.pressure-ratio", "field.strength", "field.plasma-beta"),
       List.of("cosmic-rays.pressure-ratio", "cosmic-rays.pressure"));
 
   /** The same, where strata are given: the force balance makes either of these from the other. */

@@ -13,6 +13,7 @@ import org.archspan.disk.Disk;
 import org.archspan.disk.Domain;
 import org.archspan.disk.Gas;
 import org.archspan.disk.GasComponent;
+import org.archspan.disk.GasLayer;
 import org.archspan.disk.Height;
 import org.archspan.disk.MagneticField;
 import org.archspan.disk.RefusedModelException;
@@ -34,6 +35,9 @@ class ComparisonTest {
   private static final Gas TWO = new Gas.Components(List.of(new GasComponent("cold", 4e5, 1.5e-24),
       new GasComponent("warm", 9e5, 0.5e-24)));
 
+  private static final Gas LAYERED = new Gas.Layered(List.of(new GasLayer(0.0, 3.6e11, 50.0 * PARSEC), new GasLayer(300.0 * PARSEC, 8.1e11,
+      50.0 * PARSEC)), OptionalDouble.of(2e-24), OptionalDouble.empty());
+
   private static Disk disk(Gas gas, double microgauss) {
     return new Disk(gas, new GasClosure(1.0), new MagneticField.BottomStrength(1e-6 * microgauss), CosmicRays.none(),
         List.of(new TanhGravity(2.5e-9, 160.0 * PARSEC)),
@@ -44,7 +48,7 @@ class ComparisonTest {
   @ParameterizedTest
   @EnumSource(value = HeldAmount.class, names = {"SURFACE_DENSITY", "MIDPLANE_DENSITY"})
   void theHeldAmountStays(HeldAmount held) {
-    for (Gas gas : List.of(ONE, TWO)) {
+    for (Gas gas : List.of(ONE, TWO, LAYERED)) {
       Equilibrium before = EquilibriumBuilder.build(disk(gas, 3.0), 1e-8);
       Equilibrium after = EquilibriumBuilder.build(GasAmount.of(disk(gas, 3.0), held, 1e-8).in(disk(gas, 5.0)), 1e-8);
       double column = after.surfaceDensity() / before.surfaceDensity() - 1.0;
