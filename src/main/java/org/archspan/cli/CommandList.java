@@ -18,6 +18,7 @@ final class CommandList {
     commands.put("plane", PlaneCommand::new);
     commands.put("compare", CompareCommand::new);
     commands.put("ensemble", EnsembleCommand::new);
+    commands.put("infer", InferCommand::new);
     commands.put("check", CheckCommand::new);
     commands.put("models", ModelsCommand::new);
     commands.put("manual", ManualCommand::new);

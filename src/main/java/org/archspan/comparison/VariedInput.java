@@ -5,12 +5,18 @@ import java.util.List;
 /**
  * An input of the model and the values that it takes.
  *
- * @param key     of the model file
- * @param values  as a model would give them, at least one
- * @param numbers the same in {@code unit}, in the order of the values; empty where they are words
- * @param unit    of the first value; empty for pure numbers and words
+ * @param key         of the model file
+ * @param values      as a model would give them, at least one
+ * @param numbers     the same in {@code unit}, in the order of the values; empty where they are words
+ * @param unit        of the first value; empty for pure numbers and words
+ * @param logarithmic whether they fill a range in equal ratios
  */
-public record VariedInput(String key, List<String> values, List<Double> numbers, String unit) {
+public record VariedInput(String key, List<String> values, List<Double> numbers, String unit, boolean logarithmic) {
+  /** Values in equal steps, or a list. */
+  public VariedInput(String key, List<String> values, List<Double> numbers, String unit) {
+    this(key, values, numbers, unit, false);
+  }
+
   /** Whether the values are numbers, which a figure can put on an axis. */
   public boolean numeric() {
     return !numbers.isEmpty();

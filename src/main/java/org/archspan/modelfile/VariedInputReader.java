@@ -127,7 +127,7 @@ public final class VariedInputReader {
       values.add(plain(number) + (unit.isEmpty() ? "" : " " + unit));
       numbers.add(number.doubleValue());
     }
-    return new VariedInput(key, List.copyOf(values), List.copyOf(numbers), unit);
+    return new VariedInput(key, List.copyOf(values), List.copyOf(numbers), unit, logarithmic);
   }
 
   private static String plain(BigDecimal number) {

@@ -39,9 +39,9 @@ public final class EnsembleJson {
 
   static Json input(UncertainInput input) {
     Uncertainty of = input.distribution();
-    boolean factor = of.shape() == Uncertainty.Shape.FACTOR;
+    boolean factor = of.byFactors();
     return new Json().put("key", input.key()).put("unit", input.unit())
-        .put("shape", of.shape().name().toLowerCase(Locale.ROOT)).put("centre", of.centre() / input.unitSize())
+        .put("shape", of.shape().name().toLowerCase(Locale.ROOT).replace('_', '-')).put("centre", of.centre() / input.unitSize())
         .put("spread", factor ? of.spread() : of.spread() / input.unitSize());
   }
 

@@ -65,10 +65,12 @@ public final class EnsembleText {
     Uncertainty of = input.distribution();
     String unit = input.unit().isEmpty() ? "" : " " + input.unit();
     String centre = Numbers.given(of.centre() / input.unitSize());
-    String spread = Numbers.given(of.spread() / (of.shape() == Uncertainty.Shape.FACTOR ? 1.0 : input.unitSize()));
+    String spread = Numbers.given(of.spread() / (of.byFactors() ? 1.0 : input.unitSize()));
     return switch (of.shape()) {
       case NORMAL -> "normal, " + centre + " with standard deviation " + spread + unit;
       case FACTOR -> "log-normal, " + centre + unit + " within a factor of " + spread;
+      case RATIO_RANGE -> "uniform in the logarithm from " + Numbers.given(of.centre() / of.spread() / input.unitSize()) + " to "
+          + Numbers.given(of.centre() * of.spread() / input.unitSize()) + unit;
       case RANGE -> "uniform from " + Numbers.given((of.centre() - of.spread()) / input.unitSize()) + " to "
           + Numbers.given((of.centre() + of.spread()) / input.unitSize()) + unit;
     };

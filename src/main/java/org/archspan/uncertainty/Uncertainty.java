@@ -7,7 +7,8 @@ import org.apache.commons.math3.distribution.NormalDistribution;
  *
  * @param shape   of the distribution
  * @param centre  mean, median, or middle of the range, in the CGS unit of the input
- * @param spread  standard deviation (same unit), factor (dimensionless), or half-width (same unit)
+ * @param spread  standard deviation (same unit), factor (dimensionless), half-width (same unit), or factor from the middle to
+ *                either end (dimensionless)
  * @param lowest  least value that the input may take, in the CGS unit of the input; the distribution is cut there
  * @param highest greatest, in the CGS unit of the input
  */
@@ -19,7 +20,14 @@ public record Uncertainty(Shape shape, double centre, double spread, double lowe
     /** Log-normal; one standard deviation is a factor. */
     FACTOR,
     /** Uniform. */
-    RANGE
+    RANGE,
+    /** Uniform in the logarithm. */
+    RATIO_RANGE
+  }
+
+  /** Whether values that differ by a factor are what is alike, rather than values that differ by an amount. */
+  public boolean byFactors() {
+    return shape == Shape.FACTOR || shape == Shape.RATIO_RANGE;
   }
 
   private static final NormalDistribution UNIT = new NormalDistribution(null, 0.0, 1.0);
@@ -32,6 +40,7 @@ public record Uncertainty(Shape shape, double centre, double spread, double lowe
   public double quantile(double share) {
     return switch (shape) {
       case RANGE -> centre + spread * (2.0 * share - 1.0);
+      case RATIO_RANGE -> centre * Math.pow(spread, 2.0 * share - 1.0);
       case NORMAL -> centre + spread * cut(share, (lowest - centre) / spread, (highest - centre) / spread);
       case FACTOR -> {
         double width = Math.log(spread);
