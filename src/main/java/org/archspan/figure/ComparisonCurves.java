@@ -29,6 +29,8 @@ public final class ComparisonCurves implements Figure {
   private final List<ComparedCase> cases;
   private final OutputUnits units;
   private final FigureStyle style;
+  /** Power of ten that is taken out of masses: a thousand, a million, ... */
+  private final int massScale;
 
   /** The figure of a comparison with one varied input. */
   public ComparisonCurves(Comparison comparison, OutputUnits units, FigureStyle style) {
@@ -37,6 +39,9 @@ public final class ComparisonCurves implements Figure {
     this.units = units.suiting(cases.stream().flatMap(one -> one.result().flatMap(SpacingResult::spacingPeak).stream())
         .mapToDouble(BranchPeak::wavelength).filter(Double::isFinite).max().orElse(0.0));
     this.style = style;
+    double greatest = cases.stream().flatMap(one -> one.result().stream()).mapToDouble(this::unscaledMass)
+        .filter(Double::isFinite).max().orElse(1.0);
+    massScale = greatest > 0.0 ? 3 * (int) Math.floor(Math.log10(greatest) / 3.0) : 0;
   }
 
   @Override
@@ -64,12 +69,13 @@ public final class ComparisonCurves implements Figure {
   public void draw(Graphics2D graphics, Rectangle2D area) {
     graphics.setPaint(style.background());
     graphics.fill(area);
-    String massUnit = massive() ? units.mass() : units.mass() + "/" + units.length();
+    String massUnit = (massScale == 0 ? "" : "10" + DecadeAxis.superscript(massScale) + " ")
+        + (massive() ? units.mass() : units.mass() + "/" + units.length());
     panel(graphics, area, 0, 0.36, "wavelength (" + units.length() + ")", result -> peak(result,
         one -> units.length(one.wavelength())));
     panel(graphics, area, 1, 0.29, "growth time (" + units.time() + ")", result -> peak(result,
         one -> units.time(one.growthTime())));
-    panel(graphics, area, 2, 0.35, (massive() ? "mass (" : "mass per width (") + massUnit + ")", this::mass);
+    panel(graphics, area, 2, 0.35, "mass (" + massUnit + ")", this::mass);
   }
 
   private boolean massive() {
@@ -82,6 +88,10 @@ public final class ComparisonCurves implements Figure {
   }
 
   private double mass(SpacingResult result) {
+    return Math.pow(10.0, -massScale) * unscaledMass(result);
+  }
+
+  private double unscaledMass(SpacingResult result) {
     return result.complex().map(complex -> complex.mass().isPresent() ? units.mass(complex.mass().getAsDouble())
         : units.mass(complex.massPerWidth()) * units.centimetresPerLength()).orElse(Double.NaN);
   }

@@ -26,6 +26,8 @@ import org.jfree.data.xy.XYSeriesCollection;
 /** Wavelength and growth time over the values of two inputs: one cell for each case, side by side. */
 public final class ComparisonMap implements Figure {
   private static final int MOST_LABELS = 7;
+  /** Values that spread over more than this factor are coloured by their logarithms. */
+  private static final double WIDE = 8.0;
   /** Height of the line that explains the marks, points. */
   private static final double KEY = 14.0;
   private static final String MARKS = "dot: held by the lid; triangle: by the atmosphere above; grey: stable; cross: no answer";
@@ -85,19 +87,21 @@ public final class ComparisonMap implements Figure {
   }
 
   private void map(Graphics2D graphics, Rectangle2D area, String label, ToDoubleFunction<BranchPeak> value) {
-    double low = peaks(value).min().orElse(0.0);
-    double greatest = peaks(value).max().orElse(1.0);
+    boolean wide = peaks(value).max().orElse(1.0) > WIDE * peaks(value).min().orElse(1.0);
+    ToDoubleFunction<BranchPeak> shown = wide ? peak -> Math.log10(value.applyAsDouble(peak)) : value;
+    double low = peaks(shown).min().orElse(0.0);
+    double greatest = peaks(shown).max().orElse(1.0);
     double high = greatest > low ? greatest : low + Math.max(1e-6, 0.01 * Math.abs(low));
     XYPlot plot = Plots.plot(axis(across), axis(up), style);
     plot.setRenderer(new XYLineAndShapeRenderer(false, true));
     for (int i = 0; i < comparison.cases().size(); i++) {
-      cell(plot, i, value, low, high);
+      cell(plot, i, shown, low, high);
     }
     addHeld(plot);
     Plots.chart(plot, false, style).draw(graphics, new Rectangle2D.Double(area.getX(), area.getY(),
         0.78 * area.getWidth(), area.getHeight()));
     ColourBar.draw(graphics, new Rectangle2D.Double(area.getX() + 0.78 * area.getWidth(), area.getY(),
-        0.22 * area.getWidth(), area.getHeight()), ColourMap.SEQUENTIAL, low, high, label, style);
+        0.22 * area.getWidth(), area.getHeight()), ColourMap.SEQUENTIAL, low, high, (wide ? "log\u2081\u2080 " : "") + label, style);
   }
 
   /** Values stand at equal distances, words and numbers alike; where there are many, only some are labelled. */

@@ -14,6 +14,7 @@ import org.archspan.units.OutputUnits;
 import org.jfree.chart.annotations.XYBoxAnnotation;
 import org.jfree.chart.axis.NumberAxis;
 import org.jfree.chart.axis.SymbolAxis;
+import org.jfree.chart.axis.ValueAxis;
 import org.jfree.chart.plot.IntervalMarker;
 import org.jfree.chart.plot.ValueMarker;
 import org.jfree.chart.plot.XYPlot;
@@ -34,8 +35,8 @@ public final class EnsembleFigure implements Figure {
     this.summary = summary;
     this.units = units;
     this.style = style;
-    this.shortest = 0.9 * summary.wavelength().quantile(0.002);
-    this.longest = 1.1 * summary.wavelength().quantile(0.998);
+    this.shortest = 0.95 * summary.wavelength().quantile(0.003);
+    this.longest = 1.05 * summary.wavelength().quantile(0.997);
   }
 
   private boolean driven() {
@@ -78,9 +79,24 @@ public final class EnsembleFigure implements Figure {
     }
   }
 
-  private DecadeAxis wavelength() {
-    DecadeAxis axis = Plots.logAxis("wavelength (" + units.length() + ")", style);
-    axis.setRange(shortest, longest);
+  private ValueAxis wavelength() {
+    return axis("wavelength (" + units.length() + ")", shortest, longest);
+  }
+
+  /** Whether a decade has room for its labels. */
+  private static boolean logarithmic(double low, double high) {
+    return high > 15.0 * low;
+  }
+
+  /** End of a bar at a share of the axis. */
+  private double edge(double share) {
+    return logarithmic(shortest, longest) ? shortest * Math.pow(longest / shortest, share)
+        : shortest + share * (longest - shortest);
+  }
+
+  private ValueAxis axis(String label, double low, double high) {
+    ValueAxis axis = logarithmic(low, high) ? Plots.logAxis(label, style) : Plots.axis(label, style);
+    axis.setRange(low, high);
     return axis;
   }
 
@@ -92,8 +108,8 @@ public final class EnsembleFigure implements Figure {
     LogHistogram values = summary.wavelength();
     double greatest = 0.0;
     for (int i = 0; i < BARS; i++) {
-      double low = shortest * Math.pow(longest / shortest, (double) i / BARS);
-      double high = shortest * Math.pow(longest / shortest, (i + 1.0) / BARS);
+      double low = edge((double) i / BARS);
+      double high = edge((i + 1.0) / BARS);
       double height = values.share(low, high);
       greatest = Math.max(greatest, height);
       if (height > 0.0) {
@@ -111,8 +127,8 @@ public final class EnsembleFigure implements Figure {
   }
 
   private XYPlot joint() {
-    DecadeAxis time = Plots.logAxis("growth time (" + units.time() + ")", style);
-    time.setRange(0.9 * summary.growthTime().quantile(0.002), 1.1 * summary.growthTime().quantile(0.998));
+    ValueAxis time = axis("growth time (" + units.time() + ")", 0.95 * summary.growthTime().quantile(0.003),
+        1.05 * summary.growthTime().quantile(0.997));
     XYPlot plot = Plots.plot(wavelength(), time, style);
     XYLineAndShapeRenderer cells = new XYLineAndShapeRenderer(false, false);
     plot.setRenderer(cells);
@@ -160,7 +176,8 @@ public final class EnsembleFigure implements Figure {
     XYLineAndShapeRenderer bars = new XYLineAndShapeRenderer(false, true);
     bars.setSeriesShape(0, new Rectangle2D.Double(-2.0, -2.0, 4.0, 4.0));
     bars.setSeriesPaint(0, style.colour(series));
-    plot.setDataset(series, Plots.curve(series == 0 ? "first order" : "total", x, y));
+    plot.setDataset(series, Plots.curve(series == 0 ? "first order" : "total", new double[] {Double.NaN},
+        new double[] {Double.NaN}));
     plot.setRenderer(series, bars);
     // the axis runs downwards, and so must the boxes
     for (int j = 0; j < x.length; j++) {
