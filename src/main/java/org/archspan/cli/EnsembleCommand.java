@@ -9,6 +9,7 @@ import java.security.NoSuchAlgorithmException;
 import java.util.ArrayList;
 import java.util.HexFormat;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import org.archspan.equilibrium.Equilibrium;
 import org.archspan.equilibrium.EquilibriumBuilder;
@@ -105,12 +106,18 @@ final class EnsembleCommand extends ModelCommand {
     }
   }
 
-  /** What decides the answers of the draws. */
-  private String identity(Model model, DrawDesign design) {
+  /** What decides the answers of the draws: the inputs, the tables that they name, and how they are solved. */
+  private String identity(Model model, DrawDesign design) throws IOException {
     String all = model.inputs() + " " + common.tolerance + " " + design.sensitivities() + " " + !withoutLidTest;
     try {
-      byte[] digest = MessageDigest.getInstance("SHA-256").digest(all.getBytes(StandardCharsets.UTF_8));
-      return HexFormat.of().formatHex(digest, 0, 8);
+      MessageDigest digest = MessageDigest.getInstance("SHA-256");
+      digest.update(all.getBytes(StandardCharsets.UTF_8));
+      for (Map.Entry<String, String> input : model.inputs().entrySet()) {
+        if (input.getKey().endsWith(".file")) {
+          digest.update(Files.readAllBytes(common.model.resolveSibling(input.getValue())));
+        }
+      }
+      return HexFormat.of().formatHex(digest.digest(), 0, 8);
     } catch (NoSuchAlgorithmException impossible) {
       throw new IllegalStateException("every Java has SHA-256", impossible);
     }
@@ -124,7 +131,7 @@ final class EnsembleCommand extends ModelCommand {
     try (DrawProgress progress = new DrawProgress(range.end() - range.first(), common.quiet, err());
         EnsembleRun run = new EnsembleRun(design, new ModelDraws(model, !withoutLidTest), common.threads)) {
       for (long first = range.first(); first < range.end();) {
-        long end = Math.min(range.end(), (first / DrawFolder.BLOCK + 1) * DrawFolder.BLOCK);
+        long end = blockEnd(first, range);
         block(first, end, run, folder, progress);
         first = end;
       }
@@ -133,11 +140,31 @@ final class EnsembleCommand extends ModelCommand {
 
   private void prepare(DrawFolder folder, DrawRange range) throws IOException {
     folder.clear(range.first(), range.end(), common.overwrite);
-    boolean taken = folder.blocks().stream().anyMatch(block -> block.first() < range.end() && block.last() >= range.first());
-    if (taken && !resume) {
+    for (DrawFolder.Block block : folder.blocks()) {
+      if (block.first() < range.end() && block.last() >= range.first()) {
+        keepOrRemove(folder, block, range);
+      }
+    }
+  }
+
+  /** A shorter run ended within a block, which a longer one replaces. */
+  private void keepOrRemove(DrawFolder folder, DrawFolder.Block block, DrawRange range) throws IOException {
+    if (!resume) {
       throw new WriteException(common.out + " holds some of these draws already; use --resume to go on with them, --overwrite to"
           + " replace them, or another folder");
     }
+    if (block.first() < range.first() || block.last() >= range.end()) {
+      throw new WriteException(block.file() + " holds draws beyond those asked for as well; ask for all of them, or use another"
+          + " folder");
+    }
+    if (block.first() != Math.max(range.first(), block.first() / DrawFolder.BLOCK * DrawFolder.BLOCK)
+        || block.last() != blockEnd(block.first(), range) - 1) {
+      folder.remove(block);
+    }
+  }
+
+  private static long blockEnd(long first, DrawRange range) {
+    return Math.min(range.end(), (first / DrawFolder.BLOCK + 1) * DrawFolder.BLOCK);
   }
 
   private void block(long first, long end, EnsembleRun run, DrawFolder folder, DrawProgress progress) throws IOException {

@@ -40,10 +40,10 @@ public final class ComparisonText {
   public static String text(String title, Disk disk, Equilibrium equilibrium, Comparison comparison, GasAmount amount,
       OutputUnits units, int width) {
     return new ComparisonText(comparison, amount, units)
-        .fill(Assumptions.block(title, disk, equilibrium, units, width)).text();
+        .fill(Assumptions.block(title, disk, equilibrium, units, width), disk).text();
   }
 
-  private TextBlock fill(TextBlock block) {
+  private TextBlock fill(TextBlock block, Disk disk) {
     for (VariedInput input : comparison.inputs()) {
       block.labelled("varied", input.key() + ": " + values(input));
     }
@@ -67,7 +67,7 @@ public final class ComparisonText {
     if (warned > 0) {
       block.bullet(warned + " of the cases carry warnings of their own: see the column warnings, or `spacing` with --set.");
     }
-    block.bullet("Linear theory on a static base state that varies with height alone.");
+    Limits.add(block, disk);
     return block;
   }
 

@@ -34,13 +34,14 @@ public final class EnsembleText {
   public static String text(String title, Disk disk, Equilibrium equilibrium, EnsembleSummary summary, OutputUnits units,
       boolean armWidth, int columns) {
     return new EnsembleText(summary, units, armWidth)
-        .fill(Assumptions.block(title + " (assumptions at the middles)", disk, equilibrium, units, columns)).text();
+        .fill(Assumptions.block(title + " (assumptions at the middles)", disk, equilibrium, units, columns), disk).text();
   }
 
-  private TextBlock fill(TextBlock block) {
+  private TextBlock fill(TextBlock block, Disk disk) {
     for (UncertainInput input : summary.design().inputs()) {
       block.labelled("uncertain", input.key() + ": " + words(input));
     }
+    block.labelled("held", Limits.held(disk));
     block.labelled("draws", summary.draws() + " (" + summary.firstDraw() + " to " + summary.lastDraw() + "), seed "
         + summary.design().seed() + "; inputs independent of each other");
     block.heading("Found");
@@ -56,7 +57,7 @@ public final class EnsembleText {
       block.bullet(percent(summary.unstable() - summary.gathering(), summary.unstable()) + " of the unstable draws have no mode"
           + " that gathers the disk's own gas: their wavelength is that of the fastest growth anywhere.");
     }
-    block.bullet("Linear theory on a static base state that varies with height alone.");
+    Limits.add(block, disk);
     return block;
   }
 

@@ -32,10 +32,10 @@ public final class InferenceText {
   public static String text(String title, Disk disk, Equilibrium equilibrium, Inference inference, OutputUnits units,
       int width) {
     return new InferenceText(inference, units)
-        .fill(Assumptions.block(title + " (assumptions at the middles)", disk, equilibrium, units, width)).text();
+        .fill(Assumptions.block(title + " (assumptions at the middles)", disk, equilibrium, units, width), disk).text();
   }
 
-  private TextBlock fill(TextBlock block) {
+  private TextBlock fill(TextBlock block, Disk disk) {
     double unit = units.centimetresPerLength();
     block.labelled("observed", "spacing " + Numbers.length(unit * inference.observed().wavelength(), units) + " +- "
         + Numbers.length(unit * inference.observed().error(), units));
@@ -43,7 +43,7 @@ public final class InferenceText {
       block.labelled(input == inference.input() ? "asked for" : "uncertain", input.key() + ", before: "
           + EnsembleText.words(input));
     }
-    block.heading("With all other inputs at their middles").sentence(along());
+    block.labelled("held", Limits.held(disk)).heading("With all other inputs at their middles").sentence(along());
     block.heading("With all inputs uncertain at once").table(posterior()).gap();
     block.sentence(sentence(inference, units));
     block.sentence(inference.posterior().draws() + " draws from what was known before, weighted with the likelihood of the"
@@ -51,8 +51,8 @@ public final class InferenceText {
         + " (effective number). " + inference.posterior().failed() + " have no answer.");
     block.heading("What limits it");
     warnings(inference).forEach(block::bullet);
-    block.bullet("The observed spacing is taken as that of the mode that sets the spacing of the model; linear theory on a"
-        + " static base state that varies with height alone.");
+    block.bullet("The observed spacing is taken as that of the mode that sets the spacing of the model.");
+    Limits.add(block, disk);
     return block;
   }
 

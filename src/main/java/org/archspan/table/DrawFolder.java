@@ -117,6 +117,15 @@ public final class DrawFolder {
     }
   }
 
+  /** Removes a block. */
+  public void remove(Block block) throws WriteException {
+    try {
+      Files.deleteIfExists(block.file());
+    } catch (IOException fault) {
+      throw new WriteException(block.file() + " cannot be removed: " + fault.getMessage());
+    }
+  }
+
   /**
    * Removes what a run over these draws left unfinished when it was cut off; finished blocks too where they are to be replaced.
    * Other runs may be writing other draws into the same folder: theirs are left alone.

@@ -126,6 +126,34 @@ class EnsembleCommandTest {
     return new ProcessBuilder(command).redirectErrorStream(true).redirectOutput(ProcessBuilder.Redirect.DISCARD).start();
   }
 
+  /** More draws can be asked for later; fewer would leave some unaccounted for. */
+  @Test
+  void aLongerRunGoesOnFromAShorterOne() throws IOException {
+    String out = folder.resolve("out").toString();
+    String longer = folder.resolve("longer").toString();
+    assertThat(ensemble("--draws", "20", "--out", out, "--quiet").status()).isZero();
+    assertThat(ensemble("--draws", "50", "--out", out, "--quiet", "--resume").status()).isZero();
+    assertThat(ensemble("--draws", "50", "--out", longer, "--quiet").status()).isZero();
+    assertThat(bytes(Path.of(out))).isEqualTo(bytes(Path.of(longer)));
+    CommandRun shorter = ensemble("--draws", "30", "--out", out, "--resume");
+    assertThat(shorter.status()).isEqualTo(5);
+    assertThat(shorter.err()).contains("beyond those asked for");
+  }
+
+  @Test
+  void aDamagedBlockIsNamed() throws IOException {
+    Path out = folder.resolve("out");
+    assertThat(ensemble("--draws", "20", "--out", out.toString(), "--quiet").status()).isZero();
+    Path block = out.resolve("draws/draws-000000000000-000000000019.ecsv");
+    String text = Files.readString(block);
+    Files.writeString(block, text.substring(0, text.length() - 40));
+    CommandRun run = ensemble("--draws", "20", "--out", out.toString(), "--resume");
+    assertThat(run.status()).isEqualTo(5);
+    assertThat(run.err()).contains("is damaged", "--resume");
+    Files.writeString(block, text.substring(0, text.lastIndexOf("\n19,") + 1));
+    assertThat(ensemble("--draws", "20", "--out", out.toString(), "--resume").err()).contains("does not hold the draws");
+  }
+
   @Test
   void drawsOfAnotherEnsembleAreRefused() {
     String out = folder.resolve("out").toString();
