@@ -19,11 +19,10 @@ import org.archspan.modelfile.ModelReader;
 import org.archspan.modelfile.Reading;
 import org.archspan.modelfile.UnreadableFileException;
 import org.archspan.modelfile.VariedInputReader;
+import org.archspan.report.ComparisonFiles;
 import org.archspan.report.ComparisonJson;
 import org.archspan.report.ComparisonText;
-import org.archspan.report.FigureFiles;
 import org.archspan.spacing.SpacingResult;
-import org.archspan.table.ComparisonTable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.ITypeConverter;
 import picocli.CommandLine.Option;
@@ -57,8 +56,10 @@ final class CompareCommand extends ModelCommand {
       comparison = Comparison.solve(varied, values -> solved(values, amount), common.threads, progress::step);
     }
     if (common.out != null) {
-      new FigureFiles(common.out, common.overwrite).comparison(comparison, ComparisonTable.of(comparison, model.units()),
-          model.units());
+      ComparisonFiles.write(comparison, model.units(), echo(model),
+          ComparisonJson.text(echo(model), comparison, amount, model.units()),
+          ComparisonText.text(model.title(), model.disk(), equilibrium, comparison, amount, model.units(), 88), common.out,
+          common.overwrite);
     }
     print(() -> ComparisonJson.text(echo(model), comparison, amount, model.units()),
         () -> ComparisonText.text(model.title(), model.disk(), equilibrium, comparison, amount, model.units(), width()));

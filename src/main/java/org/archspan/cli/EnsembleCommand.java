@@ -76,7 +76,7 @@ final class EnsembleCommand extends ModelCommand {
       run(model, design, common.out == null ? null : new DrawFolder(common.out.resolve("draws"), table, title));
     }
     if (common.out != null && part == null) {
-      EnsembleFiles.write(summary, model.units(), width, EnsembleJson.text(echo(model), summary, model.units(), width),
+      EnsembleFiles.write(summary, model.units(), width, echo(model), EnsembleJson.text(echo(model), summary, model.units(), width),
           EnsembleText.text(model.title(), model.disk(), equilibrium, summary, model.units(), width, 88), common.out,
           common.overwrite || resume);
     }

@@ -80,7 +80,7 @@ final class InferCommand extends ModelCommand {
     boolean width = model.arm().width().isPresent();
     Equilibrium equilibrium = EquilibriumBuilder.build(model.disk(), common.tolerance);
     if (common.out != null) {
-      InferenceFiles.write(inference, model.units(), width, InferenceJson.text(echo(model), inference, model.units(), width),
+      InferenceFiles.write(inference, model.units(), width, echo(model), InferenceJson.text(echo(model), inference, model.units(), width),
           InferenceText.text(model.title(), model.disk(), equilibrium, inference, model.units(), 88), common.out,
           common.overwrite);
     }

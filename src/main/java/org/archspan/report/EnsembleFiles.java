@@ -18,16 +18,19 @@ public final class EnsembleFiles {
    *
    * @param armWidth whether the arm has one, so that masses are whole
    */
-  public static void write(EnsembleSummary summary, OutputUnits units, boolean armWidth, String json, String text, Path folder,
-      boolean overwrite) throws WriteException {
+  public static void write(EnsembleSummary summary, OutputUnits units, boolean armWidth, ModelEcho model, String json,
+      String text, Path folder, boolean overwrite) throws WriteException {
+    ReportPage page = new ReportPage().table("Ranges", EnsembleTable.ranges(summary, units, armWidth));
     OutputFolder output = new OutputFolder().text("summary.json", json).text("summary.txt", text)
         .table("ensemble", EnsembleTable.ranges(summary, units, armWidth));
     if (summary.design().sensitivities()) {
       output.table("sensitivity", EnsembleTable.sensitivities(summary));
+      page.table("Sobol' indices of the logarithms", EnsembleTable.sensitivities(summary));
     }
     if (summary.wavelength().total() > 0.0) {
       output.figure("ensemble", new EnsembleFigure(summary, units, FigureStyle.journal()));
+      page.figure("Distribution of the spacing, growth time beside it, and what drives it", output.content("ensemble.svg"));
     }
-    output.write(folder, overwrite);
+    output.text("report.html", page.html(model, EnsembleText.sentence(summary, units), text)).write(folder, overwrite);
   }
 }

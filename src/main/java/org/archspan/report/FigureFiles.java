@@ -3,10 +3,7 @@ package org.archspan.report;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.OptionalDouble;
-import org.archspan.comparison.Comparison;
 import org.archspan.equilibrium.Equilibrium;
-import org.archspan.figure.ComparisonCurves;
-import org.archspan.figure.ComparisonMap;
 import org.archspan.figure.EquilibriumFigure;
 import org.archspan.figure.FigureStyle;
 import org.archspan.figure.GrowthFigure;
@@ -55,16 +52,5 @@ public final class FigureFiles {
   public void plane(PlaneResult plane, Table table, OutputUnits units) throws WriteException {
     new OutputFolder().table("plane", table).figure("plane", new PlaneFigure(plane, units, FigureStyle.journal()))
         .write(folder, overwrite);
-  }
-
-  /** The model under several assumptions; more than two inputs leave no figure. */
-  public void comparison(Comparison comparison, Table table, OutputUnits units) throws WriteException {
-    OutputFolder output = new OutputFolder().table("compare", table);
-    if (comparison.inputs().size() == 1) {
-      output.figure("compare", new ComparisonCurves(comparison, units, FigureStyle.journal()));
-    } else if (comparison.inputs().size() == 2) {
-      output.figure("compare", new ComparisonMap(comparison, units, FigureStyle.journal()));
-    }
-    output.write(folder, overwrite);
   }
 }

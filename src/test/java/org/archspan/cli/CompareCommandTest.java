@@ -69,7 +69,7 @@ class CompareCommandTest {
         "waves.parity=mirror,flexing", "--quiet", "--out");
     CommandRun.of(Stream.concat(vary.stream(), Stream.of(one.toString(), "--threads", "1")).toArray(String[]::new));
     CommandRun.of(Stream.concat(vary.stream(), Stream.of(two.toString(), "--threads", "4")).toArray(String[]::new));
-    for (String name : List.of("compare.ecsv", "compare.svg", "compare.png")) {
+    for (String name : List.of("compare.ecsv", "compare.svg", "compare.png", "summary.json", "summary.txt", "report.html")) {
       assertThat(Files.readAllBytes(two.resolve(name))).isEqualTo(Files.readAllBytes(one.resolve(name)));
     }
     assertThat(Files.readString(one.resolve("compare.svg"))).contains("field.strength", "cross: no answer");

@@ -92,7 +92,7 @@ class InferCommandTest {
         .isCloseTo(end(json(given).getAsJsonArray("intervals").get(0).getAsJsonObject(), "low"), within(1e-8));
     try (Stream<Path> files = Files.list(out)) {
       assertThat(files.map(file -> file.getFileName().toString())).containsExactlyInAnyOrder("summary.json", "summary.txt",
-          "relation.ecsv", "intervals.ecsv", "posterior.ecsv", "inference.svg", "inference.png");
+          "relation.ecsv", "intervals.ecsv", "posterior.ecsv", "inference.svg", "inference.png", "report.html");
     }
   }
 
