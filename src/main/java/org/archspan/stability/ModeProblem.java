@@ -71,6 +71,14 @@ public record ModeProblem(Equilibrium equilibrium, GasClosure gas, CosmicRayClos
         Double.POSITIVE_INFINITY), parity, crossWavenumber, perturbedGravity, turn, tolerance);
   }
 
+  /** The same problem with a gas that cools at once, if it cools, and cosmic rays that diffuse at once, if they diffuse. */
+  ModeProblem withSoftestClosures() {
+    GasClosure softest = gas.cools() ? new GasClosure(gas.softestIndex()) : gas;
+    ModeProblem soft = new ModeProblem(equilibrium, softest, cosmicRays, parity, crossWavenumber, perturbedGravity, turn,
+        tolerance);
+    return cosmicRays.leaks() ? soft.withDiffusedCosmicRays() : soft;
+  }
+
   boolean bottomFixed() {
     return parity != Parity.FLEXING;
   }

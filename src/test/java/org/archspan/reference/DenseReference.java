@@ -85,8 +85,24 @@ public final class DenseReference {
     boolean leaking = diffusivity > 0.0 && !Double.isInfinite(diffusivity) && max(cosmic) > 0.0;
     double x = kx * length;
     double y = ky * length;
-    double[] values = leaking ? firstOrder(x, y).positive() : secondOrder(x, y).positive();
+    double[] values = leaking ? firstOrder(x, y, true, 0.0).positive() : secondOrder(x, y).positive();
     return Arrays.stream(values).map(v -> (leaking ? v : Math.sqrt(v)) * speed / length).toArray();
+  }
+
+  /**
+   * All growing modes under rigid rotation, as {Re s, Im s} in s^-1, those with negative frequency left out; fastest first.
+   * First order in s with the velocities, the Coriolis force between them.
+   *
+   * @param angularSpeed Omega, s^-1
+   * @param slowest      growth below this is left out, s^-1
+   */
+  public double[][] rotatingGrowth(double kx, double ky, double angularSpeed, double slowest) {
+    boolean leaking = diffusivity > 0.0 && !Double.isInfinite(diffusivity) && max(cosmic) > 0.0;
+    Pencil pencil = firstOrder(kx * length, ky * length, leaking, 2.0 * angularSpeed * length / speed);
+    double unit = speed / length;
+    return Arrays.stream(pencil.growing()).filter(s -> s[0] * unit > slowest && s[1] > -1e-9)
+        .map(s -> new double[] {s[0] * unit, s[1] * unit}).sorted((a, b) -> Double.compare(b[0], a[0]))
+        .toArray(double[][]::new);
   }
 
   /** Eigenvalue s^2, blocks X, Y, Z. */
@@ -94,25 +110,27 @@ public final class DenseReference {
     Pencil pencil = new Pencil(3 * points);
     equations(pencil, kx, ky, 0, false);
     identity(pencil, 0, 0, 3 * points);
-    boundaries(pencil, kx, ky, false);
+    boundaries(pencil, kx, ky, false, false);
     return pencil;
   }
 
   /** Eigenvalue s, blocks of X, Y, Z, then their velocities, then w. */
-  private Pencil firstOrder(double kx, double ky) {
+  private Pencil firstOrder(double kx, double ky, boolean leaking, double coriolis) {
     int n = points;
     Pencil pencil = new Pencil(7 * n);
     identity(pencil, 0, 0, 7 * n);
     for (int i = 0; i < 3 * n; i++) {
       pencil.addLeft(i, 3 * n + i, 1.0);
     }
-    equations(pencil, kx, ky, 3 * n, true);
-    double leak = diffusivity * kx * kx;
+    equations(pencil, kx, ky, 3 * n, leaking);
+    double leak = leaking ? diffusivity * kx * kx : 1.0;
     for (int i = 0; i < n; i++) {
+      pencil.addLeft(3 * n + i, 4 * n + i, coriolis);
+      pencil.addLeft(4 * n + i, 3 * n + i, -coriolis);
       divergence(pencil, 6 * n + i, i, 1.0, kx, ky, 3 * n);
       pencil.addLeft(6 * n + i, 6 * n + i, -leak);
     }
-    boundaries(pencil, kx, ky, true);
+    boundaries(pencil, kx, ky, true, leaking);
     return pencil;
   }
 
@@ -167,15 +185,15 @@ public final class DenseReference {
     }
   }
 
-  private void boundaries(Pencil pencil, double kx, double ky, boolean leaking) {
-    end(pencil, 0, parity != Parity.FLEXING, kx, ky, leaking);
-    end(pencil, points - 1, topBoundary == TopBoundary.LID, kx, ky, leaking);
+  private void boundaries(Pencil pencil, double kx, double ky, boolean firstOrder, boolean leaking) {
+    end(pencil, 0, parity != Parity.FLEXING, kx, ky, firstOrder, leaking);
+    end(pencil, points - 1, topBoundary == TopBoundary.LID, kx, ky, firstOrder, leaking);
   }
 
   /** At an end Z = 0, or the Lagrangian change of the total pressure, {@code P + g Z}, vanishes. */
-  private void end(Pencil pencil, int node, boolean rigid, double kx, double ky, boolean leaking) {
+  private void end(Pencil pencil, int node, boolean rigid, double kx, double ky, boolean firstOrder, boolean leaking) {
     int z = 2 * points + node;
-    int row = leaking ? z + 3 * points : z;
+    int row = firstOrder ? z + 3 * points : z;
     pencil.clearRow(row);
     if (rigid) {
       pencil.addLeft(row, row, 1.0);
@@ -183,7 +201,7 @@ public final class DenseReference {
       totalPressure(pencil, row, node, 1.0, kx, ky, leaking);
       pencil.addLeft(row, z, g[node]);
     }
-    if (rigid && leaking) {
+    if (rigid && firstOrder) {
       pencil.clearRow(z);
       pencil.addLeft(z, z, 1.0);
     }
@@ -222,6 +240,23 @@ public final class DenseReference {
         left[row + size * column] = 0.0;
         right[row + size * column] = 0.0;
       }
+    }
+
+    /** Finite eigenvalues with a positive real part; overwrites the matrices. */
+    double[][] growing() {
+      double[] real = new double[size];
+      double[] imaginary = new double[size];
+      double[] denominator = new double[size];
+      double[] work = new double[16 * size];
+      intW info = new intW(0);
+      JavaLAPACK.getInstance().dggev("N", "N", size, left, size, right, size, real, imaginary, denominator,
+          new double[1], 1, new double[1], 1, work, work.length, info);
+      if (info.val != 0) {
+        throw new IllegalStateException("dggev did not converge: info " + info.val);
+      }
+      return IntStream.range(0, size).filter(i -> Math.abs(denominator[i]) > 1e-9 * Math.hypot(real[i], imaginary[i]))
+          .mapToObj(i -> new double[] {real[i] / denominator[i], imaginary[i] / denominator[i]})
+          .filter(s -> s[0] > 0.0).toArray(double[][]::new);
     }
 
     /** Real positive eigenvalues, descending; overwrites the matrices. */
