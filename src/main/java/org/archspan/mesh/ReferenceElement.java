@@ -96,7 +96,7 @@ public final class ReferenceElement {
    * The order in which an element's nodes are eliminated: the inner ones first, then the left end, then the right end.
    * Pairs (i, j >= i) in this order, row by row, are the packed form of an element matrix.
    */
-  static int[] eliminationOrder(int degree) {
+  public static int[] eliminationOrder(int degree) {
     int[] order = new int[degree + 1];
     for (int i = 0; i < degree - 1; i++) {
       order[i] = i + 1;

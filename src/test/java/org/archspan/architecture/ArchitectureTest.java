@@ -41,7 +41,7 @@ class ArchitectureTest {
   private static final List<String> MODEL = List.of("units", "gravity", "closure", "field", "boundary");
   private static final List<String> KERNELS = List.of("linalg", "mesh");
   private static final List<String> NUMBERS = join(List.of(MODEL, KERNELS,
-      List.of("disk", "equilibrium", "stability", "spacing", "comparison", "uncertainty", "inference")));
+      List.of("disk", "equilibrium", "stability", "spacing", "shear", "comparison", "uncertainty", "inference")));
 
   /** Every package and the packages that it may use; a new package is added here. */
   private static Map<String, List<String>> mayUse() {
@@ -54,6 +54,7 @@ class ArchitectureTest {
     table.put("equilibrium", join(List.of(MODEL, KERNELS, List.of("disk"))));
     table.put("stability", join(List.of(MODEL, KERNELS, List.of("disk", "equilibrium"))));
     table.put("spacing", join(List.of(MODEL, KERNELS, List.of("disk", "equilibrium", "stability"))));
+    table.put("shear", join(List.of(MODEL, KERNELS, List.of("disk", "equilibrium", "stability", "spacing"))));
     table.put("comparison", join(List.of(MODEL, List.of("disk", "equilibrium", "stability", "spacing"))));
     table.put("uncertainty", List.of("units"));
     table.put("inference", List.of("uncertainty"));

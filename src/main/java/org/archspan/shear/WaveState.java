@@ -1,0 +1,27 @@
+package org.archspan.shear;
+
+/**
+ * Displacement and velocity of a wave at one time, each times the root of the density, on the nodes of a column: along the
+ * field (x), across it (y) and upward (z), as real amplitudes of {@code (-i x, -i y, z) exp(i k r)}; and what the relaxing
+ * pressures remember. Mutable: the integrator that owns it moves it on.
+ */
+final class WaveState {
+  final double[] x;
+  final double[] y;
+  final double[] z;
+  final double[] xVelocity;
+  final double[] yVelocity;
+  final double[] zVelocity;
+  /** One row of nodes for each relaxation. */
+  final double[][] memory;
+
+  WaveState(int nodes, int relaxations) {
+    x = new double[nodes];
+    y = new double[nodes];
+    z = new double[nodes];
+    xVelocity = new double[nodes];
+    yVelocity = new double[nodes];
+    zVelocity = new double[nodes];
+    memory = new double[relaxations][nodes];
+  }
+}
