@@ -31,8 +31,9 @@ import picocli.CommandLine.TypeConversionException;
 
 /** The same model under several assumptions. */
 @Command(name = "compare", mixinStandardHelpOptions = true,
-    description = "The same model under several assumptions: wavelength, growth time, mass per complex and what holds the"
-        + " mode, for all combinations of the given values. Exit status 4 says that some cases have no answer.")
+    description = "The same model under several assumptions: wavelength, growth time, mass per complex and what"
+        + " holds the mode, for all combinations of the given values. Exit status 4 says that some cases have no"
+        + " answer.")
 final class CompareCommand extends ModelCommand {
   private static final long MOST_CASES = 100_000;
   private static final Set<String> AMOUNTS = Set.of("gas.midplane-density", "gas.surface-density");
@@ -58,11 +59,12 @@ final class CompareCommand extends ModelCommand {
     if (common.out != null) {
       ComparisonFiles.write(comparison, model.units(), echo(model),
           ComparisonJson.text(echo(model), comparison, amount, model.units()),
-          ComparisonText.text(model.title(), model.disk(), equilibrium, comparison, amount, model.units(), 88), common.out,
-          common.overwrite);
+          ComparisonText.text(model.title(), model.disk(), equilibrium, comparison, amount, model.units(), 88),
+          common.out, common.overwrite);
     }
     print(() -> ComparisonJson.text(echo(model), comparison, amount, model.units()),
-        () -> ComparisonText.text(model.title(), model.disk(), equilibrium, comparison, amount, model.units(), width()));
+        () -> ComparisonText.text(model.title(), model.disk(), equilibrium, comparison, amount, model.units(),
+            width()));
   }
 
   @Override
@@ -72,13 +74,14 @@ final class CompareCommand extends ModelCommand {
 
   private HeldAmount held() {
     if (!Set.of("surface-density", "midplane-density").contains(hold)) {
-      throw new ParameterException(spec.commandLine(), "--hold " + hold + ": allowed is surface-density or midplane-density");
+      throw new ParameterException(spec.commandLine(), "--hold " + hold + ": allowed is surface-density or"
+          + " midplane-density");
     }
     Set<String> keys = new HashSet<>();
     for (VariedInput input : varied) {
       if (!keys.add(input.key())) {
-        throw new ParameterException(spec.commandLine(), "--vary " + input.key() + " is given twice; give all its values at"
-            + " once");
+        throw new ParameterException(spec.commandLine(), "--vary " + input.key() + " is given twice; give all its"
+            + " values at once");
       }
     }
     boolean amountVaried = keys.stream().anyMatch(key -> AMOUNTS.contains(key) || key.endsWith(".midplane-density"));

@@ -42,8 +42,8 @@ record DrawRange(long first, long end) {
           return new DrawRange(first, end);
         }
       }
-      throw new TypeConversionException("\"" + text + "\" is neither a number of draws nor FIRST:END with FIRST below END,"
-          + " and END at most " + LAST);
+      throw new TypeConversionException("\"" + text + "\" is neither a number of draws nor FIRST:END with FIRST"
+          + " below END, and END at most " + LAST);
     }
   }
 

@@ -31,15 +31,17 @@ import picocli.CommandLine.ParameterException;
 
 /** Many draws from the uncertainties of a model. */
 @Command(name = "ensemble", mixinStandardHelpOptions = true,
-    description = "Many draws from the uncertainties given in the model: distribution of spacing, growth time and mass, how many"
-        + " draws are stable or held by the lid, and which input drives the spacing. Exit status 4 says that some draws have no"
-        + " answer.")
+    description = "Many draws from the uncertainties given in the model: distribution of spacing, growth time and"
+        + " mass, how many draws are stable or held by the lid, and which input drives the spacing. Exit status 4"
+        + " says that some draws have no answer.")
 final class EnsembleCommand extends ModelCommand {
   @Option(names = "--draws", paramLabel = "N|FIRST:END", defaultValue = "4096", converter = DrawRange.Converter.class,
-      description = "how many draws, or which (default ${DEFAULT-VALUE}); a draw depends on the seed and its index alone")
+      description = "how many draws, or which (default ${DEFAULT-VALUE}); a draw depends on the seed and its index"
+          + " alone")
   DrawRange draws;
 
-  @Option(names = "--seed", paramLabel = "N", defaultValue = "1", description = "of the draws (default ${DEFAULT-VALUE})")
+  @Option(names = "--seed", paramLabel = "N", defaultValue = "1",
+      description = "of the draws (default ${DEFAULT-VALUE})")
   long seed;
 
   @Option(names = "--part", paramLabel = "K/N", converter = DrawRange.Part.Converter.class,
@@ -49,8 +51,8 @@ final class EnsembleCommand extends ModelCommand {
   @Option(names = "--resume", description = "keep the blocks of draws that --out holds and solve the others")
   boolean resume;
 
-  @Option(names = "--merge", paramLabel = "DIR", description = "solve nothing: read the draws in this folder, of one run or of"
-      + " all parts")
+  @Option(names = "--merge", paramLabel = "DIR",
+      description = "solve nothing: read the draws in this folder, of one run or of all parts")
   Path merge;
 
   @Option(names = "--without-lid-test", description = "do not ask what holds the mode, which saves time")
@@ -76,7 +78,8 @@ final class EnsembleCommand extends ModelCommand {
       run(model, design, common.out == null ? null : new DrawFolder(common.out.resolve("draws"), table, title));
     }
     if (common.out != null && part == null) {
-      EnsembleFiles.write(summary, model.units(), width, echo(model), EnsembleJson.text(echo(model), summary, model.units(), width),
+      EnsembleFiles.write(summary, model.units(), width, echo(model),
+          EnsembleJson.text(echo(model), summary, model.units(), width),
           EnsembleText.text(model.title(), model.disk(), equilibrium, summary, model.units(), width, 88), common.out,
           common.overwrite || resume);
     }
@@ -91,18 +94,19 @@ final class EnsembleCommand extends ModelCommand {
 
   private void refuseContradictions(Model model) {
     if (model.uncertain().inputs().isEmpty()) {
-      throw new ModelFault(model.source() + ": no input is uncertain; write for example strength = { value = \"3 uG\", normal ="
-          + " \"1 uG\" } under [field], or add --set field.strength.normal=1uG");
+      throw new ModelFault(model.source() + ": no input is uncertain; write for example strength = { value = \"3"
+          + " uG\", normal = \"1 uG\" } under [field], or add --set field.strength.normal=1uG");
     }
     if (merge != null && (part != null || resume)) {
-      throw new ParameterException(spec.commandLine(), "--merge solves nothing: it goes with neither --part nor --resume");
+      throw new ParameterException(spec.commandLine(), "--merge solves nothing: it goes with neither --part nor"
+          + " --resume");
     }
     if (common.out == null && (part != null || resume)) {
       throw new ParameterException(spec.commandLine(), (part != null ? "--part" : "--resume") + " needs --out DIR");
     }
     if (common.out != null && !common.overwrite && !resume && Files.exists(common.out.resolve("summary.json"))) {
-      throw new ParameterException(spec.commandLine(), common.out + " holds an ensemble already; use --resume to go on with it,"
-          + " --overwrite to replace it, or another folder");
+      throw new ParameterException(spec.commandLine(), common.out + " holds an ensemble already; use --resume to go"
+          + " on with it, --overwrite to replace it, or another folder");
     }
   }
 
@@ -150,12 +154,12 @@ final class EnsembleCommand extends ModelCommand {
   /** A shorter run ended within a block, which a longer one replaces. */
   private void keepOrRemove(DrawFolder folder, DrawFolder.Block block, DrawRange range) throws IOException {
     if (!resume) {
-      throw new WriteException(common.out + " holds some of these draws already; use --resume to go on with them, --overwrite to"
-          + " replace them, or another folder");
+      throw new WriteException(common.out + " holds some of these draws already; use --resume to go on with them,"
+          + " --overwrite to replace them, or another folder");
     }
     if (block.first() < range.first() || block.last() >= range.end()) {
-      throw new WriteException(block.file() + " holds draws beyond those asked for as well; ask for all of them, or use another"
-          + " folder");
+      throw new WriteException(block.file() + " holds draws beyond those asked for as well; ask for all of them, or"
+          + " use another folder");
     }
     if (block.first() != Math.max(range.first(), block.first() / DrawFolder.BLOCK * DrawFolder.BLOCK)
         || block.last() != blockEnd(block.first(), range) - 1) {
@@ -167,7 +171,8 @@ final class EnsembleCommand extends ModelCommand {
     return Math.min(range.end(), (first / DrawFolder.BLOCK + 1) * DrawFolder.BLOCK);
   }
 
-  private void block(long first, long end, EnsembleRun run, DrawFolder folder, DrawProgress progress) throws IOException {
+  private void block(long first, long end, EnsembleRun run, DrawFolder folder, DrawProgress progress)
+      throws IOException {
     Optional<DrawFolder.Block> finished = folder == null ? Optional.empty() : folder.finished(first, end - 1);
     if (finished.isPresent()) {
       folder.read(finished.get(), row -> take(row, progress));

@@ -35,13 +35,13 @@ import picocli.CommandLine.ParameterException;
 
 /** Which values of an input reproduce an observed spacing. */
 @Command(name = "infer", mixinStandardHelpOptions = true,
-    description = "Which values of one input reproduce an observed spacing: all intervals with the other inputs at their"
-        + " middles, and the posterior with all uncertain inputs drawn at once. Exit status 4 says that some cases have no"
-        + " answer.")
+    description = "Which values of one input reproduce an observed spacing: all intervals with the other inputs at"
+        + " their middles, and the posterior with all uncertain inputs drawn at once. Exit status 4 says that some"
+        + " cases have no answer.")
 final class InferCommand extends ModelCommand {
   @Option(names = "--input", required = true, paramLabel = "KEY=FROM:TO:N", converter = CompareCommand.Converter.class,
-      description = "input that is asked for and the range that is searched, such as field.strength=0.5uG:10uG:40; with log:"
-          + " in front equally likely in equal ratios before")
+      description = "input that is asked for and the range that is searched, such as field.strength=0.5uG:10uG:40;"
+          + " with log: in front equally likely in equal ratios before")
   VariedInput input;
 
   @Option(names = "--spacing", paramLabel = "LENGTH", converter = CrossWavelength.Converter.class,
@@ -59,7 +59,8 @@ final class InferCommand extends ModelCommand {
       description = "draws for the posterior (default ${DEFAULT-VALUE})")
   DrawRange draws;
 
-  @Option(names = "--seed", paramLabel = "N", defaultValue = "1", description = "of the draws (default ${DEFAULT-VALUE})")
+  @Option(names = "--seed", paramLabel = "N", defaultValue = "1",
+      description = "of the draws (default ${DEFAULT-VALUE})")
   long seed;
 
   private Inference inference;
@@ -80,12 +81,13 @@ final class InferCommand extends ModelCommand {
     boolean width = model.arm().width().isPresent();
     Equilibrium equilibrium = EquilibriumBuilder.build(model.disk(), common.tolerance);
     if (common.out != null) {
-      InferenceFiles.write(inference, model.units(), width, echo(model), InferenceJson.text(echo(model), inference, model.units(), width),
+      InferenceFiles.write(inference, model.units(), width, echo(model),
+          InferenceJson.text(echo(model), inference, model.units(), width),
           InferenceText.text(model.title(), model.disk(), equilibrium, inference, model.units(), 88), common.out,
           common.overwrite);
     }
-    print(() -> InferenceJson.text(echo(model), inference, model.units(), width), () -> InferenceText.text(model.title(),
-        model.disk(), equilibrium, inference, model.units(), width()));
+    print(() -> InferenceJson.text(echo(model), inference, model.units(), width),
+        () -> InferenceText.text(model.title(), model.disk(), equilibrium, inference, model.units(), width()));
   }
 
   @Override
@@ -121,12 +123,16 @@ final class InferCommand extends ModelCommand {
     }
     if (observation != null || spacing == null || error == null || Double.isInfinite(spacing.centimetres())
         || Double.isInfinite(error.centimetres())) {
-      throw new ParameterException(spec.commandLine(), "give the observed --spacing and its --error, or --observation FILE");
+      throw new ParameterException(spec.commandLine(), "give the observed --spacing and its --error, or"
+          + " --observation FILE");
     }
     return new ObservedSpacing(model.units().length(spacing.centimetres()), model.units().length(error.centimetres()));
   }
 
-  /** The values to search in the unit of the list of keys: the ends went through the model file, which may convert them. */
+  /**
+   * The values to search in the unit of the list of keys: the ends went through the model file, which may convert
+   * them.
+   */
   private double[] scanned(Model ranged, UncertainInput target) {
     Uncertainty ends = ranged.uncertainties().get(input.key());
     double[] range = range();
@@ -156,7 +162,8 @@ final class InferCommand extends ModelCommand {
     List<ReproducingInterval> intervals = search.search(scan);
     Posterior posterior = new Posterior(observed, inputs);
     try (DrawProgress progress = new DrawProgress(draws.end() - draws.first(), common.quiet, err());
-        EnsembleRun run = new EnsembleRun(new DrawDesign(inputs, seed, false), new ModelDraws(model, false), common.threads)) {
+        EnsembleRun run = new EnsembleRun(new DrawDesign(inputs, seed, false), new ModelDraws(model, false),
+            common.threads)) {
       run.solve(draws.first(), draws.end(), row -> {
         posterior.add(row);
         progress.step();

@@ -18,7 +18,8 @@ import org.archspan.stability.UnsolvedException;
  */
 public record Comparison(List<VariedInput> inputs, List<ComparedCase> cases) {
   /**
-   * Solves every combination; one that fails does not stop the others. The answers do not depend on the number of threads.
+   * Solves every combination; one that fails does not stop the others. The answers do not depend on the number of
+   * threads.
    *
    * @param threads at least 1
    * @param done    called after each case, from any thread

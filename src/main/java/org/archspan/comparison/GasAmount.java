@@ -34,7 +34,8 @@ public record GasAmount(HeldAmount held, double surfaceDensity, double bottomDen
   public static GasAmount of(Disk disk, HeldAmount held, double tolerance) {
     Equilibrium equilibrium = EquilibriumBuilder.build(disk, tolerance);
     HeldAmount meant = disk.gas() instanceof Gas.Stratified && held != HeldAmount.NEITHER ? HeldAmount.BOTH : held;
-    return new GasAmount(meant, equilibrium.surfaceDensity(), equilibrium.at(equilibrium.bottom()).density(), tolerance);
+    return new GasAmount(meant, equilibrium.surfaceDensity(), equilibrium.at(equilibrium.bottom()).density(),
+        tolerance);
   }
 
   /**
@@ -66,14 +67,14 @@ public record GasAmount(HeldAmount held, double surfaceDensity, double bottomDen
   private Disk withColumn(Disk disk, Gas.Components gas) {
     double guess = Math.log(bottomDensity / density(gas));
     try {
-      double[] bracket = UnivariateSolverUtils.bracket(x -> excess(disk, gas, x), guess, guess - 40.0, guess + 40.0, 0.3,
-          1.4, MOST_EVALUATIONS);
+      double[] bracket = UnivariateSolverUtils.bracket(x -> excess(disk, gas, x), guess, guess - 40.0, guess + 40.0,
+          0.3, 1.4, MOST_EVALUATIONS);
       double factor = new BracketingNthOrderBrentSolver(SETTLED, SETTLED, SETTLED, 5).solve(MOST_EVALUATIONS,
           x -> excess(disk, gas, x), bracket[0], bracket[1]);
       return disk.withGas(scaled(gas, Math.exp(factor)));
     } catch (MathIllegalArgumentException | TooManyEvaluationsException none) {
-      throw new RefusedModelException("no common factor on the densities of the components gives the surface density that is"
-          + " held; hold the midplane density instead");
+      throw new RefusedModelException("no common factor on the densities of the components gives the surface density"
+          + " that is held; hold the midplane density instead");
     }
   }
 

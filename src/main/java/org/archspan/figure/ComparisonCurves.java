@@ -131,8 +131,9 @@ public final class ComparisonCurves implements Figure {
       double greatest = ends[ends.length - 1];
       axis = input.wide() ? Plots.logAxis(labelled ? name : null, style) : Plots.axis(labelled ? name : null, style);
       double margin = greatest > least ? 0.04 : 0.5;
-      axis.setRange(input.wide() ? least * Math.pow(least / greatest, margin) : least - margin * Math.max(greatest - least, 1e-9),
-          input.wide() ? greatest * Math.pow(greatest / least, margin) : greatest + margin * Math.max(greatest - least, 1e-9));
+      double step = margin * Math.max(greatest - least, 1e-9);
+      double factor = Math.pow(greatest / least, margin);
+      axis.setRange(input.wide() ? least / factor : least - step, input.wide() ? greatest * factor : greatest + step);
     }
     axis.setTickLabelsVisible(labelled);
     return axis;

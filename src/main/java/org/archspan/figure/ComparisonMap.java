@@ -30,7 +30,8 @@ public final class ComparisonMap implements Figure {
   private static final double WIDE = 8.0;
   /** Height of the line that explains the marks, points. */
   private static final double KEY = 14.0;
-  private static final String MARKS = "dot: held by the lid; triangle: by the atmosphere above; grey: stable; cross: no answer";
+  private static final String MARKS = "dot: held by the lid; triangle: by the atmosphere above; grey: stable; cross:"
+      + " no answer";
   private final Comparison comparison;
   private final VariedInput across;
   private final VariedInput up;
@@ -101,7 +102,8 @@ public final class ComparisonMap implements Figure {
     Plots.chart(plot, false, style).draw(graphics, new Rectangle2D.Double(area.getX(), area.getY(),
         0.78 * area.getWidth(), area.getHeight()));
     ColourBar.draw(graphics, new Rectangle2D.Double(area.getX() + 0.78 * area.getWidth(), area.getY(),
-        0.22 * area.getWidth(), area.getHeight()), ColourMap.SEQUENTIAL, low, high, (wide ? "log\u2081\u2080 " : "") + label, style);
+        0.22 * area.getWidth(), area.getHeight()), ColourMap.SEQUENTIAL, low, high,
+        (wide ? "log\u2081\u2080 " : "") + label, style);
   }
 
   /** Values stand at equal distances, words and numbers alike; where there are many, only some are labelled. */
@@ -154,7 +156,8 @@ public final class ComparisonMap implements Figure {
     plot.setDataset(data);
     XYLineAndShapeRenderer marks = (XYLineAndShapeRenderer) plot.getRenderer();
     for (int series = 0; series < 2; series++) {
-      marks.setSeriesShape(series, series == 0 ? new Ellipse2D.Double(-1.3, -1.3, 2.6, 2.6) : ComparisonCurves.triangle());
+      marks.setSeriesShape(series, series == 0 ? new Ellipse2D.Double(-1.3, -1.3, 2.6, 2.6)
+          : ComparisonCurves.triangle());
       marks.setSeriesPaint(series, Color.BLACK);
       marks.setSeriesFillPaint(series, Color.WHITE);
     }

@@ -55,8 +55,8 @@ public final class EnsembleFigure implements Figure {
 
   @Override
   public String description() {
-    return "Histogram of the wavelength with its median and its range of 68 per cent, the joint distribution of wavelength and"
-        + " growth time, and the Sobol' indices of the inputs";
+    return "Histogram of the wavelength with its median and its range of 68 per cent, the joint distribution of"
+        + " wavelength and growth time, and the Sobol' indices of the inputs";
   }
 
   @Override
@@ -122,7 +122,8 @@ public final class EnsembleFigure implements Figure {
     middle.setPaint(style.shade());
     middle.setAlpha(1f);
     plot.addDomainMarker(middle, Layer.BACKGROUND);
-    plot.addDomainMarker(new ValueMarker(values.quantile(0.5), style.colour(1), new BasicStroke(1.2f)), Layer.FOREGROUND);
+    plot.addDomainMarker(new ValueMarker(values.quantile(0.5), style.colour(1), new BasicStroke(1.2f)),
+        Layer.FOREGROUND);
     return plot;
   }
 

@@ -18,7 +18,10 @@ import org.jfree.chart.plot.XYPlot;
 import org.jfree.chart.renderer.xy.XYLineAndShapeRenderer;
 import org.jfree.chart.ui.Layer;
 
-/** Spacing against the input that is asked for, with the observation; beside it what is known of the input before and after. */
+/**
+ * Spacing against the input that is asked for, with the observation; beside it what is known of the input before and
+ * after.
+ */
 public final class InferenceFigure implements Figure {
   private static final int PARTS = 80;
   private final Inference inference;
@@ -44,8 +47,9 @@ public final class InferenceFigure implements Figure {
 
   @Override
   public String description() {
-    return "Left: wavelength against " + inference.input().key() + " with all other inputs at their middles, the observed"
-        + " spacing with its error, and the values that reproduce it; right: distribution of the input before and after";
+    return "Left: wavelength against " + inference.input().key() + " with all other inputs at their middles, the"
+        + " observed spacing with its error, and the values that reproduce it; right: distribution of the input"
+        + " before and after";
   }
 
   @Override
@@ -78,7 +82,8 @@ public final class InferenceFigure implements Figure {
     ValueAxis input = inputAxis();
     input.setRange(value(inference.scan().get(0)), value(inference.scan().get(inference.scan().size() - 1)));
     double[] x = inference.scan().stream().mapToDouble(this::value).toArray();
-    double[] y = inference.scan().stream().mapToDouble(row -> row.hasSpacing() ? row.wavelength() : Double.NaN).toArray();
+    double[] y = inference.scan().stream().mapToDouble(row -> row.hasSpacing() ? row.wavelength() : Double.NaN)
+        .toArray();
     XYPlot plot = Plots.plot(input, wavelengthAxis(y), style);
     IntervalMarker observed = new IntervalMarker(inference.observed().wavelength() - inference.observed().error(),
         inference.observed().wavelength() + inference.observed().error());

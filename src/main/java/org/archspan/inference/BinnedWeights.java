@@ -38,7 +38,10 @@ public final class BinnedWeights {
     return total;
   }
 
-  /** The number (in units of the range) that a share (dimensionless) of the weight stays below; NaN where there is none. */
+  /**
+   * The number (in units of the range) that a share (dimensionless) of the weight stays below; NaN where there is
+   * none.
+   */
   public double quantile(double share) {
     double sum = 0.0;
     for (int i = 0; i < BINS && total > 0.0; i++) {

@@ -8,10 +8,10 @@ import java.util.function.DoubleFunction;
 import org.archspan.uncertainty.DrawRow;
 
 /**
- * All intervals of an input that reproduce an observed spacing. The relation need not be monotonic, may end where the gas is stable,
- * and may jump where another mode takes over. It is followed from point to point of a scan; between two points that lie on
- * either side of the observation, and beside a point that is nearer to it than its neighbours, it is followed further. An interval
- * between two points of the scan that shows on neither is missed.
+ * All intervals of an input that reproduce an observed spacing. The relation need not be monotonic, may end where
+ * the gas is stable, and may jump where another mode takes over. It is followed from point to point of a scan;
+ * between two points that lie on either side of the observation, and beside a point that is nearer to it than its
+ * neighbours, it is followed further. An interval between two points of the scan that shows on neither is missed.
  */
 public final class IntervalSearch {
   private static final int HALVINGS = 40;

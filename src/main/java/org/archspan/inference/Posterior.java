@@ -6,8 +6,8 @@ import org.archspan.uncertainty.DrawRow;
 import org.archspan.uncertainty.UncertainInput;
 
 /**
- * What an observed spacing says about the inputs: draws from what was known before, weighted with the likelihood of the observation
- * (importance sampling with the prior as proposal). A draw without a spacing has none.
+ * What an observed spacing says about the inputs: draws from what was known before, weighted with the likelihood of
+ * the observation (importance sampling with the prior as proposal). A draw without a spacing has none.
  */
 public final class Posterior {
   /** Share of a prior that the range of its bins leaves out at either end. */
@@ -71,7 +71,10 @@ public final class Posterior {
     return after.get(input);
   }
 
-  /** Effective number of draws (Kish 1965): square of the sum of the weights over the sum of their squares; dimensionless. */
+  /**
+   * Effective number of draws (Kish 1965): square of the sum of the weights over the sum of their squares;
+   * dimensionless.
+   */
   public double effectiveSize() {
     return squares > 0.0 ? sum * sum / squares : 0.0;
   }

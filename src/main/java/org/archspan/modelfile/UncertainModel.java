@@ -12,7 +12,10 @@ import org.archspan.uncertainty.Uncertainty;
 import org.archspan.units.UnitException;
 import org.archspan.units.UnitParser;
 
-/** A model that was read once, with any values of its uncertain inputs; some ten microseconds each. Safe for several threads. */
+/**
+ * A model that was read once, with any values of its uncertain inputs; some ten microseconds each. Safe for several
+ * threads.
+ */
 public final class UncertainModel {
   private final Inputs inputs;
   private final Path folder;
@@ -41,7 +44,8 @@ public final class UncertainModel {
         list.add(new UncertainInput(entry.getKey(), entry.getValue(), unit,
             unit.isEmpty() ? 1.0 : UnitParser.parse(unit).factor()));
       } catch (UnitException impossible) {
-        throw new IllegalStateException("the unit of " + entry.getKey() + " in the list of keys is not one", impossible);
+        throw new IllegalStateException("the unit of " + entry.getKey() + " in the list of keys is not one",
+            impossible);
       }
     }
     return List.copyOf(list);
@@ -55,8 +59,8 @@ public final class UncertainModel {
    */
   public DrawnModel with(double[] values) {
     if (keys.contains("gas.mass-per-hydrogen")) {
-      throw new RefusedModelException("gas.mass-per-hydrogen cannot be uncertain in an ensemble: it turns densities of nuclei"
-          + " into densities of mass when the model is read; give the density its own uncertainty");
+      throw new RefusedModelException("gas.mass-per-hydrogen cannot be uncertain in an ensemble: it turns densities"
+          + " of nuclei into densities of mass when the model is read; give the density its own uncertainty");
     }
     Inputs drawn = inputs.with(keys, values);
     try {
@@ -68,6 +72,7 @@ public final class UncertainModel {
     } catch (UnreadableFileException gone) {
       throw new RefusedModelException(gone.getMessage());
     }
-    throw new RefusedModelException(drawn.faults().stream().map(Diagnostic::toString).collect(Collectors.joining("; ")));
+    throw new RefusedModelException(
+        drawn.faults().stream().map(Diagnostic::toString).collect(Collectors.joining("; ")));
   }
 }

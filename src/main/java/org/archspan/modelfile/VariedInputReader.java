@@ -23,7 +23,8 @@ public final class VariedInputReader {
   /**
    * Reads a text.
    *
-   * @throws IllegalArgumentException when it is none of the three, or no model has such a key; the message says what is wrong
+   * @throws IllegalArgumentException when it is none of the three, or no model has such a key; the message says what
+   *                                  is wrong
    */
   public static VariedInput read(String text) {
     int equals = text.indexOf('=');
@@ -80,7 +81,8 @@ public final class VariedInputReader {
       throw new UnitException("\"" + text + "\" cannot be given in " + (unit.isEmpty() ? "pure numbers" : unit));
     }
     // divided by hand where the unit is its own: 3 uG is 3 uG to the last digit
-    return Quantity.unitOf(text).equals(unit) ? Double.parseDouble(text.substring(0, text.length() - unit.length()).strip()
+    return Quantity.unitOf(text).equals(unit) ? Double.parseDouble(
+        text.substring(0, text.length() - unit.length()).strip()
         .replace("_", "")) : quantity.value() / one.value();
   }
 
@@ -118,7 +120,8 @@ public final class VariedInputReader {
     List<String> values = new ArrayList<>();
     List<Double> numbers = new ArrayList<>();
     double step = Math.abs(to - from) / (count - 1) / Math.max(Math.abs(from), Math.abs(to));
-    MathContext digits = new MathContext(Math.min(16, DIGITS + (int) Math.max(0.0, Math.ceil(-2.0 - Math.log10(step)))));
+    int more = (int) Math.max(0.0, Math.ceil(-2.0 - Math.log10(step)));
+    MathContext digits = new MathContext(Math.min(16, DIGITS + more));
     for (int i = 0; i < count; i++) {
       double share = (double) i / (count - 1);
       double exact = i == 0 ? from : i == count - 1 ? to

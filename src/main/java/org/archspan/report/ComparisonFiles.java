@@ -16,10 +16,11 @@ public final class ComparisonFiles {
   }
 
   /** Writes table, figure (of one or two varied inputs), summary and report. */
-  public static void write(Comparison comparison, OutputUnits units, ModelEcho model, String json, String text, Path folder,
-      boolean overwrite) throws WriteException {
+  public static void write(Comparison comparison, OutputUnits units, ModelEcho model, String json, String text,
+      Path folder, boolean overwrite) throws WriteException {
     Table table = ComparisonTable.of(comparison, units);
-    OutputFolder output = new OutputFolder().text("summary.json", json).text("summary.txt", text).table("compare", table);
+    OutputFolder output = new OutputFolder().text("summary.json", json).text("summary.txt", text).table("compare",
+        table);
     ReportPage page = new ReportPage().table("All cases", table);
     if (comparison.inputs().size() == 1) {
       output.figure("compare", new ComparisonCurves(comparison, units, FigureStyle.journal()));
@@ -29,6 +30,7 @@ public final class ComparisonFiles {
     if (comparison.inputs().size() <= 2) {
       page.figure("The mode that sets the spacing under several assumptions", output.content("compare.svg"));
     }
-    output.text("report.html", page.html(model, ComparisonText.sentence(comparison, units), text)).write(folder, overwrite);
+    output.text("report.html", page.html(model, ComparisonText.sentence(comparison, units), text))
+        .write(folder, overwrite);
   }
 }

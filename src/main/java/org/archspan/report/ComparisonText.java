@@ -59,13 +59,14 @@ public final class ComparisonText {
     boolean elsewhere = comparison.cases().stream().flatMap(one -> one.result().stream())
         .anyMatch(result -> !result.stable() && result.spacing().isEmpty());
     if (elsewhere) {
-      block.bullet("Where the last column says no, no mode gathers the disk's own gas: the wavelength is that of the fastest"
-          + " growth anywhere.");
+      block.bullet("Where the last column says no, no mode gathers the disk's own gas: the wavelength is that of the"
+          + " fastest growth anywhere.");
     }
     long warned = comparison.cases().stream().flatMap(one -> one.result().stream())
         .filter(result -> !result.warnings().isEmpty()).count();
     if (warned > 0) {
-      block.bullet(warned + " of the cases carry warnings of their own: see the column warnings, or `spacing` with --set.");
+      block.bullet(warned + " of the cases carry warnings of their own: see the column warnings, or `spacing` with"
+          + " --set.");
     }
     Limits.add(block, disk);
     return block;
@@ -145,9 +146,11 @@ public final class ComparisonText {
       Comparator<ComparedCase> byTime = Comparator.comparingDouble(one -> peak(one).growthTime());
       ComparedCase shortest = waves.stream().min(byWavelength).orElseThrow();
       ComparedCase longest = waves.stream().max(byWavelength).orElseThrow();
-      words.add("the wavelength runs from " + Numbers.length(peak(shortest).wavelength(), units) + " (" + named(shortest)
+      words.add("the wavelength runs from " + Numbers.length(peak(shortest).wavelength(), units) + " ("
+          + named(shortest)
           + ") to " + Numbers.length(peak(longest).wavelength(), units) + " (" + named(longest) + ")");
-      words.add("the growth time from " + Numbers.time(peak(waves.stream().min(byTime).orElseThrow()).growthTime(), units)
+      words.add("the growth time from " + Numbers.time(peak(waves.stream().min(byTime).orElseThrow()).growthTime(),
+          units)
           + " to " + Numbers.time(peak(waves.stream().max(byTime).orElseThrow()).growthTime(), units));
     }
     return words.toString();

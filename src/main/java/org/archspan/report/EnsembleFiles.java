@@ -29,7 +29,8 @@ public final class EnsembleFiles {
     }
     if (summary.wavelength().total() > 0.0) {
       output.figure("ensemble", new EnsembleFigure(summary, units, FigureStyle.journal()));
-      page.figure("Distribution of the spacing, growth time beside it, and what drives it", output.content("ensemble.svg"));
+      page.figure("Distribution of the spacing, growth time beside it, and what drives it",
+          output.content("ensemble.svg"));
     }
     output.text("report.html", page.html(model, EnsembleText.sentence(summary, units), text)).write(folder, overwrite);
   }

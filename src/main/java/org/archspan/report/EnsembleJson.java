@@ -23,7 +23,8 @@ public final class EnsembleJson {
   public static String text(ModelEcho model, EnsembleSummary summary, OutputUnits units, boolean armWidth) {
     return new Json().put("model", model.json()).put("summary", EnsembleText.sentence(summary, units))
         .put("uncertain", summary.design().inputs().stream().map(EnsembleJson::input).toList())
-        .put("seed", summary.design().seed()).put("first-draw", summary.firstDraw()).put("last-draw", summary.lastDraw())
+        .put("seed", summary.design().seed()).put("first-draw", summary.firstDraw())
+        .put("last-draw", summary.lastDraw())
         .put("draws", summary.draws()).put("unstable", summary.unstable()).put("stable", summary.stable())
         .put("failures", summary.failed()).put("held-by-disk", summary.heldBy("disk"))
         .put("held-by-lid", summary.heldBy("lid")).put("held-by-halo", summary.heldBy("halo"))
@@ -41,7 +42,8 @@ public final class EnsembleJson {
     Uncertainty of = input.distribution();
     boolean factor = of.byFactors();
     return new Json().put("key", input.key()).put("unit", input.unit())
-        .put("shape", of.shape().name().toLowerCase(Locale.ROOT).replace('_', '-')).put("centre", of.centre() / input.unitSize())
+        .put("shape", of.shape().name().toLowerCase(Locale.ROOT).replace('_', '-'))
+        .put("centre", of.centre() / input.unitSize())
         .put("spread", factor ? of.spread() : of.spread() / input.unitSize());
   }
 

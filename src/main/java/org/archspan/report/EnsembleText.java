@@ -31,10 +31,11 @@ public final class EnsembleText {
    * @param equilibrium its base state
    * @param armWidth    whether the arm has one, so that masses are whole
    */
-  public static String text(String title, Disk disk, Equilibrium equilibrium, EnsembleSummary summary, OutputUnits units,
-      boolean armWidth, int columns) {
+  public static String text(String title, Disk disk, Equilibrium equilibrium, EnsembleSummary summary,
+      OutputUnits units, boolean armWidth, int columns) {
     return new EnsembleText(summary, units, armWidth)
-        .fill(Assumptions.block(title + " (assumptions at the middles)", disk, equilibrium, units, columns), disk).text();
+        .fill(Assumptions.block(title + " (assumptions at the middles)", disk, equilibrium, units, columns),
+        disk).text();
   }
 
   private TextBlock fill(TextBlock block, Disk disk) {
@@ -50,12 +51,13 @@ public final class EnsembleText {
     }
     block.sentence(sentence(summary, units)).sentence(shares());
     sensitivities(block);
-    summary.reasons().forEach((reason, count) -> block.bullet("No answer for " + count + (count == 1 ? " draw: " : " draws, such as: ") + reason));
+    summary.reasons().forEach((reason, count) -> block.bullet("No answer for " + count
+        + (count == 1 ? " draw: " : " draws, such as: ") + reason));
     block.heading("What limits it");
     block.bullet("Ranges and indices are those of the draws that have a spacing; stable draws have none.");
     if (summary.gathering() < summary.unstable()) {
-      block.bullet(percent(summary.unstable() - summary.gathering(), summary.unstable()) + " of the unstable draws have no mode"
-          + " that gathers the disk's own gas: their wavelength is that of the fastest growth anywhere.");
+      block.bullet(percent(summary.unstable() - summary.gathering(), summary.unstable()) + " of the unstable draws"
+          + " have no mode that gathers the disk's own gas: their wavelength is that of the fastest growth anywhere.");
     }
     Limits.add(block, disk);
     return block;
@@ -70,7 +72,8 @@ public final class EnsembleText {
     return switch (of.shape()) {
       case NORMAL -> "normal, " + centre + " with standard deviation " + spread + unit;
       case FACTOR -> "log-normal, " + centre + unit + " within a factor of " + spread;
-      case RATIO_RANGE -> "uniform in the logarithm from " + Numbers.given(of.centre() / of.spread() / input.unitSize()) + " to "
+      case RATIO_RANGE -> "uniform in the logarithm from "
+          + Numbers.given(of.centre() / of.spread() / input.unitSize()) + " to "
           + Numbers.given(of.centre() * of.spread() / input.unitSize()) + unit;
       case RANGE -> "uniform from " + Numbers.given((of.centre() - of.spread()) / input.unitSize()) + " to "
           + Numbers.given((of.centre() + of.spread()) / input.unitSize()) + unit;
@@ -107,7 +110,8 @@ public final class EnsembleText {
     return "The spacing is " + Numbers.length(length * wavelength.quantile(0.5), units) + ", within 68 per cent from "
         + Numbers.length(length * wavelength.quantile(0.16), units) + " to "
         + Numbers.length(length * wavelength.quantile(0.84), units) + "; the growth time "
-        + Numbers.time(second * time.quantile(0.5), units) + ", from " + Numbers.time(second * time.quantile(0.16), units)
+        + Numbers.time(second * time.quantile(0.5), units) + ", from "
+        + Numbers.time(second * time.quantile(0.16), units)
         + " to " + Numbers.time(second * time.quantile(0.84), units) + ".";
   }
 
@@ -139,8 +143,9 @@ public final class EnsembleText {
     }
     block.heading("Which input drives the spacing").table(rows).gap();
     block.sentence("Sobol' indices of the logarithm of the wavelength, from " + spacing.groups() + " groups of draws"
-        + (spacing.leftOut() == 0 ? "" : " (" + spacing.leftOut() + " left out: a draw without a spacing)") + "; first: share of"
-        + " the variance that goes when this input is known; total: share that remains when all others are.");
+        + (spacing.leftOut() == 0 ? "" : " (" + spacing.leftOut() + " left out: a draw without a spacing)")
+        + "; first: share of the variance that goes when this input is known; total: share that remains when all"
+        + " others are.");
     block.sentence("A measurement of " + inputs.get(best).key() + " would sharpen the spacing most: "
         + digits(100.0 * Math.max(0.0, spacing.first(best))) + " per cent of the variance.");
   }

@@ -27,7 +27,9 @@ public final class InferenceFiles {
     ReportPage page = new ReportPage()
         .figure("Spacing against the input, and the input before and after", output.content("inference.svg"))
         .table("Inputs before and after", InferenceTable.posterior(inference))
-        .table("Along the range, all other inputs at their middles", InferenceTable.relation(inference, units, armWidth));
-    output.text("report.html", page.html(model, InferenceText.sentence(inference, units), text)).write(folder, overwrite);
+        .table("Along the range, all other inputs at their middles",
+            InferenceTable.relation(inference, units, armWidth));
+    output.text("report.html", page.html(model, InferenceText.sentence(inference, units), text))
+        .write(folder, overwrite);
   }
 }

@@ -46,8 +46,8 @@ public final class InferenceText {
     block.labelled("held", Limits.held(disk)).heading("With all other inputs at their middles").sentence(along());
     block.heading("With all inputs uncertain at once").table(posterior()).gap();
     block.sentence(sentence(inference, units));
-    block.sentence(inference.posterior().draws() + " draws from what was known before, weighted with the likelihood of the"
-        + " observation, count as " + String.format(Locale.ROOT, "%.0f", inference.posterior().effectiveSize())
+    block.sentence(inference.posterior().draws() + " draws from what was known before, weighted with the likelihood"
+        + " of the observation, count as " + String.format(Locale.ROOT, "%.0f", inference.posterior().effectiveSize())
         + " (effective number). " + inference.posterior().failed() + " have no answer.");
     block.heading("What limits it");
     warnings(inference).forEach(block::bullet);
@@ -61,7 +61,8 @@ public final class InferenceText {
     String range = "from " + value(scan.get(0).values().get(inference.target())) + " to "
         + value(scan.get(scan.size() - 1).values().get(inference.target()));
     long stable = scan.stream().filter(row -> row.outcome() == DrawRow.Outcome.STABLE).count();
-    String searched = " (searched at " + scan.size() + " values " + range + "; at " + stable + " of them the gas is stable)";
+    String searched = " (searched at " + scan.size() + " values " + range + "; at " + stable
+        + " of them the gas is stable)";
     if (inference.intervals().isEmpty()) {
       return "No value of " + inference.input().key() + " reproduces the spacing within its error" + searched + ".";
     }
@@ -105,7 +106,8 @@ public final class InferenceText {
     BinnedWeights after = inference.posterior().after(inference.target());
     InferenceText words = new InferenceText(inference, units);
     if (after.total() == 0.0) {
-      return "None of the draws meets the observed spacing of " + spacing + "; with all other inputs at their middles it asks for "
+      return "None of the draws meets the observed spacing of " + spacing + "; with all other inputs at their"
+          + " middles it asks for "
           + inference.input().key() + " " + inference.intervals().stream().map(words::words)
               .collect(Collectors.joining(", and ")) + ".";
     }
@@ -118,8 +120,8 @@ public final class InferenceText {
   static List<String> warnings(Inference inference) {
     List<String> warnings = new ArrayList<>();
     if (inference.impossible()) {
-      warnings.add("THE OBSERVATION CANNOT BE REPRODUCED with these inputs: the numbers under `after` mean nothing. Another"
-          + " instability, another distance, or a wider range of inputs may be needed.");
+      warnings.add("THE OBSERVATION CANNOT BE REPRODUCED with these inputs: the numbers under `after` mean nothing."
+          + " Another instability, another distance, or a wider range of inputs may be needed.");
     } else if (inference.thin()) {
       warnings.add("Few draws lie near the observation: ranges are rough; ask for more --draws.");
     }

@@ -12,7 +12,8 @@ final class Limits {
   /** Adds the sentences that hold for every case. */
   static void add(TextBlock block, Disk disk) {
     if (disk.rotation().isPresent()) {
-      block.bullet("Rotation is given in the model and is not in these answers: it would slow long waves along the field.");
+      block.bullet("Rotation is given in the model and is not in these answers: it would slow long waves along the"
+          + " field.");
     }
     block.bullet("Linear theory on a static base state that varies with height alone; " + leftOut(disk.selfGravity())
         + " not in it.");
@@ -34,7 +35,7 @@ final class Limits {
       return "the prescribed stratification";
     }
     return column ? "the surface density that the model gives; the density at the lower end follows"
-        : "the density at the lower end that the model gives; the surface density follows (give gas.surface-density to hold"
-            + " that)";
+        : "the density at the lower end that the model gives; the surface density follows (give gas.surface-density"
+        + " to hold that)";
   }
 }

@@ -11,8 +11,8 @@ import org.archspan.stability.Peak;
 import org.archspan.stability.UnsolvedException;
 
 /**
- * Whether a peak stays where it is in a domain 1.5 times as tall, asked at its own wavelength and at those 5 per cent beside it.
- * {@link DomainInfluence} measures by how much it moves, at the cost of a search.
+ * Whether a peak stays where it is in a domain 1.5 times as tall, asked at its own wavelength and at those 5 per
+ * cent beside it. {@link DomainInfluence} measures by how much it moves, at the cost of a search.
  */
 final class LidTest {
   /** Orders may shift in the taller domain, where gas above the old top has modes of its own. */

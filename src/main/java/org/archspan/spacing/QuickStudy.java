@@ -12,10 +12,10 @@ import org.archspan.stability.GrowthPoint;
 import org.archspan.stability.Peak;
 
 /**
- * The mode that sets the spacing and nothing else, for thousands of disks: branches are sought only until one gathers the
- * disk's own gas, and the influence of the lid is tested at three wavelengths of a taller domain. The fastest wavelength of each
- * branch that is sought is proved as in {@link SpacingStudy}. About half a millisecond for a disk with uniform gravity far
- * from the midplane and one parity.
+ * The mode that sets the spacing and nothing else, for thousands of disks: branches are sought only until one
+ * gathers the disk's own gas, and the influence of the lid is tested at three wavelengths of a taller domain. The
+ * fastest wavelength of each branch that is sought is proved as in {@link SpacingStudy}. About half a millisecond
+ * for a disk with uniform gravity far from the midplane and one parity.
  */
 public final class QuickStudy {
   private final SearchOptions options;
@@ -80,7 +80,8 @@ public final class QuickStudy {
       Optional<GrowthPoint> edge = halo.filter(point -> fastest == null || point.growthRate() >= fastest.growthRate());
       if (edge.isPresent()) {
         return Optional.of(new QuickSpacing(edge.get().wavelength(), range.crestSpacing(edge.get().wavelength()),
-            edge.get().growthRate(), Double.POSITIVE_INFINITY, false, testLid ? Optional.of(HeldBy.HALO) : Optional.empty()));
+            edge.get().growthRate(), Double.POSITIVE_INFINITY, false,
+            testLid ? Optional.of(HeldBy.HALO) : Optional.empty()));
       }
       return fastest == null ? Optional.empty() : Optional.of(spacing(fastest, fastestSolver, false));
     }
@@ -108,7 +109,8 @@ public final class QuickStudy {
 
     private QuickSpacing spacing(Peak peak, BranchSolver solver, boolean gathers) {
       double wavelength = 2.0 * Math.PI / peak.wavenumber();
-      return new QuickSpacing(wavelength, range.crestSpacing(wavelength), peak.growthRate(), peak.mode().centroidHeight(), gathers,
+      return new QuickSpacing(wavelength, range.crestSpacing(wavelength), peak.growthRate(),
+          peak.mode().centroidHeight(), gathers,
           testLid ? Optional.of(heldBy(peak, solver.problem().parity())) : Optional.empty());
     }
 

@@ -36,7 +36,8 @@ public final class ComparisonTable {
     }
     columns.add(words("outcome", "unstable, stable, or failed", result -> result.stable() ? "stable" : "unstable",
         "failed"));
-    columns.add(peak("wavelength", units.length(), "of the mode that sets the spacing", p -> units.length(p.wavelength())));
+    columns.add(peak("wavelength", units.length(), "of the mode that sets the spacing",
+        p -> units.length(p.wavelength())));
     columns.add(peak("wavelength_error", "", "estimated relative error", BranchPeak::wavelengthError));
     columns.add(peak("growth_time", units.time(), "one e-folding", p -> units.time(p.growthTime())));
     columns.add(peak("growth_error", "", "estimated relative error", BranchPeak::growthError));
@@ -48,7 +49,8 @@ public final class ComparisonTable {
     base(columns);
     columns.add(Column.of("warnings", "what limits the answer, in words", comparison.cases().stream()
         .map(one -> one.result().map(result -> String.join(" ", result.warnings())).orElse("")).toList()));
-    columns.add(Column.of("reason", "why there is no answer", comparison.cases().stream().map(ComparedCase::reason).toList()));
+    columns.add(Column.of("reason", "why there is no answer",
+        comparison.cases().stream().map(ComparedCase::reason).toList()));
     return new Table("the model under several assumptions", columns);
   }
 

@@ -17,7 +17,9 @@ import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVRecord;
 import org.archspan.uncertainty.DrawRow;
 
-/** The draws of an ensemble on the disk: whole blocks, each a table of its own, so that a run may end at any instant. */
+/**
+ * The draws of an ensemble on the disk: whole blocks, each a table of its own, so that a run may end at any instant.
+ */
 public final class DrawFolder {
   /** Draws in a block; blocks begin at multiples of it. */
   public static final int BLOCK = 2048;
@@ -100,7 +102,9 @@ public final class DrawFolder {
             + " choose another folder");
       }
       List<DrawRow> rows = new ArrayList<>();
-      for (CSVRecord line : CSVFormat.DEFAULT.builder().setCommentMarker('#').setHeader().setSkipHeaderRecord(true).build()
+      CSVFormat format =
+          CSVFormat.DEFAULT.builder().setCommentMarker('#').setHeader().setSkipHeaderRecord(true).build();
+      for (CSVRecord line : format
           .parse(new java.io.StringReader(text))) {
         rows.add(table.row(line.stream().toList()));
       }
@@ -127,8 +131,8 @@ public final class DrawFolder {
   }
 
   /**
-   * Removes what a run over these draws left unfinished when it was cut off; finished blocks too where they are to be replaced.
-   * Other runs may be writing other draws into the same folder: theirs are left alone.
+   * Removes what a run over these draws left unfinished when it was cut off; finished blocks too where they are to
+   * be replaced. Other runs may be writing other draws into the same folder: theirs are left alone.
    *
    * @param end index after the last draw
    */

@@ -47,7 +47,8 @@ public final class DrawTable {
     columns.add(numbers(width ? "mass" : "mass_per_width", units.mass() + (width ? "" : "/" + units.length()),
         "gas that one wavelength holds", rows, DrawRow::mass));
     columns.add(words("held_by", "what confines the mode", rows, DrawRow::heldBy));
-    columns.add(words("gathers", "whether the mode gathers the disk's own gas", rows, row -> row.gathers() ? "yes" : "no"));
+    columns.add(words("gathers", "whether the mode gathers the disk's own gas", rows,
+        row -> row.gathers() ? "yes" : "no"));
     columns.add(words("reason", "why there is no answer", rows, DrawRow::reason));
     return new Table(title, columns);
   }

@@ -52,8 +52,10 @@ public final class InferenceTable {
         column("after_high_95", inference, j -> inference.posterior().after(j), 0.975)));
   }
 
-  private static Column column(String name, Inference inference, Function<Integer, BinnedWeights> weights, double share) {
-    return Column.of(name, "", "so that a share of " + share + " lies below", IntStream.range(0, inference.inputs().size())
+  private static Column column(String name, Inference inference, Function<Integer, BinnedWeights> weights,
+      double share) {
+    return Column.of(name, "", "so that a share of " + share + " lies below",
+        IntStream.range(0, inference.inputs().size())
         .mapToDouble(j -> weights.apply(j).quantile(share)).toArray());
   }
 }

@@ -5,13 +5,13 @@ import java.util.SplittableRandom;
 import org.apache.commons.math3.random.SobolSequenceGenerator;
 
 /**
- * Which values the inputs take in each draw. Draw i depends on the seed and i alone: points of a Sobol' sequence (Sobol' 1967;
- * directions of Joe and Kuo 2008) whose binary digits are shifted at random (Owen 1995 calls it a digital shift; it keeps the
- * evenness of the sequence).
+ * Which values the inputs take in each draw. Draw i depends on the seed and i alone: points of a Sobol' sequence
+ * (Sobol' 1967; directions of Joe and Kuo 2008) whose binary digits are shifted at random, which
+ * keeps the evenness of the sequence (a digital shift, L'Ecuyer and Lemieux 2002).
  *
- * <p>A design for sensitivities makes groups of n + 2 draws from one point of twice as many dimensions: two independent draws A
- * and B, and for each input a draw that has its value from B and all others from A (Saltelli et al. 2010, Comput. Phys.
- * Commun. 181, 259). Each draw of a group is by itself a fair draw.
+ * <p>A design for sensitivities makes groups of n + 2 draws from one point of twice as many dimensions: two
+ * independent draws A and B, and for each input a draw that has its value from B and all others from A (Saltelli et
+ * al. 2010, Comput. Phys. Commun. 181, 259). Each draw of a group is by itself a fair draw.
  *
  * @param inputs        that are uncertain, at least one, at most 500
  * @param seed          of the shift

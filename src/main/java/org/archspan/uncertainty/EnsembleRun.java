@@ -11,8 +11,8 @@ import java.util.concurrent.Future;
 import java.util.function.Consumer;
 
 /**
- * Solves draws on several threads and hands them on in their order; the rows do not depend on the number of threads. Memory
- * does not grow with the number of draws.
+ * Solves draws on several threads and hands them on in their order; the rows do not depend on the number of threads.
+ * Memory does not grow with the number of draws.
  */
 public final class EnsembleRun implements AutoCloseable {
   /** Draws that one thread solves at a stretch. */

@@ -4,8 +4,8 @@ import java.util.Map;
 import java.util.TreeMap;
 
 /**
- * Weights of positive numbers in bins of equal ratio, for quantiles of any number of values in little memory: quantiles are
- * right to 0.03 per cent.
+ * Weights of positive numbers in bins of equal ratio, for quantiles of any number of values in little memory:
+ * quantiles are right to 0.03 per cent.
  */
 public final class LogHistogram {
   /** Bins in an e-folding. */

@@ -1,9 +1,10 @@
 package org.archspan.uncertainty;
 
 /**
- * First-order and total shares of each input in the variance of an answer (Sobol' 1993, Math. Model. Comput. Exp. 1, 407), from
- * groups of draws as {@link DrawDesign} makes them: first-order by Saltelli et al. (2010, Comput. Phys. Commun. 181, 259, their
- * formula b), total by Jansen (1999, Comput. Phys. Commun. 117, 35). A group of which one draw has no answer is left out.
+ * First-order and total shares of each input in the variance of an answer (Sobol' 1993, Math. Model. Comput. Exp. 1,
+ * 407), from groups of draws as {@link DrawDesign} makes them: first-order by Saltelli et al. (2010, Comput. Phys.
+ * Commun. 181, 259, their formula b), total by Jansen (1999, Comput. Phys. Commun. 117, 35). A group of which one
+ * draw has no answer is left out.
  */
 public final class SobolIndices {
   private final double[] answers;
@@ -84,7 +85,10 @@ public final class SobolIndices {
     return squares / (2.0 * groups - 1.0);
   }
 
-  /** First-order index of an input, dimensionless: share of the variance that goes if it becomes known. NaN without spread. */
+  /**
+   * First-order index of an input, dimensionless: share of the variance that goes if it becomes known. NaN without
+   * spread.
+   */
   public double first(int input) {
     return first[input] / groups / variance();
   }
@@ -94,7 +98,10 @@ public final class SobolIndices {
     return total[input] / groups / variance();
   }
 
-  /** Standard error of the first-order index, dimensionless, as of independent groups: an upper estimate for even draws. */
+  /**
+   * Standard error of the first-order index, dimensionless, as of independent groups: an upper estimate for even
+   * draws.
+   */
   public double firstError(int input) {
     return error(first[input], firstSquare[input]);
   }

@@ -7,8 +7,8 @@ import org.apache.commons.math3.distribution.NormalDistribution;
  *
  * @param shape   of the distribution
  * @param centre  mean, median, or middle of the range, in the CGS unit of the input
- * @param spread  standard deviation (same unit), factor (dimensionless), half-width (same unit), or factor from the middle to
- *                either end (dimensionless)
+ * @param spread  standard deviation (same unit), factor (dimensionless), half-width (same unit), or factor from the
+ *                middle to either end (dimensionless)
  * @param lowest  least value that the input may take, in the CGS unit of the input; the distribution is cut there
  * @param highest greatest, in the CGS unit of the input
  */

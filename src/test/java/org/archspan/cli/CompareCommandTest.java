@@ -25,7 +25,8 @@ class CompareCommandTest {
 
   @Test
   void golden() throws IOException {
-    CommandRun run = CommandRun.of("compare", "models/solar-neighbourhood.toml", "--vary", "field.strength=2uG,4uG,8uG");
+    CommandRun run = CommandRun.of("compare", "models/solar-neighbourhood.toml", "--vary",
+        "field.strength=2uG,4uG,8uG");
     assertThat(run.status()).as(run.err()).isZero();
     Path golden = Path.of("src/test/resources/golden/compare-solar-neighbourhood.txt");
     if (System.getenv("ARCHSPAN_RENEW_GOLDEN") != null) {
@@ -69,23 +70,25 @@ class CompareCommandTest {
         "waves.parity=mirror,flexing", "--quiet", "--out");
     CommandRun.of(Stream.concat(vary.stream(), Stream.of(one.toString(), "--threads", "1")).toArray(String[]::new));
     CommandRun.of(Stream.concat(vary.stream(), Stream.of(two.toString(), "--threads", "4")).toArray(String[]::new));
-    for (String name : List.of("compare.ecsv", "compare.svg", "compare.png", "summary.json", "summary.txt", "report.html")) {
+    for (String name : List.of("compare.ecsv", "compare.svg", "compare.png", "summary.json", "summary.txt",
+        "report.html")) {
       assertThat(Files.readAllBytes(two.resolve(name))).isEqualTo(Files.readAllBytes(one.resolve(name)));
     }
     assertThat(Files.readString(one.resolve("compare.svg"))).contains("field.strength", "cross: no answer");
-    assertThat(Files.readString(one.resolve("compare.ecsv"))).contains("field_strength,waves_parity,outcome,wavelength");
+    assertThat(Files.readString(one.resolve("compare.ecsv")))
+        .contains("field_strength,waves_parity,outcome,wavelength");
   }
 
   @ParameterizedTest
-  @CsvSource(delimiter = '|', value = {"compare models/stellar-sheet.toml | 2 | --vary",
-      "compare models/stellar-sheet.toml --vary field.strenth=1uG | 2 | did you mean field.strength",
-      "compare models/stellar-sheet.toml --vary field.strength=1uG:2uG | 2 | from:to:n",
-      "compare models/stellar-sheet.toml --vary field.strength=1uG --hold mass | 2 | surface-density or midplane-density",
-      "compare models/stellar-sheet.toml --vary field.strength=1uG --vary field.strength=2uG | 2 | twice",
-      "compare models/stellar-sheet.toml --vary field.strength=1uG:2uG:9999 --vary gas.dispersion=5km/s:6km/s:9999 | 2 | 100000",
-      "compare models/stellar-sheet.toml --vary field.strength=1uG --set gas.dispersion=7 | 3 | unit is missing"})
+  @CsvSource(delimiter = '|', value = {"--json | 2 | --vary",
+      "--vary field.strenth=1uG | 2 | did you mean field.strength",
+      "--vary field.strength=1uG:2uG | 2 | from:to:n",
+      "--vary field.strength=1uG --hold mass | 2 | surface-density or midplane-density",
+      "--vary field.strength=1uG --vary field.strength=2uG | 2 | twice",
+      "--vary field.strength=1uG:2uG:9999 --vary gas.dispersion=5km/s:6km/s:9999 | 2 | 100000",
+      "--vary field.strength=1uG --set gas.dispersion=7 | 3 | unit is missing"})
   void faultsHaveOneMessageAndTheirStatus(String line, int status, String word) {
-    CommandRun run = CommandRun.of(line.split(" "));
+    CommandRun run = CommandRun.of(("compare " + MODEL + " " + line).split(" "));
     assertThat(run.status()).as(run.err()).isEqualTo(status);
     assertThat(run.err()).contains(word).doesNotContain("Exception");
     assertThat(run.out()).isEmpty();

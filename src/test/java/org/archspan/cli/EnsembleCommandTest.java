@@ -47,7 +47,8 @@ class EnsembleCommandTest {
   @Test
   void aDrawIsTheAnswerOfSpacing() throws IOException {
     Path out = folder.resolve("out");
-    assertThat(CommandRun.of("ensemble", MODEL, "--draws", "41:42", "--out", out.toString(), "--quiet").status()).isZero();
+    CommandRun run = CommandRun.of("ensemble", MODEL, "--draws", "41:42", "--out", out.toString(), "--quiet");
+    assertThat(run.status()).isZero();
     List<String> lines = Files.readAllLines(out.resolve("draws/draws-000000000041-000000000041.ecsv"));
     List<String> names = List.of(lines.get(lines.size() - 2).split(","));
     List<String> cells = List.of(lines.get(lines.size() - 1).split(","));
@@ -78,8 +79,9 @@ class EnsembleCommandTest {
     Path merged = folder.resolve("merged");
     ensemble("--draws", "400", "--out", whole.toString(), "--quiet", "--threads", "1");
     for (int part = 3; part >= 1; part--) {
-      CommandRun run = ensemble("--draws", "400", "--part", part + "/3", "--out", folder.resolve("parts/" + part).toString(),
-          "--quiet", "--threads", Integer.toString(part));
+      String own = folder.resolve("parts/" + part).toString();
+      CommandRun run = ensemble("--draws", "400", "--part", part + "/3", "--out", own, "--quiet", "--threads",
+          Integer.toString(part));
       assertThat(run.status()).as(run.err()).isZero();
     }
     CommandRun merge = ensemble("--merge", folder.resolve("parts").toString(), "--out", merged.toString(), "--quiet");
@@ -119,11 +121,12 @@ class EnsembleCommandTest {
   }
 
   private static Process process(Path out, List<String> arguments) throws IOException {
-    List<String> command = new ArrayList<>(List.of(Path.of(System.getProperty("java.home"), "bin", "java").toString(), "-cp",
-        System.getProperty("java.class.path"), "org.archspan.cli.Main", "ensemble", MODEL, "--set", "waves.branches=1",
-        "--resume", "--out", out.toString()));
+    String java = Path.of(System.getProperty("java.home"), "bin", "java").toString();
+    List<String> command = new ArrayList<>(List.of(java, "-cp", System.getProperty("java.class.path"),
+        "org.archspan.cli.Main", "ensemble", MODEL, "--set", "waves.branches=1", "--resume", "--out", out.toString()));
     command.addAll(arguments);
-    return new ProcessBuilder(command).redirectErrorStream(true).redirectOutput(ProcessBuilder.Redirect.DISCARD).start();
+    return new ProcessBuilder(command).redirectErrorStream(true).redirectOutput(ProcessBuilder.Redirect.DISCARD)
+        .start();
   }
 
   /** More draws can be asked for later; fewer would leave some unaccounted for. */
@@ -151,7 +154,8 @@ class EnsembleCommandTest {
     assertThat(run.status()).isEqualTo(5);
     assertThat(run.err()).contains("is damaged", "--resume");
     Files.writeString(block, text.substring(0, text.lastIndexOf("\n19,") + 1));
-    assertThat(ensemble("--draws", "20", "--out", out.toString(), "--resume").err()).contains("does not hold the draws");
+    CommandRun shorter = ensemble("--draws", "20", "--out", out.toString(), "--resume");
+    assertThat(shorter.err()).contains("does not hold the draws");
   }
 
   @Test
@@ -179,15 +183,20 @@ class EnsembleCommandTest {
         .isEqualTo(60);
   }
 
+  @Test
+  void aModelWithoutUncertaintiesIsToldHowToGiveThem() {
+    CommandRun run = CommandRun.of("ensemble", "models/stellar-sheet.toml");
+    assertThat(run.status()).isEqualTo(3);
+    assertThat(run.err()).contains("no input is uncertain", "field.strength.normal=1uG");
+  }
+
   @ParameterizedTest
-  @CsvSource(delimiter = '|', value = {"ensemble models/stellar-sheet.toml | 3 | no input is uncertain",
-      "ensemble models/uncertain-disk.toml --draws 0 | 2 | FIRST:END", "ensemble models/uncertain-disk.toml --draws 5:5 | 2 | FIRST",
-      "ensemble models/uncertain-disk.toml --draws x | 2 | FIRST:END", "ensemble models/uncertain-disk.toml --part 1/2 | 2 | --out",
-      "ensemble models/uncertain-disk.toml --part 0/2 --out x | 2 | 3/64", "ensemble models/uncertain-disk.toml --resume | 2 | --out",
-      "ensemble models/uncertain-disk.toml --merge x --resume --out y | 2 | solves nothing",
-      "ensemble models/uncertain-disk.toml --merge src/main/java | 5 | holds no draws"})
+  @CsvSource(delimiter = '|', value = {"--draws 0 | 2 | FIRST:END", "--draws 5:5 | 2 | FIRST",
+      "--draws x | 2 | FIRST:END",
+      "--part 1/2 | 2 | --out", "--part 0/2 --out x | 2 | 3/64", "--resume | 2 | --out",
+      "--merge x --resume --out y | 2 | solves nothing", "--merge src/main/java | 5 | holds no draws"})
   void faultsHaveOneMessageAndTheirStatus(String line, int status, String word) {
-    CommandRun run = CommandRun.of(line.split(" "));
+    CommandRun run = ensemble(line.split(" "));
     assertThat(run.status()).as(run.err()).isEqualTo(status);
     assertThat(run.err()).contains(word).doesNotContain("Exception");
     assertThat(run.out()).isEmpty();

@@ -24,8 +24,8 @@ class InferCommandTest {
 
   @Test
   void golden() throws IOException {
-    CommandRun run = CommandRun.of("infer", MODEL, "--input", "field.strength=0.5uG:8uG:31", "--spacing", "1.2 kpc", "--error",
-        "150 pc", "--draws", "1000");
+    CommandRun run = CommandRun.of("infer", MODEL, "--input", "field.strength=0.5uG:8uG:31", "--spacing", "1.2 kpc",
+        "--error", "150 pc", "--draws", "1000");
     assertThat(run.status()).as(run.err()).isZero();
     Path golden = Path.of("src/test/resources/golden/infer-uncertain-disk.txt");
     if (System.getenv("ARCHSPAN_RENEW_GOLDEN") != null) {
@@ -68,8 +68,8 @@ class InferCommandTest {
 
   @Test
   void saysPlainlyWhatCannotBeReproduced() {
-    CommandRun run = CommandRun.of("infer", MODEL, "--input", "field.strength=0.5uG:4uG:5", "--spacing", "90 kpc", "--error",
-        "1 kpc", "--draws", "64", "--quiet", "--json");
+    CommandRun run = CommandRun.of("infer", MODEL, "--input", "field.strength=0.5uG:4uG:5", "--spacing", "90 kpc",
+        "--error", "1 kpc", "--draws", "64", "--quiet", "--json");
     JsonObject json = json(run);
     assertThat(run.status()).isZero();
     assertThat(json.get("reproducible").getAsBoolean()).isFalse();
@@ -85,14 +85,15 @@ class InferCommandTest {
     Path out = folder.resolve("out");
     CommandRun read = CommandRun.of("infer", MODEL, "--input", "field.strength=1uG:6uG:5", "--observation",
         observation.toString(), "--draws", "64", "--json", "--quiet", "--out", out.toString());
-    CommandRun given = CommandRun.of("infer", MODEL, "--input", "field.strength=1uG:6uG:5", "--spacing", "1.2 kpc", "--error",
-        "150 pc", "--draws", "64", "--json", "--quiet", "--threads", "3");
+    CommandRun given = CommandRun.of("infer", MODEL, "--input", "field.strength=1uG:6uG:5", "--spacing", "1.2 kpc",
+        "--error", "150 pc", "--draws", "64", "--json", "--quiet", "--threads", "3");
     // 1e-12: 0.15 kpc and 150 pc differ in the last digit
     assertThat(end(json(read).getAsJsonArray("intervals").get(0).getAsJsonObject(), "low"))
         .isCloseTo(end(json(given).getAsJsonArray("intervals").get(0).getAsJsonObject(), "low"), within(1e-8));
     try (Stream<Path> files = Files.list(out)) {
-      assertThat(files.map(file -> file.getFileName().toString())).containsExactlyInAnyOrder("summary.json", "summary.txt",
-          "relation.ecsv", "intervals.ecsv", "posterior.ecsv", "inference.svg", "inference.png", "report.html");
+      assertThat(files.map(file -> file.getFileName().toString())).containsExactlyInAnyOrder("summary.json",
+          "summary.txt", "relation.ecsv", "intervals.ecsv", "posterior.ecsv", "inference.svg", "inference.png",
+          "report.html");
     }
   }
 

@@ -35,8 +35,8 @@ class ComparisonTest {
   private static final Gas TWO = new Gas.Components(List.of(new GasComponent("cold", 4e5, 1.5e-24),
       new GasComponent("warm", 9e5, 0.5e-24)));
 
-  private static final Gas LAYERED = new Gas.Layered(List.of(new GasLayer(0.0, 3.6e11, 50.0 * PARSEC), new GasLayer(300.0 * PARSEC, 8.1e11,
-      50.0 * PARSEC)), OptionalDouble.of(2e-24), OptionalDouble.empty());
+  private static final Gas LAYERED = new Gas.Layered(List.of(new GasLayer(0.0, 3.6e11, 50.0 * PARSEC),
+      new GasLayer(300.0 * PARSEC, 8.1e11, 50.0 * PARSEC)), OptionalDouble.of(2e-24), OptionalDouble.empty());
 
   private static Disk disk(Gas gas, double microgauss) {
     return new Disk(gas, new GasClosure(1.0), new MagneticField.BottomStrength(1e-6 * microgauss), CosmicRays.none(),
@@ -62,7 +62,8 @@ class ComparisonTest {
 
   @Test
   void aCaseThatFailsDoesNotStopTheOthersAndThreadsChangeNothing() {
-    VariedInput input = new VariedInput("field.strength", List.of("1", "2", "3", "4"), List.of(1.0, 2.0, 3.0, 4.0), "uG");
+    VariedInput input = new VariedInput("field.strength", List.of("1", "2", "3", "4"), List.of(1.0, 2.0, 3.0, 4.0),
+        "uG");
     VariedModel model = values -> solve(values.get(0));
     Comparison one = Comparison.solve(List.of(input), model, 1, () -> { });
     Comparison three = Comparison.solve(List.of(input), model, 3, () -> { });

@@ -15,8 +15,8 @@ class IntervalSearchTest {
   private int jumps;
 
   private static DrawRow row(double x, double spacing) {
-    return new DrawRow(-1, List.of(x), Double.isNaN(spacing) ? DrawRow.Outcome.STABLE : DrawRow.Outcome.UNSTABLE, spacing,
-        1.0, 1.0, "disk", true, "");
+    return new DrawRow(-1, List.of(x), Double.isNaN(spacing) ? DrawRow.Outcome.STABLE : DrawRow.Outcome.UNSTABLE,
+        spacing, 1.0, 1.0, "disk", true, "");
   }
 
   /** Low and high ends one after another, from a scan of 0, 1, ..., 10. */
@@ -25,7 +25,8 @@ class IntervalSearchTest {
     for (int i = 0; i <= 10; i++) {
       scan.put((double) i, row(i, relation.applyAsDouble(i)));
     }
-    IntervalSearch search = new IntervalSearch(x -> row(x, relation.applyAsDouble(x)), new ObservedSpacing(observed, error));
+    IntervalSearch search = new IntervalSearch(x -> row(x, relation.applyAsDouble(x)), new ObservedSpacing(observed,
+        error));
     List<Double> ends = new ArrayList<>();
     search.search(scan).forEach(one -> ends.addAll(List.of(one.low(), one.high())));
     jumps = search.jumps();

@@ -15,13 +15,15 @@ class PosteriorTest {
   private static final double PRIOR_WIDTH = 3.0;
   private static final double ERROR = 1.5;
   private static final UncertainInput INPUT = new UncertainInput("x",
-      new Uncertainty(Uncertainty.Shape.NORMAL, 20.0, PRIOR_WIDTH, Double.NEGATIVE_INFINITY, Double.POSITIVE_INFINITY), "", 1.0);
+      new Uncertainty(Uncertainty.Shape.NORMAL, 20.0, PRIOR_WIDTH, Double.NEGATIVE_INFINITY,
+      Double.POSITIVE_INFINITY), "", 1.0);
 
   private static Posterior posterior(UncertainInput input, ObservedSpacing observed, int draws) {
     Posterior posterior = new Posterior(observed, List.of(input));
     double[][] values = new DrawDesign(List.of(input), 1, false).values(0, draws);
     for (int i = 0; i < draws; i++) {
-      posterior.add(new DrawRow(i, List.of(values[i][0]), DrawRow.Outcome.UNSTABLE, values[i][0], 1.0, 1.0, "", true, ""));
+      posterior.add(new DrawRow(i, List.of(values[i][0]), DrawRow.Outcome.UNSTABLE, values[i][0], 1.0, 1.0, "", true,
+          ""));
     }
     return posterior;
   }
@@ -67,8 +69,10 @@ class PosteriorTest {
   @Test
   void drawsWithoutSpacingHaveNoWeight() {
     Posterior posterior = new Posterior(new ObservedSpacing(1.0, 0.1), List.of(INPUT));
-    posterior.add(new DrawRow(0, List.of(20.0), DrawRow.Outcome.STABLE, Double.NaN, Double.NaN, Double.NaN, "", false, ""));
-    posterior.add(new DrawRow(1, List.of(21.0), DrawRow.Outcome.FAILED, Double.NaN, Double.NaN, Double.NaN, "", false, "no"));
+    posterior.add(new DrawRow(0, List.of(20.0), DrawRow.Outcome.STABLE, Double.NaN, Double.NaN, Double.NaN, "", false,
+        ""));
+    posterior.add(new DrawRow(1, List.of(21.0), DrawRow.Outcome.FAILED, Double.NaN, Double.NaN, Double.NaN, "", false,
+        "no"));
     assertThat(posterior.effectiveSize()).isZero();
     assertThat(posterior.failed()).isEqualTo(1);
     assertThat(posterior.nearest()).isInfinite();

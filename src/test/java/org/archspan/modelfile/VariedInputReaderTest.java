@@ -18,10 +18,10 @@ class VariedInputReaderTest {
       "gas.dispersion=4km/s:10km/s:4; 4 km/s|6 km/s|8 km/s|10 km/s; km/s; 4|6|8|10",
       "gas.dispersion=4km/s:1e6cm/s:4; 4 km/s|6 km/s|8 km/s|10 km/s; km/s; 4|6|8|10",
       "field.strength=log:0.1uG:10uG:3; 0.1 uG|1 uG|10 uG; uG; 0.1|1|10",
-      "field.pressure-ratio=1:2:11; 1|1.1|1.2|1.3|1.4|1.5|1.6|1.7|1.8|1.9|2; ''; 1|1.1|1.2|1.3|1.4|1.5|1.6|1.7|1.8|1.9|2",
-      "gravity.strength=2e-9cm/s^2:1e-9cm/s^2:2; 2E-9 cm/s^2|1E-9 cm/s^2; cm/s^2; 2e-9|1e-9",
-      "field.pressure-ratio=1:1.0000002:3; 1|1.0000001|1.0000002; ''; 1|1.0000001|1.0000002",
-      "waves.parity=mirror,flexing; mirror|flexing; ''; ''"})
+      "field.pressure-ratio=1:2:11; 1|1.1|1.2|1.3|1.4|1.5|1.6|1.7|1.8|1.9|2; '';"
+      + " 1|1.1|1.2|1.3|1.4|1.5|1.6|1.7|1.8|1.9|2", "gravity.strength=2e-9cm/s^2:1e-9cm/s^2:2; 2E-9 cm/s^2|1E-9"
+      + " cm/s^2; cm/s^2; 2e-9|1e-9", "field.pressure-ratio=1:1.0000002:3; 1|1.0000001|1.0000002; '';"
+      + " 1|1.0000001|1.0000002", "waves.parity=mirror,flexing; mirror|flexing; ''; ''"})
   void readsListsAndRanges(String text, String values, String unit, String numbers) {
     VariedInput input = VariedInputReader.read(text);
     assertThat(input.values()).containsExactly(values.split("\\|"));

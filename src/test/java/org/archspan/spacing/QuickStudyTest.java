@@ -29,13 +29,14 @@ class QuickStudyTest {
   private static final double PARSEC = 3.0856775814913673e18;
 
   private static Disk disk(Random random) {
-    GravityLaw gravity = random.nextBoolean() ? new TanhGravity(2.5e-9 * (0.7 + 0.6 * random.nextDouble()), 160.0 * PARSEC)
+    GravityLaw gravity = random.nextBoolean() ? new TanhGravity(2.5e-9 * (0.7 + 0.6 * random.nextDouble()),
+        160.0 * PARSEC)
         : new LinearGravity(2.2e-11 / PARSEC * (0.7 + 0.6 * random.nextDouble()));
     double index = random.nextInt(4) == 0 ? 3.0 : 1.0;
     double top = (300.0 + 1200.0 * random.nextDouble()) * PARSEC;
     boolean open = gravity instanceof TanhGravity && top > 900.0 * PARSEC && random.nextBoolean();
-    return new Disk(new Gas.Isothermal(6.4e5, OptionalDouble.of(2.3e-24), OptionalDouble.empty()), new GasClosure(index),
-        new MagneticField.ConstantRatio(0.3 + random.nextDouble()),
+    return new Disk(new Gas.Isothermal(6.4e5, OptionalDouble.of(2.3e-24), OptionalDouble.empty()),
+        new GasClosure(index), new MagneticField.ConstantRatio(0.3 + random.nextDouble()),
         new CosmicRays.PressureRatio(random.nextDouble(), CosmicRayClosure.instantDiffusion()), List.of(gravity),
         Domain.aboutMidplane(Optional.of(Height.centimetres(top)), open ? TopBoundary.OPEN : TopBoundary.LID));
   }
@@ -59,6 +60,7 @@ class QuickStudyTest {
       assertThat(quick.get().gathers()).isEqualTo(full.spacing().isPresent());
       assertThat(quick.get().heldBy()).contains(peak.heldBy());
     }
-    assertThat(new QuickStudy(options, false).solve(disk, study.equilibrium(disk)).flatMap(QuickSpacing::heldBy)).isEmpty();
+    assertThat(new QuickStudy(options, false).solve(disk,
+        study.equilibrium(disk)).flatMap(QuickSpacing::heldBy)).isEmpty();
   }
 }

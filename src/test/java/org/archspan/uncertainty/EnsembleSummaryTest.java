@@ -18,8 +18,8 @@ class EnsembleSummaryTest {
         : draw % 100 == 7 ? DrawRow.Outcome.FAILED : DrawRow.Outcome.UNSTABLE;
     boolean unstable = outcome == DrawRow.Outcome.UNSTABLE;
     return new DrawRow(draw, List.of(values[0]), outcome, unstable ? values[0] : Double.NaN,
-        unstable ? 2.0 * values[0] : Double.NaN, unstable ? 1.0 : Double.NaN, unstable ? draw % 2 == 0 ? "lid" : "disk" : "",
-        true, outcome == DrawRow.Outcome.FAILED ? "no state" : "");
+        unstable ? 2.0 * values[0] : Double.NaN, unstable ? 1.0 : Double.NaN, unstable ? draw % 2 == 0 ? "lid"
+        : "disk" : "", true, outcome == DrawRow.Outcome.FAILED ? "no state" : "");
   }
 
   @Test

@@ -30,8 +30,8 @@ class SobolIndicesTest {
   }
 
   /**
-   * With a = 7 and b = 0.1: V1 = (1 + b pi^4/5)^2/2, V2 = a^2/8, V13 = b^2 pi^8 (1/18 - 1/50), hence first-order 0.3139,
-   * 0.4424, 0 and total 0.5576, 0.4424, 0.2437.
+   * With a = 7 and b = 0.1: V1 = (1 + b pi^4/5)^2/2, V2 = a^2/8, V13 = b^2 pi^8 (1/18 - 1/50), hence first-order
+   * 0.3139, 0.4424, 0 and total 0.5576, 0.4424, 0.2437.
    */
   @ParameterizedTest
   @ValueSource(longs = {1, 2, 3})
