@@ -39,8 +39,10 @@ public final class EnsembleFigure implements Figure {
     this.longest = 1.05 * summary.wavelength().quantile(0.997);
   }
 
+  /** Whether the wavelength varies, so that something drives it. */
   private boolean driven() {
-    return summary.design().sensitivities() && summary.ofWavelength().groups() > 1;
+    SobolIndices indices = summary.ofWavelength();
+    return summary.design().sensitivities() && indices.groups() > 1 && Double.isFinite(indices.first(0));
   }
 
   @Override

@@ -33,8 +33,16 @@ public final class UncertainModel {
     gravityVaries = keys.stream().anyMatch(key -> key.startsWith("gravity."));
   }
 
-  /** The uncertain inputs in the order of the file, each in the unit in which `check --keys` lists it. */
+  /**
+   * The uncertain inputs in the order of the file, each in the unit in which `check --keys` lists it.
+   *
+   * @throws RefusedModelException when one of them cannot be drawn
+   */
   public List<UncertainInput> inputs() {
+    if (keys.contains("gas.mass-per-hydrogen")) {
+      throw new RefusedModelException("gas.mass-per-hydrogen cannot be uncertain in an ensemble: it turns densities"
+          + " of nuclei into densities of mass when the model is read; give the density its own uncertainty");
+    }
     List<UncertainInput> list = new ArrayList<>();
     for (Map.Entry<String, Uncertainty> entry : inputs.uncertainties().entrySet()) {
       KeySpec spec = Schema.of(entry.getKey()).orElseThrow();
@@ -58,10 +66,6 @@ public final class UncertainModel {
    * @throws RefusedModelException when they do not make a model
    */
   public DrawnModel with(double[] values) {
-    if (keys.contains("gas.mass-per-hydrogen")) {
-      throw new RefusedModelException("gas.mass-per-hydrogen cannot be uncertain in an ensemble: it turns densities"
-          + " of nuclei into densities of mass when the model is read; give the density its own uncertainty");
-    }
     Inputs drawn = inputs.with(keys, values);
     try {
       DrawnModel model =

@@ -146,6 +146,10 @@ public final class EnsembleText {
         + (spacing.leftOut() == 0 ? "" : " (" + spacing.leftOut() + " left out: a draw without a spacing)")
         + "; first: share of the variance that goes when this input is known; total: share that remains when all"
         + " others are.");
+    if (!(spacing.first(best) > 0.0)) {
+      block.sentence("None of the uncertain inputs moves the spacing by itself.");
+      return;
+    }
     block.sentence("A measurement of " + inputs.get(best).key() + " would sharpen the spacing most: "
         + digits(100.0 * Math.max(0.0, spacing.first(best))) + " per cent of the variance.");
   }

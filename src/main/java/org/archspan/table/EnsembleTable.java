@@ -31,21 +31,21 @@ public final class EnsembleTable {
         rows.stream().mapToDouble(row -> row.quantile(share)).toArray());
   }
 
-  /** Shares of the inputs in the variance of the logarithms of wavelength and growth time, one row for each input. */
+  /** Shares of the inputs in the variance of the logarithm of the wavelength and of the growth rate, one row each. */
   public static Table sensitivities(EnsembleSummary summary) {
     List<UncertainInput> inputs = summary.design().inputs();
     SobolIndices spacing = summary.ofWavelength();
-    SobolIndices time = summary.ofGrowthTime();
-    return new Table("Sobol' indices of the logarithms of wavelength and growth time", List.of(
+    SobolIndices rate = summary.ofGrowthRate();
+    return new Table("Sobol' indices of the logarithm of the wavelength and of the growth rate (0 where stable)", List.of(
         Column.of("input", "key of the model file", inputs.stream().map(UncertainInput::key).toList()),
         index("wavelength_first", "first-order index", inputs.size(), spacing::first),
         index("wavelength_first_error", "its standard error", inputs.size(), spacing::firstError),
         index("wavelength_total", "total index", inputs.size(), spacing::total),
         index("wavelength_total_error", "its standard error", inputs.size(), spacing::totalError),
-        index("growth_time_first", "first-order index", inputs.size(), time::first),
-        index("growth_time_first_error", "its standard error", inputs.size(), time::firstError),
-        index("growth_time_total", "total index", inputs.size(), time::total),
-        index("growth_time_total_error", "its standard error", inputs.size(), time::totalError)));
+        index("growth_rate_first", "first-order index", inputs.size(), rate::first),
+        index("growth_rate_first_error", "its standard error", inputs.size(), rate::firstError),
+        index("growth_rate_total", "total index", inputs.size(), rate::total),
+        index("growth_rate_total_error", "its standard error", inputs.size(), rate::totalError)));
   }
 
   private static Column index(String name, String description, int inputs, ToDoubleFunction<Integer> value) {

@@ -16,7 +16,7 @@ public final class EnsembleSummary {
   private final LogHistogram growthTime = new LogHistogram();
   private final LogHistogram mass = new LogHistogram();
   private final SobolIndices ofWavelength;
-  private final SobolIndices ofGrowthTime;
+  private final SobolIndices ofGrowthRate;
   private final Map<String, Long> counts = new TreeMap<>();
   private final Map<String, Long> reasons = new LinkedHashMap<>();
   private final Map<String, String> examples = new TreeMap<>();
@@ -51,7 +51,7 @@ public final class EnsembleSummary {
   public EnsembleSummary(DrawDesign design) {
     this.design = design;
     ofWavelength = new SobolIndices(design.inputs().size());
-    ofGrowthTime = new SobolIndices(design.inputs().size());
+    ofGrowthRate = new SobolIndices(design.inputs().size());
   }
 
   /** Adds the next row; rows come in the order of their draws. */
@@ -75,8 +75,16 @@ public final class EnsembleSummary {
     if (design.sensitivities()) {
       int role = (int) (row.draw() % design.groupSize());
       ofWavelength.add(role, spacing ? Math.log(row.wavelength()) : Double.NaN);
-      ofGrowthTime.add(role, spacing ? Math.log(row.growthTime()) : Double.NaN);
+      ofGrowthRate.add(role, growthRate(row));
     }
+  }
+
+  private static double growthRate(DrawRow row) {
+    return switch (row.outcome()) {
+      case UNSTABLE -> 1.0 / row.growthTime();
+      case STABLE -> 0.0;
+      case FAILED -> Double.NaN;
+    };
   }
 
   /** Reasons that differ in their numbers alone count as one, and are shown as they were first given. */
@@ -166,8 +174,8 @@ public final class EnsembleSummary {
     return ofWavelength;
   }
 
-  /** Shares of the inputs in the variance of the logarithm of the growth time. */
-  public SobolIndices ofGrowthTime() {
-    return ofGrowthTime;
+  /** Shares of the inputs in the variance of the growth rate; that of stable draws is 0. */
+  public SobolIndices ofGrowthRate() {
+    return ofGrowthRate;
   }
 }

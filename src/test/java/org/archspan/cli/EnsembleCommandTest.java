@@ -183,6 +183,22 @@ class EnsembleCommandTest {
         .isEqualTo(60);
   }
 
+  /** The width of the arm changes masses alone: nothing drives the spacing, and the figure has no panel for it. */
+  @Test
+  void anInputThatDoesNotMatterForTheSpacing() {
+    CommandRun run = CommandRun.of("ensemble", "models/stellar-sheet.toml", "--set", "arm.width.factor=1.5", "--draws",
+        "30", "--out", folder.resolve("out").toString());
+    assertThat(run.status()).as(run.err()).isZero();
+    assertThat(run.out()).contains("None of the uncertain inputs moves the spacing by itself.");
+  }
+
+  @Test
+  void theMassOfANucleusCannotBeDrawn() {
+    CommandRun run = ensemble("--set", "gas.mass-per-hydrogen={ low = 1.3, high = 1.5 }");
+    assertThat(run.status()).isEqualTo(3);
+    assertThat(run.err()).contains("gas.mass-per-hydrogen cannot be uncertain");
+  }
+
   @Test
   void aModelWithoutUncertaintiesIsToldHowToGiveThem() {
     CommandRun run = CommandRun.of("ensemble", "models/stellar-sheet.toml");
