@@ -27,12 +27,15 @@ public final class InferenceFigure implements Figure {
   private final Inference inference;
   private final OutputUnits units;
   private final FigureStyle style;
+  /** From the unit of the rows to that of the figure. */
+  private final double scale;
 
   /** The figure of an inference. */
   public InferenceFigure(Inference inference, OutputUnits units, FigureStyle style) {
     this.inference = inference;
-    this.units = units;
+    this.units = units.suiting(units.centimetresPerLength() * inference.observed().wavelength());
     this.style = style;
+    scale = units.centimetresPerLength() / this.units.centimetresPerLength();
   }
 
   @Override
@@ -82,17 +85,17 @@ public final class InferenceFigure implements Figure {
     ValueAxis input = inputAxis();
     input.setRange(value(inference.scan().get(0)), value(inference.scan().get(inference.scan().size() - 1)));
     double[] x = inference.scan().stream().mapToDouble(this::value).toArray();
-    double[] y = inference.scan().stream().mapToDouble(row -> row.hasSpacing() ? row.wavelength() : Double.NaN)
+    double[] y = inference.scan().stream().mapToDouble(row -> row.hasSpacing() ? scale * row.wavelength() : Double.NaN)
         .toArray();
+    double middle = scale * inference.observed().wavelength();
+    double error = scale * inference.observed().error();
     XYPlot plot = Plots.plot(input, wavelengthAxis(y), style);
-    IntervalMarker observed = new IntervalMarker(inference.observed().wavelength() - inference.observed().error(),
-        inference.observed().wavelength() + inference.observed().error());
+    IntervalMarker observed = new IntervalMarker(middle - error, middle + error);
     observed.setPaint(style.colour(1));
     observed.setAlpha(0.18f);
     observed.setOutlinePaint(null);
     plot.addRangeMarker(observed, Layer.BACKGROUND);
-    plot.addRangeMarker(new ValueMarker(inference.observed().wavelength(), style.colour(1), new BasicStroke(0.8f)),
-        Layer.BACKGROUND);
+    plot.addRangeMarker(new ValueMarker(middle, style.colour(1), new BasicStroke(0.8f)), Layer.BACKGROUND);
     for (ReproducingInterval interval : inference.intervals()) {
       IntervalMarker marker = new IntervalMarker(interval.low(), interval.high());
       marker.setPaint(style.shade());
@@ -111,8 +114,8 @@ public final class InferenceFigure implements Figure {
 
   /** Wide enough for the observation too; logarithmic where the wavelengths spread over more than a factor of eight. */
   private ValueAxis wavelengthAxis(double[] wavelengths) {
-    double low = inference.observed().wavelength() - inference.observed().error();
-    double high = inference.observed().wavelength() + inference.observed().error();
+    double low = scale * (inference.observed().wavelength() - inference.observed().error());
+    double high = scale * (inference.observed().wavelength() + inference.observed().error());
     for (double wavelength : wavelengths) {
       low = wavelength < low ? wavelength : low;
       high = wavelength > high ? wavelength : high;

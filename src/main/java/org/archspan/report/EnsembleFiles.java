@@ -25,7 +25,8 @@ public final class EnsembleFiles {
         .table("ensemble", EnsembleTable.ranges(summary, units, armWidth));
     if (summary.design().sensitivities()) {
       output.table("sensitivity", EnsembleTable.sensitivities(summary));
-      page.table("Sobol' indices of the logarithm of the wavelength, and of the growth rate (0 where stable)", EnsembleTable.sensitivities(summary));
+      page.table("Sobol' indices of the logarithm of the wavelength, and of the growth rate (0 where stable)",
+          EnsembleTable.sensitivities(summary));
     }
     if (summary.wavelength().total() > 0.0) {
       output.figure("ensemble", new EnsembleFigure(summary, units, FigureStyle.journal()));

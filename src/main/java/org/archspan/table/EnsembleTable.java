@@ -31,12 +31,12 @@ public final class EnsembleTable {
         rows.stream().mapToDouble(row -> row.quantile(share)).toArray());
   }
 
-  /** Shares of the inputs in the variance of the logarithm of the wavelength and of the growth rate, one row each. */
+  /** Shares of the inputs in the variance of ln(wavelength) and of the growth rate, one row each. */
   public static Table sensitivities(EnsembleSummary summary) {
     List<UncertainInput> inputs = summary.design().inputs();
     SobolIndices spacing = summary.ofWavelength();
     SobolIndices rate = summary.ofGrowthRate();
-    return new Table("Sobol' indices of the logarithm of the wavelength and of the growth rate (0 where stable)", List.of(
+    return new Table("Sobol' indices of ln(wavelength) and of the growth rate (0 where stable)", List.of(
         Column.of("input", "key of the model file", inputs.stream().map(UncertainInput::key).toList()),
         index("wavelength_first", "first-order index", inputs.size(), spacing::first),
         index("wavelength_first_error", "its standard error", inputs.size(), spacing::firstError),

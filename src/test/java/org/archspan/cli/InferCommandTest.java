@@ -66,6 +66,19 @@ class InferCommandTest {
     }
   }
 
+  /** A weak field is stabilised by a stiff gas, a strong one by its tension: the spacing is shortest between them. */
+  @Test
+  void twoIntervalsWhereTheRelationTurns() {
+    JsonObject json = json(CommandRun.of("infer", "models/stable-disk.toml", "--set", "gas.adiabatic-index=1.6",
+        "--input", "field.strength=1uG:9uG:17", "--spacing", "5 kpc", "--error", "500 pc", "--draws", "64", "--quiet",
+        "--json"));
+    JsonArray intervals = json.getAsJsonArray("intervals");
+    assertThat(intervals).hasSize(2);
+    assertThat(end(intervals.get(0).getAsJsonObject(), "high")).isLessThan(4.0);
+    assertThat(end(intervals.get(1).getAsJsonObject(), "low")).isGreaterThan(4.0);
+    assertThat(json.getAsJsonArray("warnings").toString()).contains("Several intervals");
+  }
+
   @Test
   void saysPlainlyWhatCannotBeReproduced() {
     CommandRun run = CommandRun.of("infer", MODEL, "--input", "field.strength=0.5uG:4uG:5", "--spacing", "90 kpc",
