@@ -41,11 +41,16 @@ class LayersTest {
       "gas.layer.2.dispersion=8km/s | gas.layer.2.dispersion: given beside gas.layer.2.temperature",
       "gas.temperature=5000K | gas.temperature: given beside gas.layer",
       "field.top=0.35Mm | field.top: found \"0.35Mm\"; a flux sheet must be at least two edges",
-      "field.strength=100G | given beside",
       "field.plasma-beta=0 | field.plasma-beta: found 0"})
   void saysWhatIsWrong(String setting, String message) throws IOException {
     assertThat(read(setting).faults()).hasSize(1).allSatisfy(
         fault -> assertThat(fault.toString()).contains(message));
+  }
+
+  /** Like any of several ways to give one thing, a strength that is laid over the model replaces its plasma beta. */
+  @Test
+  void aStrengthReplacesThePlasmaBeta() throws IOException {
+    assertThat(read("field.strength=100G").faults()).isEmpty();
   }
 
   @ParameterizedTest
