@@ -38,9 +38,20 @@ public final class QuickStudy {
    * @throws org.archspan.stability.UnsolvedException when the tolerance is missed
    */
   public Optional<QuickSpacing> solve(Disk disk, Equilibrium equilibrium) {
+    if (disk.rotation().filter(rotation -> rotation.angularSpeed() > 0.0).isPresent()) {
+      return full(disk);
+    }
     WaveRange range = WaveRange.of(disk, equilibrium, options);
     Search search = new Search(disk, equilibrium, range);
     return search.answer();
+  }
+
+  /** Rotation is the business of the main job, which takes far longer for it. */
+  private Optional<QuickSpacing> full(Disk disk) {
+    SpacingResult result = new SpacingStudy(disk, options, Arm.unknown()).solve();
+    return result.spacingPeak().map(peak -> new QuickSpacing(peak.wavelength(),
+        result.range().crestSpacing(peak.wavelength()), peak.growthRate(), peak.centroidHeight(),
+        result.spacing().isPresent(), testLid ? Optional.of(peak.heldBy()) : Optional.empty()));
   }
 
   /** The base state of a disk, as this study needs it. */

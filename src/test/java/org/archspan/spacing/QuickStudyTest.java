@@ -18,11 +18,13 @@ import org.archspan.disk.Domain;
 import org.archspan.disk.Gas;
 import org.archspan.disk.Height;
 import org.archspan.disk.MagneticField;
+import org.archspan.disk.Rotation;
 import org.archspan.gravity.GravityLaw;
 import org.archspan.gravity.LinearGravity;
 import org.archspan.gravity.TanhGravity;
 import org.junit.jupiter.api.RepeatedTest;
 import org.junit.jupiter.api.RepetitionInfo;
+import org.junit.jupiter.api.Test;
 
 /** The quick answer is the answer of the main job. */
 class QuickStudyTest {
@@ -62,5 +64,26 @@ class QuickStudyTest {
     }
     assertThat(new QuickStudy(options, false).solve(disk,
         study.equilibrium(disk)).flatMap(QuickSpacing::heldBy)).isEmpty();
+  }
+
+  /** With rotation too, however slow, it is the answer of the main job; rotation at no speed is none. */
+  @Test
+  void rotationIsLeftToTheMainJob() {
+    SearchOptions standard = SearchOptions.defaults();
+    SearchOptions options = new SearchOptions(standard.crossWavelength(), Set.of(Parity.MIRROR), standard.shortest(),
+        standard.longest(), standard.gatheringHeight(), 1e-8, 1);
+    QuickStudy study = new QuickStudy(options, true);
+    Disk still = disk(new Random(1));
+    Optional<QuickSpacing> without = study.solve(still, study.equilibrium(still));
+    Disk rotating = rotating(still, 8e-16);
+    assertThat(study.solve(rotating, study.equilibrium(rotating)).map(QuickSpacing::growthRate)).isEqualTo(
+        new SpacingStudy(rotating, options, Arm.unknown()).solve().spacingPeak().map(BranchPeak::growthRate));
+    Disk resting = rotating(still, 0.0);
+    assertThat(study.solve(resting, study.equilibrium(resting))).isEqualTo(without);
+  }
+
+  private static Disk rotating(Disk disk, double angularSpeed) {
+    return new Disk(disk.gas(), disk.gasClosure(), disk.selfGravity(), disk.field(), disk.cosmicRays(), disk.gravity(),
+        Optional.of(new Rotation(angularSpeed, OptionalDouble.empty())), disk.domain());
   }
 }
