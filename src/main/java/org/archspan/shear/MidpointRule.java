@@ -73,7 +73,7 @@ final class MidpointRule {
 
   /** Leaves z' + z/(2 H) in slopeForce. */
   private void expand() {
-    matrix.differentiate(z, slopeForce);
+    column.differentiate(z, slopeForce);
     for (int i = 0; i < z.length; i++) {
       slopeForce[i] += 0.5 * column.inverseScaleHeight[i] * z[i];
     }

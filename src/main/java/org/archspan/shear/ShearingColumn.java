@@ -27,7 +27,6 @@ final class ShearingColumn {
   final double[] gravity;
   final double[] alfvenSquared;
   final double[] inverseScaleHeight;
-  final double[] columnWeight;
   /** Stiffness per mass of what answers compression without relaxing. */
   final double[] stiffness;
   /** What relaxes meanwhile. */
@@ -53,12 +52,10 @@ final class ShearingColumn {
     gravity = new double[n];
     alfvenSquared = new double[n];
     inverseScaleHeight = new double[n];
-    columnWeight = new double[n];
     double[] gasPerMass = new double[n];
     double[] cosmicRayPerMass = new double[n];
     double[] reference = mesh.reference().weights();
     double energy = speed * speed;
-    double bottomDensity = equilibrium.at(equilibrium.bottom()).logDensity();
     for (int i = 0; i < n; i++) {
       int e = i / reference.length;
       weight[i] = 0.5 * mesh.length(e) * reference[i % reference.length];
@@ -68,7 +65,6 @@ final class ShearingColumn {
       gasPerMass[i] = state.gasPerMass() / energy;
       cosmicRayPerMass[i] = state.cosmicRayPerMass() / energy;
       inverseScaleHeight[i] = -state.logDensityGradient() * length;
-      columnWeight[i] = weight[i] * Math.exp(0.5 * (state.logDensity() - bottomDensity));
     }
     stiffness = new double[n];
     relaxations = new ArrayList<>();
@@ -107,5 +103,21 @@ final class ShearingColumn {
 
   int nodes() {
     return weight.length;
+  }
+
+  /** Slope of z with height at each node. O(elements * degree^2), no allocation. */
+  void differentiate(double[] z, double[] slopes) {
+    double[] slope = mesh.reference().derivative();
+    int n = mesh.degree() + 1;
+    for (int e = 0; e < mesh.elements(); e++) {
+      double toSlope = 2.0 / mesh.length(e);
+      for (int q = 0; q < n; q++) {
+        double sum = 0.0;
+        for (int i = 0; i < n; i++) {
+          sum += slope[q * n + i] * z[e * n + i];
+        }
+        slopes[e * n + q] = toSlope * sum;
+      }
+    }
   }
 }

@@ -135,19 +135,4 @@ final class StepMatrix {
       local[e * n + i] = sum;
     }
   }
-
-  /** Slope of z with height at each node. */
-  void differentiate(double[] z, double[] slopes) {
-    double[] slope = element.derivative();
-    for (int e = 0; e < elements; e++) {
-      double toSlope = 2.0 / column.mesh.length(e);
-      for (int q = 0; q < n; q++) {
-        double sum = 0.0;
-        for (int i = 0; i < n; i++) {
-          sum += slope[q * n + i] * z[e * n + i];
-        }
-        slopes[e * n + q] = toSlope * sum;
-      }
-    }
-  }
 }

@@ -24,4 +24,19 @@ final class WaveState {
     zVelocity = new double[nodes];
     memory = new double[relaxations][nodes];
   }
+
+  /** The same wave in arrays of its own. */
+  WaveState copy() {
+    WaveState copy = new WaveState(x.length, memory.length);
+    System.arraycopy(x, 0, copy.x, 0, x.length);
+    System.arraycopy(y, 0, copy.y, 0, x.length);
+    System.arraycopy(z, 0, copy.z, 0, x.length);
+    System.arraycopy(xVelocity, 0, copy.xVelocity, 0, x.length);
+    System.arraycopy(yVelocity, 0, copy.yVelocity, 0, x.length);
+    System.arraycopy(zVelocity, 0, copy.zVelocity, 0, x.length);
+    for (int j = 0; j < memory.length; j++) {
+      System.arraycopy(memory[j], 0, copy.memory[j], 0, x.length);
+    }
+    return copy;
+  }
 }

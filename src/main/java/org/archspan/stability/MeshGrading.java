@@ -6,7 +6,7 @@ import org.archspan.mesh.Mesh;
 import org.archspan.mesh.ReferenceElement;
 
 /** Chooses the elements: graded from the lower end, aligned with kinks, split where a mode is not yet resolved. */
-final class MeshGrading {
+public final class MeshGrading {
   private static final double FIRST_LENGTH = 1.5;
   private static final double GROWTH = 2.0;
   private static final double SPLIT_SHARE = 0.2;
@@ -21,6 +21,10 @@ final class MeshGrading {
    * each next one twice as much. At least two elements: between two fixed ends one alone would leave no node that couples
    * elements, and no vector to refine a root with.
    */
+  public static Mesh initial(Equilibrium equilibrium, int degree) {
+    return initial(equilibrium, Scales.of(equilibrium), degree);
+  }
+
   static Mesh initial(Equilibrium equilibrium, Scales scales, int degree) {
     double bottom = equilibrium.bottom() / scales.length();
     double top = equilibrium.top() / scales.length();

@@ -1,0 +1,82 @@
+package org.archspan.shear;
+
+/** A wave followed from a motion at the start, in units of its column. */
+final class Track {
+  private final WindingWave winding;
+  private final double step;
+  private final double start;
+  private final boolean wellPosed;
+  private final double[] energy;
+  private final double[] contrast;
+
+  /**
+   * Follows a wave through so many steps.
+   *
+   * @param start ky at the first moment
+   * @param step  length of a step
+   * @param kick  the velocity at the start, as a wave at rest elsewhere; left alone
+   */
+  Track(WindingWave winding, double start, double step, int steps, WaveState kick) {
+    this.winding = winding;
+    this.start = start;
+    this.step = step;
+    energy = new double[steps + 1];
+    contrast = new double[steps + 1];
+    DensityContrast density = new DensityContrast(winding.column());
+    wellPosed = winding.run(kick.copy(), start, step, steps, (at, ky, wave) -> {
+      energy[at] = winding.kineticEnergy(wave);
+      contrast[at] = density.halfSquare(wave, ky);
+    });
+  }
+
+  /** Logarithm of the amplification of the velocity by the end. */
+  double logGain() {
+    return 0.5 * Math.log(energy[energy.length - 1] / energy[0]);
+  }
+
+  /** Whether every step was short enough to have a well-posed matrix. */
+  boolean wellPosed() {
+    return wellPosed;
+  }
+
+  WindingWave winding() {
+    return winding;
+  }
+
+  /** Times, s. */
+  double[] times() {
+    double[] times = new double[energy.length];
+    for (int i = 0; i < times.length; i++) {
+      times[i] = i * step * winding.column().time;
+    }
+    return times;
+  }
+
+  /** Radial over azimuthal wavenumber at the times, dimensionless. */
+  double[] windings() {
+    double kx = winding.column().kx;
+    double[] windings = new double[energy.length];
+    for (int i = 0; i < windings.length; i++) {
+      windings[i] = -start / kx - winding.flow().shear() * i * step;
+    }
+    return windings;
+  }
+
+  /** Root of the kinetic energy over that at the start, dimensionless. */
+  double[] amplification() {
+    return roots(energy);
+  }
+
+  /** Density contrast for a start at the isothermal speed, dimensionless. */
+  double[] densityContrast() {
+    return roots(contrast);
+  }
+
+  private double[] roots(double[] halfSquares) {
+    double[] roots = new double[halfSquares.length];
+    for (int i = 0; i < roots.length; i++) {
+      roots[i] = Math.sqrt(halfSquares[i] / energy[0]);
+    }
+    return roots;
+  }
+}
