@@ -29,9 +29,6 @@ final class SpacingCommand extends ModelCommand {
 
   /** The answer for a disk with the waves and the arm of a model. */
   static SpacingResult solved(Disk disk, Model model) {
-    SpacingResult result = new SpacingStudy(disk, model.options(), model.arm()).solve();
-    return disk.rotation().isEmpty() ? result
-        : result.warned("Rotation is given in the model but is not solved by this version: it is not in this result,"
-            + " and it would slow long waves along the field.");
+    return new SpacingStudy(disk, model.options(), model.arm()).solve();
   }
 }

@@ -31,12 +31,12 @@ public final class ComplexFront {
     imaginary = new double[fronts * size * size];
   }
 
-  /** Real parts to be filled before {@link #factor}: front e begins at {@code e * size * size}. */
+  /** Real parts (dimensionless) to be filled before {@link #factor}: front e begins at {@code e * size * size}. */
   public double[] real() {
     return real;
   }
 
-  /** Imaginary parts to be filled. */
+  /** Imaginary parts to be filled, dimensionless. */
   public double[] imaginary() {
     return imaginary;
   }
@@ -89,7 +89,7 @@ public final class ComplexFront {
     }
   }
 
-  /** Natural logarithm of the magnitude of the determinant. */
+  /** Natural logarithm of the magnitude of the determinant, dimensionless. */
   public double logMagnitude() {
     return logMagnitude;
   }
@@ -103,8 +103,8 @@ public final class ComplexFront {
    * After {@link #factor}: solves for one right-hand side. The unknowns of the chain in order, shared ones once: front e
    * begins at {@code e (size - coupled)}. O(fronts size^2), no allocation.
    *
-   * @param xr right-hand side, overwritten by the solution, shape [fronts (size - coupled) + coupled]
-   * @param xi imaginary parts
+   * @param xr right-hand side, dimensionless, overwritten by the solution, shape [fronts (size - coupled) + coupled]
+   * @param xi imaginary parts, dimensionless
    */
   public void solve(double[] xr, double[] xi) {
     int step = size - coupled;

@@ -16,6 +16,7 @@ import org.archspan.equilibrium.Equilibrium;
 import org.archspan.equilibrium.GasState;
 import org.archspan.gravity.GravityLaw;
 import org.archspan.spacing.WaveRange;
+import org.archspan.units.Constants;
 import org.archspan.units.OutputUnits;
 
 /** What a result rests on, in words. */
@@ -34,6 +35,8 @@ public final class Assumptions {
     lines.put("field", field(disk, equilibrium, units));
     lines.put("cosmic rays", cosmicRays(disk.cosmicRays(), bottom));
     lines.put("gravity", gravity(disk, equilibrium));
+    disk.rotation().ifPresent(rotation -> lines.put("rotation", Numbers.plain(rotation.angularSpeed() * 1e3
+        * Constants.PARSEC / 1e5) + " km/s/kpc, taken as rigid"));
     lines.put("domain", domain(equilibrium, units));
     lines.put("waves", waves(range, units));
     return lines;
@@ -51,11 +54,13 @@ public final class Assumptions {
   /** A text that opens with the title and what holds for every wave. */
   static TextBlock block(String title, Disk disk, Equilibrium equilibrium, OutputUnits units, int width) {
     TextBlock block = new TextBlock(width).heading(title).heading("Assumed");
-    of(disk, equilibrium, ANY, units).forEach((subject, words) -> {
+    of(disk.withoutRotation(), equilibrium, ANY, units).forEach((subject, words) -> {
       if (!subject.equals("waves")) {
         block.labelled(subject, words);
       }
     });
+    disk.rotation().ifPresent(rotation -> block.labelled("rotation", "given, but not in this result; archspan spacing"
+        + " solves it"));
     return block;
   }
 

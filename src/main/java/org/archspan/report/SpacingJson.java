@@ -6,6 +6,7 @@ import org.archspan.equilibrium.Equilibrium;
 import org.archspan.spacing.BranchPeak;
 import org.archspan.spacing.Certificate;
 import org.archspan.spacing.CloudComplex;
+import org.archspan.spacing.RotatingAnswer;
 import org.archspan.spacing.SpacingResult;
 import org.archspan.units.OutputUnits;
 
@@ -44,6 +45,8 @@ public final class SpacingJson {
     json.put("complex", result.complex().map(this::complex).orElse(null));
     json.put("equilibrium", equilibrium(result.equilibrium(), result.forceBalanceResidual(), units));
     json.put("certificate", certificate(result.certificate()));
+    result.rotation().ifPresent(rotation -> json.put("rotation", rotation(rotation))
+        .put("without-rotation", without(rotation.without())));
     json.put("warnings", result.warnings());
     return json;
   }
@@ -61,11 +64,27 @@ public final class SpacingJson {
         .put("relative-error", peak.growthError())
         .put("wavelength-relative-error", peak.wavelengthError())
         .put("unstable-modes", peak.unstableModes())
+        .put("oscillation-frequency", units.rate(peak.frequency()), "1/" + units.time())
         .put("centroid-height", units.length(peak.centroidHeight()), units.length())
         .put("column-contrast", peak.columnContrast())
         .put("held-by", peak.heldBy().name().toLowerCase(Locale.ROOT))
         .put("taller-domain", new Json().put("growth-rate-change", peak.tallerGrowthChange())
             .put("wavelength-change", peak.tallerWavelengthChange()));
+  }
+
+  private Json rotation(RotatingAnswer rotation) {
+    return new Json().put("angular-speed", units.rate(rotation.angularSpeed()), "1/" + units.time())
+        .put("modes-counted-by", "argument principle")
+        .put("slowest-growth-counted", units.rate(rotation.slowestCounted()), "1/" + units.time())
+        .put("contour-points", rotation.contourPoints())
+        .put("checked-wavelengths", rotation.checkedWavelengths());
+  }
+
+  private Json without(SpacingResult still) {
+    SpacingJson other = new SpacingJson(still, units);
+    return new Json().put("fastest", still.fastest().map(other::peak).orElse(null))
+        .put("branches", still.branches().stream().map(other::peak).toList())
+        .put("spacing", still.spacingPeak().map(other::spacing).orElse(null));
   }
 
   private Json spacing(BranchPeak peak) {

@@ -10,7 +10,9 @@ import org.archspan.equilibrium.Equilibrium;
 import org.archspan.spacing.BranchPeak;
 import org.archspan.spacing.CloudComplex;
 import org.archspan.spacing.HeldBy;
+import org.archspan.spacing.RotatingAnswer;
 import org.archspan.spacing.SpacingResult;
+import org.archspan.units.Constants;
 import org.archspan.units.OutputUnits;
 
 /** The answer of the main job in words: what was assumed, what was found, how sure, and what limits it. */
@@ -59,6 +61,7 @@ public final class SpacingText {
     }
     block.sentence(sentence(result, units));
     result.complex().ifPresent(this::complex);
+    result.rotation().ifPresent(this::rotation);
     BranchPeak peak = result.spacingPeak().orElseThrow();
     if (peak.heldBy() == HeldBy.DISK) {
       block.sentence("In a domain 1.5 times as tall its wavelength changes by "
@@ -151,6 +154,15 @@ public final class SpacingText {
         + Numbers.length(result.range().crestSpacing(peak.wavelength()), units) + " apart";
   }
 
+  private void rotation(RotatingAnswer rotation) {
+    String spin = " (" + Numbers.plain(rotation.angularSpeed() * 1e3 * Constants.PARSEC / 1e5) + " km/s/kpc)";
+    result.spacingPeak().filter(peak -> peak.frequency() > 0.0).ifPresent(peak -> block.sentence(
+        "It oscillates while it grows, with a period of " + Numbers.time(2.0 * Math.PI / peak.frequency(), units) + "."));
+    rotation.without().spacingPeak().ifPresent(still -> block.sentence("All this is with rotation" + spin
+        + "; without it the wavelength would be " + Numbers.length(still.wavelength(), still.wavelengthError(), units)
+        + " and the growth time " + Numbers.time(still.growthTime(), still.growthError(), units) + "."));
+  }
+
   private void complex(CloudComplex complex) {
     if (complex.mass().isPresent()) {
       block.sentence("Along an arm of the given width one wavelength holds "
@@ -176,11 +188,20 @@ public final class SpacingText {
     block.sentence("Proved by counting the modes on " + result.certificate().intervals() + " intervals of wavenumber"
         + " that leave no gap: no wave " + whose() + " grows faster than "
         + Numbers.rateBound(result.certificate().bound(), units) + range() + ".");
+    result.rotation().ifPresent(this::rotatingProof);
     BranchPeak peak = result.spacingPeak().orElseThrow();
     block.sentence("Estimated relative errors: growth rate below " + Numbers.error(peak.growthError())
         + ", wavelength below " + Numbers.error(peak.wavelengthError()) + (peak.unstableModes() < 0 ? "."
         : "; at that wavelength exactly " + modes(peak.unstableModes()) + " of this parity grow"
         + (peak.unstableModes() == 1 ? "s." : ".")));
+  }
+
+  private void rotatingProof(RotatingAnswer rotation) {
+    block.sentence("That bound is without rotation, which never makes growth faster. With it, the argument principle finds"
+        + " nothing faster than the fastest branch of each symmetry at " + rotation.checkedWavelengths()
+        + " wavelengths over the range, and counts the modes at the wavelength of the answer on a contour of "
+        + rotation.contourPoints() + " points around all growth faster than one e-folding in "
+        + Numbers.time(1.0 / rotation.slowestCounted(), units) + ".");
   }
 
   private static String modes(int count) {
@@ -210,14 +231,15 @@ public final class SpacingText {
     block.heading("What limits it");
     result.warnings().forEach(block::bullet);
     block.bullet("Linear theory: growth while the gas moves by much less than a wavelength.");
-    block.bullet("A static base state that varies with height alone; " + leftOut() + " are not in it.");
+    block.bullet("A static base state that varies with height alone; " + leftOut() + " not in it.");
   }
 
   private String leftOut() {
+    String motion = result.rotation().isPresent() ? "shear" : "rotation, shear";
     return switch (disk.selfGravity()) {
-      case OFF -> "rotation, shear and the gas's own gravity";
-      case EQUILIBRIUM -> "rotation, shear and the gravity of the perturbation itself";
-      case FULL -> "rotation and shear";
+      case OFF -> motion + " and the gas's own gravity are";
+      case EQUILIBRIUM -> motion + " and the gravity of the perturbation itself are";
+      case FULL -> result.rotation().isPresent() ? "shear is" : "rotation and shear are";
     };
   }
 }

@@ -22,10 +22,19 @@ import org.archspan.boundary.Parity;
  * @param tallerGrowthChange  relative change of the growth rate when the domain is 1.5 times as tall, dimensionless;
  *                            NaN when not computed
  * @param tallerWavelengthChange the same for the wavelength, dimensionless
+ * @param frequency           of oscillation while it grows, s^-1; 0 without rotation, and for most modes with it
  */
 public record BranchPeak(Parity parity, int order, double wavenumber, double crossWavenumber, double growthRate,
     double growthError, double wavelengthError, int unstableModes, double centroidHeight, double columnContrast,
-    HeldBy heldBy, double tallerGrowthChange, double tallerWavelengthChange) {
+    HeldBy heldBy, double tallerGrowthChange, double tallerWavelengthChange, double frequency) {
+  /** A mode that does not oscillate. */
+  public BranchPeak(Parity parity, int order, double wavenumber, double crossWavenumber, double growthRate,
+      double growthError, double wavelengthError, int unstableModes, double centroidHeight, double columnContrast,
+      HeldBy heldBy, double tallerGrowthChange, double tallerWavelengthChange) {
+    this(parity, order, wavenumber, crossWavenumber, growthRate, growthError, wavelengthError, unstableModes,
+        centroidHeight, columnContrast, heldBy, tallerGrowthChange, tallerWavelengthChange, 0.0);
+  }
+
 
   /** Whether this is the edge of the continuum above an open top rather than a mode. */
   public boolean continuum() {

@@ -8,7 +8,7 @@ import org.archspan.stability.BranchSolver;
 import org.archspan.stability.EigenMode;
 import org.archspan.stability.Peak;
 
-/** The shape of one mode. Immutable. */
+/** The shape of one mode, without rotation. Immutable. */
 public final class ModeStudy {
   private final Disk disk;
   private final Equilibrium equilibrium;
@@ -25,13 +25,13 @@ public final class ModeStudy {
 
   /** The mode that sets the spacing; empty when stable, or when the fastest growth is a continuum. */
   public Optional<EigenMode> spacingMode() {
-    SpacingResult result = new SpacingStudy(disk, options, arm).solve();
+    SpacingResult result = new SpacingStudy(disk.withoutRotation(), options, arm).solve();
     return spacingMode(result);
   }
 
   /** The same, for a result at hand. */
   public Optional<EigenMode> spacingMode(SpacingResult result) {
-    return result.spacingPeak().filter(peak -> !peak.continuum() && peak.wavenumber() > 0.0)
+    return result.rotation().map(RotatingAnswer::without).orElse(result).spacingPeak().filter(peak -> !peak.continuum() && peak.wavenumber() > 0.0)
         .flatMap(peak -> mode(peak.parity(), peak.order(), peak.wavenumber()));
   }
 

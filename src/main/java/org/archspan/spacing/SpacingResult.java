@@ -22,18 +22,19 @@ import org.archspan.equilibrium.Equilibrium;
  * @param certificate             proof that nothing faster was missed
  * @param gatheringHeight         greatest centroid height that counts as gathering the disk's own gas, cm
  * @param warnings                what a reader of the result must know, one sentence each
+ * @param rotation                how modes were counted under rotation, and the result without it; empty without rotation
  */
 public record SpacingResult(Equilibrium equilibrium, double forceBalanceResidual, WaveRange range, List<BranchPeak> branches,
     Optional<BranchPeak> fastest, Optional<Integer> spacing, AcrossLimit acrossLimit,
     OptionalDouble longestStableWavelength, Optional<CloudComplex> complex, Certificate certificate,
-    double gatheringHeight, List<String> warnings) {
+    double gatheringHeight, List<String> warnings, Optional<RotatingAnswer> rotation) {
 
   /** The same result with one more warning. */
   public SpacingResult warned(String warning) {
     List<String> more = new ArrayList<>(warnings);
     more.add(warning);
     return new SpacingResult(equilibrium, forceBalanceResidual, range, branches, fastest, spacing, acrossLimit,
-        longestStableWavelength, complex, certificate, gatheringHeight, List.copyOf(more));
+        longestStableWavelength, complex, certificate, gatheringHeight, List.copyOf(more), rotation);
   }
 
   /** Whether no wave grows. */

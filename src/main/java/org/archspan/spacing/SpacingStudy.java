@@ -31,6 +31,34 @@ public final class SpacingStudy {
    * @throws org.archspan.stability.UnsolvedException when the tolerance is missed
    */
   public SpacingResult solve() {
+    SpacingResult still = still();
+    return disk.rotation().filter(rotation -> rotation.angularSpeed() > 0.0).isEmpty() ? still : rotating(still);
+  }
+
+  /** The answer with rotation; nothing grows with it that does not grow without. */
+  private SpacingResult rotating(SpacingResult still) {
+    if (still.stable()) {
+      return still;
+    }
+    if (still.fastest().filter(BranchPeak::continuum).isPresent()) {
+      return still.warned("Rotation is given but left out: the fastest growth is that of the continuum above the open top,"
+          + " for which it is not solved; with domain.top-boundary = \"lid\" it is.");
+    }
+    RotatingStudy study = new RotatingStudy(disk, options, still);
+    List<BranchPeak> branches = study.branches();
+    Equilibrium equilibrium = still.equilibrium();
+    Optional<BranchPeak> fastest = branches.stream().findFirst();
+    Optional<Integer> spacing = gathering(branches, equilibrium.bottom() + still.gatheringHeight());
+    Optional<BranchPeak> peak = spacing.map(branches::get).or(() -> fastest);
+    return new SpacingResult(equilibrium, still.forceBalanceResidual(), still.range(), branches, fastest, spacing,
+        still.acrossLimit(), still.longestStableWavelength(),
+        peak.map(at -> complex(equilibrium, at, still.range())), still.certificate(), still.gatheringHeight(),
+        Findings.of(disk, equilibrium, branches, fastest, spacing, still.acrossLimit(), options, still.range()),
+        Optional.of(study.answer(peak)))
+        .warned("Growth curves and the shape of the mode are those without rotation.");
+  }
+
+  private SpacingResult still() {
     Equilibrium equilibrium = EquilibriumBuilder.build(disk, options.tolerance());
     double residual = ForceBalance.required(equilibrium);
     WaveRange range = WaveRange.of(disk, equilibrium, options);
@@ -46,7 +74,7 @@ public final class SpacingStudy {
     AcrossLimit acrossLimit = acrossLimit(equilibrium);
     return new SpacingResult(equilibrium, residual, range, branches, fastest, spacing,
         acrossLimit, longestStable(search), complex, search.certificate(), gatheringHeight,
-        Findings.of(disk, equilibrium, branches, fastest, spacing, acrossLimit, options, range));
+        Findings.of(disk, equilibrium, branches, fastest, spacing, acrossLimit, options, range), Optional.empty());
   }
 
   /** The fastest branch, or the continuum of the atmosphere above where that is faster. */

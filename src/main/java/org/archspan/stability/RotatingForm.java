@@ -98,6 +98,26 @@ final class RotatingForm {
     imaginary[which][i] = constantImaginary + sign * (nr * ii + ni * ir);
   }
 
+  /** X and Y at a node, from sqrt(rho) Z' and the force along D. */
+  Complex[] horizontal(int i, Complex s, double kx, double ky, Complex slope, Complex force) {
+    respond(s.re(), s.im(), kx);
+    double v = atmosphere.alfvenSquared[i];
+    Complex stiffness = new Complex(gasReal * atmosphere.gasPerMass[i] + cosmicRayReal * atmosphere.cosmicRayPerMass[i],
+        gasImaginary * atmosphere.gasPerMass[i] + cosmicRayImaginary * atmosphere.cosmicRayPerMass[i]);
+    Complex square = s.times(s);
+    Complex coriolis = s.times(2.0 * angularSpeed);
+    Complex xx = square.plus(stiffness.times(kx * kx));
+    Complex yy = square.plus(stiffness.times(ky * ky)).plus(new Complex(v * (kx * kx + ky * ky), 0.0));
+    Complex off = stiffness.times(kx * ky);
+    Complex pressure = stiffness.times(slope).minus(force);
+    Complex alongForce = pressure.times(-kx);
+    Complex acrossForce = pressure.plus(slope.times(v)).times(-ky);
+    Complex det = xx.times(yy).minus(off.minus(coriolis).times(off.plus(coriolis)));
+    Complex x = yy.times(alongForce).minus(off.minus(coriolis).times(acrossForce)).over(det);
+    Complex y = xx.times(acrossForce).minus(off.plus(coriolis).times(alongForce)).over(det);
+    return new Complex[] {x, y};
+  }
+
   /** The closures at a complex growth rate. */
   private void respond(double growth, double frequency, double kx) {
     gasReal = gas.adiabaticIndex();

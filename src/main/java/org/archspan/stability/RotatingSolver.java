@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
+import org.archspan.disk.RefusedModelException;
 import org.archspan.mesh.Mesh;
 
 /**
@@ -23,6 +24,8 @@ public final class RotatingSolver {
   private static final int MOST_HALVINGS = 4;
   private static final int SEARCHED_ORDERS = 40;
   private static final int MOST_DIVISIONS = 24;
+  /** Of |s|: a smaller frequency is rounding. */
+  private static final double REAL = 1e-7;
   private final ModeProblem problem;
   private final Scales scales;
   private final ModeSolver still;
@@ -39,7 +42,7 @@ public final class RotatingSolver {
    */
   public RotatingSolver(ModeProblem problem, double angularSpeed) {
     if (problem.turn().turns()) {
-      throw new org.archspan.disk.RefusedModelException("rotation is not solved where the field turns with height; remove"
+      throw new RefusedModelException("rotation is not solved where the field turns with height; remove"
           + " [rotation] or field.turn");
     }
     this.problem = problem;
@@ -47,6 +50,11 @@ public final class RotatingSolver {
     this.scales = still.scales();
     this.angularSpeed = angularSpeed * scales.time();
     this.ky = problem.crossWavenumber() * scales.length();
+  }
+
+  /** The same at another rotation rate, s^-1. */
+  public RotatingSolver withAngularSpeed(double other) {
+    return new RotatingSolver(problem, other);
   }
 
   /** The problem that is solved. */
@@ -203,9 +211,7 @@ public final class RotatingSolver {
       if (root == null) {
         return Optional.empty();
       }
-      if (guess.frequency() == 0.0 || Math.abs(root.im()) < 1e-9 * root.magnitude()) {
-        root = Math.abs(root.im()) < 1e-6 * root.magnitude() ? new Complex(root.re(), 0.0) : root;
-      }
+      root = Math.abs(root.im()) < REAL * root.magnitude() ? new Complex(root.re(), 0.0) : root;
       RotatingMode mode = checked(kx, root);
       if (mode.growthError() <= problem.tolerance()) {
         return Optional.of(mode);
@@ -223,16 +229,24 @@ public final class RotatingSolver {
     return edge >= radius ? 0 : new WindingContour(working, kx, ky).zeros(edge, radius);
   }
 
-  /** The checking mesh's determinant, for the shape of a mode. */
-  RotatingDeterminant checking() {
-    return checking;
+  /** Height of the kinetic-energy centroid of a mode of this solver, cm. */
+  public double centroidHeight(RotatingMode mode) {
+    return shape(mode).centroid() * scales.length();
   }
 
-  Scales scales() {
-    return scales;
+  /** Its column contrast, as of {@link EigenMode#columnContrast()}, dimensionless. */
+  public double columnContrast(RotatingMode mode) {
+    double bottom = problem.equilibrium().at(problem.equilibrium().bottom()).logDensity();
+    double[] height = checking.atmosphere().height;
+    double[] rootDensity = new double[height.length];
+    for (int i = 0; i < height.length; i++) {
+      rootDensity[i] = Math.exp(0.5 * (problem.equilibrium().at(height[i] * scales.length()).logDensity() - bottom));
+    }
+    return shape(mode).columnContrast(problem.parity(), rootDensity);
   }
 
-  double ky() {
-    return ky;
+  private RotatingShape shape(RotatingMode mode) {
+    Complex s = new Complex(mode.growthRate() * scales.time(), mode.frequency() * scales.time());
+    return new RotatingShape(checking, s, mode.wavenumber() * scales.length(), ky);
   }
 }

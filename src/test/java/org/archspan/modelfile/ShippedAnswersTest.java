@@ -9,6 +9,7 @@ import org.archspan.boundary.Parity;
 import org.archspan.reference.UniformAtmosphere;
 import org.archspan.spacing.BranchPeak;
 import org.archspan.spacing.HeldBy;
+import org.archspan.spacing.RotatingAnswer;
 import org.archspan.spacing.SpacingResult;
 import org.archspan.spacing.SpacingStudy;
 import org.archspan.units.Constants;
@@ -22,7 +23,9 @@ class ShippedAnswersTest {
 
   private static SpacingResult solve(String name, String... settings) {
     Model model = ModelTexts.model(ShippedModels.text(name), settings);
-    return new SpacingStudy(model.disk(), model.options(), model.arm()).solve();
+    SpacingResult result = new SpacingStudy(model.disk(), model.options(), model.arm()).solve();
+    // what was published, and the closed forms, are without rotation
+    return result.rotation().map(RotatingAnswer::without).orElse(result);
   }
 
   private static BranchPeak fastestOf(SpacingResult result, Parity parity) {
@@ -107,5 +110,17 @@ class ShippedAnswersTest {
   @CsvSource({"1.6666666666666667, true", "1.51, true", "1.0, false"})
   void stableByTheIndexOfTheGas(double index, boolean stable) {
     assertThat(solve("stable-disk", "gas.adiabatic-index=" + index).stable()).isEqualTo(stable);
+  }
+
+  /** Rotation slows every branch of the thick disk, and never one more than the bound allows. */
+  @Test
+  void rotationOnlySlowsGrowth() {
+    Model model = ModelTexts.model(ShippedModels.text("thick-disk-near-the-sun"), "waves.branches=2");
+    SpacingResult rotating = new SpacingStudy(model.disk(), model.options(), model.arm()).solve();
+    SpacingResult still = rotating.rotation().orElseThrow().without();
+    for (Parity parity : List.of(Parity.MIRROR, Parity.FLEXING)) {
+      assertThat(fastestOf(rotating, parity).growthRate()).isLessThan(fastestOf(still, parity).growthRate());
+    }
+    assertThat(rotating.rotation().orElseThrow().contourPoints()).isGreaterThan(10);
   }
 }
