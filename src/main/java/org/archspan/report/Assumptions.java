@@ -54,11 +54,17 @@ public final class Assumptions {
   /** A text that opens with the title and what holds for every wave. */
   static TextBlock block(String title, Disk disk, Equilibrium equilibrium, OutputUnits units, int width) {
     TextBlock block = new TextBlock(width).heading(title).heading("Assumed");
-    of(disk.withoutRotation(), equilibrium, ANY, units).forEach((subject, words) -> {
+    of(disk, equilibrium, ANY, units).forEach((subject, words) -> {
       if (!subject.equals("waves")) {
         block.labelled(subject, words);
       }
     });
+    return block;
+  }
+
+  /** The same for a result that leaves rotation out. */
+  static TextBlock stillBlock(String title, Disk disk, Equilibrium equilibrium, OutputUnits units, int width) {
+    TextBlock block = block(title, disk.withoutRotation(), equilibrium, units, width);
     disk.rotation().ifPresent(rotation -> block.labelled("rotation", "given, but not in this result; archspan spacing"
         + " solves it"));
     return block;

@@ -18,7 +18,7 @@ public final class CurvesText {
   /** The summary, wrapped to a width in characters. */
   public static String text(String title, Disk disk, Equilibrium equilibrium, List<GrowthCurve> curves,
       OutputUnits units, int width) {
-    TextBlock block = Assumptions.block(title, disk, equilibrium, units, width);
+    TextBlock block = Assumptions.stillBlock(title, disk, equilibrium, units, width);
     block.heading("Growth curves");
     if (curves.isEmpty()) {
       return block.sentence("No branch grows at any wavelength of the range.").text();

@@ -34,7 +34,7 @@ public final class EnsembleText {
   public static String text(String title, Disk disk, Equilibrium equilibrium, EnsembleSummary summary,
       OutputUnits units, boolean armWidth, int columns) {
     return new EnsembleText(summary, units, armWidth)
-        .fill(Assumptions.block(title + " (assumptions at the middles)", disk, equilibrium, units, columns),
+        .fill(Assumptions.stillBlock(title + " (assumptions at the middles)", disk, equilibrium, units, columns),
         disk).text();
   }
 

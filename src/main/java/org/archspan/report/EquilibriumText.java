@@ -16,7 +16,7 @@ public final class EquilibriumText {
 
   /** The summary, wrapped to a width in characters. */
   public static String text(String title, Disk disk, Equilibrium equilibrium, OutputUnits units, int width) {
-    TextBlock block = Assumptions.block(title, disk, equilibrium, units, width);
+    TextBlock block = Assumptions.stillBlock(title, disk, equilibrium, units, width);
     block.heading("Base state")
         .labelled("scale height", Numbers.length(equilibrium.scaleHeight(), units))
         .labelled("column", Numbers.plain(units.surfaceDensity(equilibrium.surfaceDensity())) + " "

@@ -32,7 +32,7 @@ public final class InferenceText {
   public static String text(String title, Disk disk, Equilibrium equilibrium, Inference inference, OutputUnits units,
       int width) {
     return new InferenceText(inference, units)
-        .fill(Assumptions.block(title + " (assumptions at the middles)", disk, equilibrium, units, width), disk).text();
+        .fill(Assumptions.stillBlock(title + " (assumptions at the middles)", disk, equilibrium, units, width), disk).text();
   }
 
   private TextBlock fill(TextBlock block, Disk disk) {

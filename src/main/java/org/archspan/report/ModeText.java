@@ -20,7 +20,7 @@ public final class ModeText {
   /** The summary, wrapped to a width in characters. */
   public static String text(String title, Disk disk, EigenMode mode, Equilibrium equilibrium, OutputUnits units,
       int width) {
-    TextBlock block = Assumptions.block(title, disk, equilibrium, units, width).heading("Mode");
+    TextBlock block = Assumptions.stillBlock(title, disk, equilibrium, units, width).heading("Mode");
     String parity = switch (mode.parity()) {
       case MIRROR -> "mirror-symmetric about the midplane";
       case FLEXING -> "flexing the midplane";

@@ -25,7 +25,7 @@ public final class PlaneText {
         }
       }
     }
-    TextBlock block = Assumptions.block(title, disk, equilibrium, units, width).heading("Plane of wavenumbers");
+    TextBlock block = Assumptions.stillBlock(title, disk, equilibrium, units, width).heading("Plane of wavenumbers");
     double best = plane.growthRate()[bestAlong][bestAcross];
     if (best == 0.0) {
       block.sentence("No wave grows on this grid.");
