@@ -29,7 +29,8 @@ final class UnitTable {
     put(units, new Dimension(0, 0, 0, 2), "K", 1.0, "kK", 1e3, "MK", 1e6);
     put(units, new Dimension(2, 2, -4, 0), "dyn", 1.0);
     put(units, new Dimension(4, 2, -4, 0), "erg", 1.0, "eV", Constants.ELECTRON_VOLT);
-    put(units, Dimension.NONE, "rad", 1.0, "deg", Math.PI / 180.0);
+    put(units, Dimension.NONE, "rad", 1.0, "deg", Math.PI / 180.0, "arcmin", Math.PI / 10_800.0,
+        "arcsec", Math.PI / 648_000.0, "mas", Math.PI / 6.48e8);
     return Map.copyOf(units);
   }
 

@@ -41,7 +41,8 @@ class ArchitectureTest {
   private static final List<String> MODEL = List.of("units", "gravity", "closure", "field", "boundary");
   private static final List<String> KERNELS = List.of("linalg", "mesh");
   private static final List<String> NUMBERS = join(List.of(MODEL, KERNELS,
-      List.of("disk", "equilibrium", "stability", "spacing", "shear", "comparison", "uncertainty", "inference")));
+      List.of("disk", "equilibrium", "stability", "spacing", "shear", "comparison", "uncertainty", "inference",
+          "observe")));
 
   /** Every package and the packages that it may use; a new package is added here. */
   private static Map<String, List<String>> mayUse() {
@@ -58,11 +59,13 @@ class ArchitectureTest {
     table.put("comparison", join(List.of(MODEL, List.of("disk", "equilibrium", "stability", "spacing"))));
     table.put("uncertainty", List.of("units"));
     table.put("inference", List.of("uncertainty"));
+    table.put("observe", List.of("units"));
+    table.put("catalogue", List.of("units"));
     table.put("table", NUMBERS);
     table.put("figure", NUMBERS);
     table.put("report", join(List.of(NUMBERS, List.of("table", "figure"))));
     table.put("modelfile", join(List.of(MODEL, List.of("disk", "spacing", "comparison", "uncertainty", "inference"))));
-    table.put("cli", join(List.of(NUMBERS, List.of("table", "figure", "report", "modelfile"))));
+    table.put("cli", join(List.of(NUMBERS, List.of("catalogue", "table", "figure", "report", "modelfile"))));
     return table;
   }
 

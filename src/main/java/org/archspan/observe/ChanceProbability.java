@@ -1,0 +1,33 @@
+package org.archspan.observe;
+
+import org.apache.commons.math3.stat.interval.ClopperPearsonInterval;
+import org.apache.commons.math3.stat.interval.ConfidenceInterval;
+
+/**
+ * How often chance does as well as the observation.
+ *
+ * @param exceeding trials that reach the observed value
+ * @param trials    number of trials
+ */
+public record ChanceProbability(int exceeding, int trials) {
+  private static final double ONE_SIGMA = 0.6827;
+
+  /** The p-value, {@code (exceeding + 1)/(trials + 1)}, the observation counted as one of the trials, dimensionless. */
+  public double value() {
+    return (exceeding + 1.0) / (trials + 1.0);
+  }
+
+  /** Lower end of the exact binomial interval of 68 per cent (Clopper and Pearson 1934), dimensionless. */
+  public double lower() {
+    return exceeding == 0 ? 0.0 : interval().getLowerBound();
+  }
+
+  /** Its upper end, dimensionless. */
+  public double upper() {
+    return exceeding == trials ? 1.0 : interval().getUpperBound();
+  }
+
+  private ConfidenceInterval interval() {
+    return new ClopperPearsonInterval().createInterval(trials, exceeding, ONE_SIGMA);
+  }
+}
