@@ -43,7 +43,8 @@ public final class ComplexesReader {
     try (var stream = Files.newInputStream(file)) {
       byte[] bytes = stream.readNBytes(LARGEST + 1);
       if (bytes.length > LARGEST) {
-        throw new RefusedTableException(List.of(file + ": larger than 16 MB; at most " + MOST_ROWS + " complexes are read"));
+        throw new RefusedTableException(List.of(file + ": larger than 16 MB; at most " + MOST_ROWS + " complexes are"
+            + " read"));
       }
       return new ComplexesReader(raw(file.toString(), bytes)).complexes();
     } catch (IOException reason) {
@@ -82,7 +83,8 @@ public final class ComplexesReader {
       }
     }
     throw new RefusedTableException(List.of(table.file() + ": found the columns " + String.join(", ", table.names())
-        + "; needed are east and north, or ra and dec, or x and y (in the plane), with units: east [arcsec], north [arcsec]"));
+        + "; needed are east and north, or ra and dec, or x and y (in the plane), with units: east [arcsec], north"
+        + " [arcsec]"));
   }
 
   private List<String> names() {
@@ -127,7 +129,8 @@ public final class ComplexesReader {
       }
       return unit.factor();
     } catch (UnitException fault) {
-      faults.add(table.file() + ": column " + name + ": " + fault.getMessage() + "; needed is " + needed + ", written as "
+      faults.add(table.file() + ": column " + name + ": " + fault.getMessage() + "; needed is " + needed + ","
+          + " written as "
           + name + (plane ? " [kpc]" : " [arcsec]"));
       return 1.0;
     }

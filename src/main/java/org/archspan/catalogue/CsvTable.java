@@ -13,8 +13,8 @@ import org.apache.commons.csv.CSVParser;
 import org.apache.commons.csv.CSVRecord;
 
 /**
- * Reads CSV with units in its header ({@code east [arcsec], north [arcsec]}), or ECSV, whose commented header carries them
- * ({@code # - {name: east, unit: arcsec, datatype: float64}}).
+ * Reads CSV with units in its header ({@code east [arcsec], north [arcsec]}), or ECSV, whose commented header carries
+ * them ({@code # - {name: east, unit: arcsec, datatype: float64}}).
  */
 final class CsvTable {
   private static final Pattern BRACKETED = Pattern.compile("([^\\[]*?)\\s*\\[([^\\]]*)\\]\\s*");

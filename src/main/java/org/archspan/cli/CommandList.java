@@ -19,13 +19,16 @@ final class CommandList {
     commands.put("compare", CompareCommand::new);
     commands.put("ensemble", EnsembleCommand::new);
     commands.put("infer", InferCommand::new);
+    commands.put("observe", ObserveCommand::new);
     commands.put("check", CheckCommand::new);
     commands.put("models", ModelsCommand::new);
     commands.put("manual", ManualCommand::new);
     commands.put("completion", CompletionCommand::new);
   }
 
-  /** Adds all; or only the one that is called, since describing the others to the parser takes as long as a solution. */
+  /**
+   * Adds all; or only the one that is called, since describing the others to the parser takes as long as a solution.
+   */
   void addTo(CommandLine commandLine, String... arguments) {
     Supplier<Callable<Integer>> called = arguments.length == 0 ? null : commands.get(arguments[0]);
     if (called != null) {

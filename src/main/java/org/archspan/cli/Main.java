@@ -4,8 +4,11 @@ import java.io.File;
 import java.io.IOException;
 import java.net.URL;
 import java.util.jar.JarFile;
+import org.archspan.catalogue.RefusedTableException;
+import org.archspan.catalogue.UnreadableTableException;
 import org.archspan.disk.RefusedModelException;
 import org.archspan.modelfile.UnreadableFileException;
+import org.archspan.observe.UnmeasurableArmException;
 import org.archspan.stability.UnsolvedException;
 import org.archspan.table.ReadException;
 import org.archspan.table.WriteException;
@@ -73,14 +76,15 @@ public final class Main {
   }
 
   private static int status(Exception fault) {
-    if (fault instanceof ModelFault || fault instanceof RefusedModelException) {
+    if (fault instanceof ModelFault || fault instanceof RefusedModelException
+        || fault instanceof RefusedTableException || fault instanceof UnmeasurableArmException) {
       return ExitStatus.MODEL;
     }
     if (fault instanceof UnsolvedException) {
       return ExitStatus.UNSOLVED;
     }
     if (fault instanceof UnreadableFileException || fault instanceof WriteException
-        || fault instanceof ReadException) {
+        || fault instanceof ReadException || fault instanceof UnreadableTableException) {
       return ExitStatus.FILE;
     }
     return -1;

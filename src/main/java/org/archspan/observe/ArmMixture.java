@@ -3,9 +3,9 @@ package org.archspan.observe;
 import java.util.List;
 
 /**
- * Complexes as a mixture: most scatter about a spiral with a normal distribution, the others have any azimuth. The likelihood
- * is that of the azimuths at the given radii, so that spirals of different pitch are compared fairly: a tight one, which
- * passes close to every point, pays for it by {@code sin p}.
+ * Complexes as a mixture: most scatter about a spiral with a normal distribution, the others have any azimuth. The
+ * likelihood is that of the azimuths at the given radii, so that spirals of different pitch are compared fairly: a
+ * tight one, which passes close to every point, pays for it by {@code sin p}.
  *
  * @param spiral the arm
  * @param width  scatter across the arm over the radius, positive, dimensionless

@@ -3,9 +3,9 @@ package org.archspan.observe;
 import java.util.List;
 
 /**
- * Fits the mixture by expectation and maximisation, the line by weighted orthogonal regression in the plane of azimuth and
- * ln r: scatter of a complex across its arm is an error of both coordinates, and a regression of one on the other would bias
- * the pitch angle. Points far from the arm weigh nothing.
+ * Fits the mixture by expectation and maximisation, the line by weighted orthogonal regression in the plane of azimuth
+ * and ln r: scatter of a complex across its arm is an error of both coordinates, and a regression of one on the other
+ * would bias the pitch angle. Points far from the arm weigh nothing.
  */
 final class ArmRefinement {
   private static final int MOST_STEPS = 200;

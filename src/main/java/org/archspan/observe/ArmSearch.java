@@ -6,9 +6,9 @@ import java.util.List;
 import java.util.Optional;
 
 /**
- * Finds the logarithmic spiral that most complexes follow: every pitch angle of both windings on a grid, each with offsets
- * through the complexes themselves and several widths, the best refined. It takes no count of turns: a complex belongs to
- * the turn that passes closest, so an arm may go round the centre more than once.
+ * Finds the logarithmic spiral that most complexes follow: every pitch angle of both windings on a grid, each with
+ * offsets through the complexes themselves and several widths, the best refined. It takes no count of turns: a complex
+ * belongs to the turn that passes closest, so an arm may go round the centre more than once.
  */
 public final class ArmSearch {
   /** Smallest pitch angle that is searched, rad (2 deg): below, a ring is as good a description. */
@@ -33,7 +33,10 @@ public final class ArmSearch {
     }
   }
 
-  /** Arms with locally greatest likelihood and a pitch angle of the range, best first, without repetitions. O(10^3 n^2). */
+  /**
+   * Arms with locally greatest likelihood and a pitch angle of the range, best first, without repetitions. O(10^3
+   * n^2).
+   */
   public List<FittedArm> arms() {
     List<FittedArm> arms = new ArrayList<>();
     List<ArmMixture> starts = starts();

@@ -36,7 +36,8 @@ public final class ArmStudy {
     ArmChain chain = ArmChain.of(arm, positions);
     if (chain.complexes().size() < FEWEST) {
       throw new UnmeasurableArmException("only " + chain.complexes().size() + " of " + positions.size()
-          + " complexes follow one logarithmic spiral; at least " + FEWEST + " are needed. Give the complexes of one arm"
+          + " complexes follow one logarithmic spiral; at least " + FEWEST + " are needed. Give the complexes of one"
+          + " arm"
           + " only, and check centre, inclination and position angle");
     }
     RayleighPeriodogram grid = grid(chain, options);

@@ -19,12 +19,17 @@ public record ChanceProbability(int exceeding, int trials) {
 
   /** Lower end of the exact binomial interval of 68 per cent (Clopper and Pearson 1934), dimensionless. */
   public double lower() {
-    return exceeding == 0 ? 0.0 : interval().getLowerBound();
+    return exceeding == 0 ? 0.0 : exceeding == trials ? 1.0 - ofNone() : interval().getLowerBound();
   }
 
   /** Its upper end, dimensionless. */
   public double upper() {
-    return exceeding == trials ? 1.0 : interval().getUpperBound();
+    return exceeding == trials ? 1.0 : exceeding == 0 ? ofNone() : interval().getUpperBound();
+  }
+
+  /** Upper end where no trial counts, in closed form, for the library refuses that case. */
+  private double ofNone() {
+    return -Math.expm1(Math.log(0.5 * (1.0 - ONE_SIGMA)) / trials);
   }
 
   private ConfidenceInterval interval() {

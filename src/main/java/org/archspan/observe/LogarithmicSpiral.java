@@ -14,7 +14,10 @@ public record LogarithmicSpiral(double pitchAngle, double offset, double referen
     return referenceRadius * Math.exp((offset + azimuth * Math.sin(pitchAngle)) / Math.cos(pitchAngle));
   }
 
-  /** Signed distance of a point from the spiral over its radius, dimensionless, for an azimuth (rad) of the right turn. */
+  /**
+   * Signed distance of a point from the spiral over its radius, dimensionless, for an azimuth (rad) of the right
+   * turn.
+   */
   double across(double logRadius, double azimuth) {
     return logRadius * Math.cos(pitchAngle) - azimuth * Math.sin(pitchAngle) - offset;
   }

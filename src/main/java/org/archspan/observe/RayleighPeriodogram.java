@@ -7,9 +7,9 @@ import org.apache.commons.math3.optim.univariate.SearchInterval;
 import org.apache.commons.math3.optim.univariate.UnivariateObjectiveFunction;
 
 /**
- * Rayleigh power of points on a line, {@code P(f) = |sum w exp(2 pi i f s)|^2 / sum w}, over equidistant spatial frequencies.
- * At one frequency and for random points of unit weight it exceeds P by chance with probability {@code exp(-P)}, nearly;
- * n points at exact multiples of 1/f give n.
+ * Rayleigh power of points on a line, {@code P(f) = |sum w exp(2 pi i f s)|^2 / sum w}, over equidistant spatial
+ * frequencies. At one frequency and for random points of unit weight it exceeds P by chance with probability {@code
+ * exp(-P)}, nearly; n points at exact multiples of 1/f give n.
  *
  * <p>Source: Rayleigh (1880), Phil. Mag. 10, 73; Mardia &amp; Jupp (2000), Directional Statistics, section 6.3.
  *
@@ -51,7 +51,10 @@ public record RayleighPeriodogram(double lowest, double step, int size) {
     return (cosine * cosine + sine * sine) / sum;
   }
 
-  /** Power at all frequencies, dimensionless, of positions (cm) with weights. Phases advance by rotation: O(size x points). */
+  /**
+   * Power at all frequencies, dimensionless, of positions (cm) with weights. Phases advance by rotation: O(size x
+   * points).
+   */
   public double[] powers(double[] positions, double[] weights) {
     double[] cosine = new double[size];
     double[] sine = new double[size];

@@ -39,8 +39,8 @@ final class SpacingBootstrap {
   }
 
   /**
-   * The peak of the periodogram of the arc positions. Its error is the scatter of those samples whose highest peak lies within
-   * the resolution, 1/length, of the observed one; how many do is a result of its own.
+   * The peak of the periodogram of the arc positions. Its error is the scatter of those samples whose highest peak
+   * lies within the resolution, 1/length, of the observed one; how many do is a result of its own.
    */
   PeriodogramPeak peak(RayleighPeriodogram grid, List<PlanePosition> positions) {
     double[] observed = chain.arcPositions();

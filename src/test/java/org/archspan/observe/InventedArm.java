@@ -5,10 +5,10 @@ import java.util.List;
 import java.util.Random;
 
 /**
- * Makes the complexes of an invented galaxy. Along a logarithmic spiral from the inner radius outward lie sites at equal
- * steps of arc length; each is displaced along the arm by a normal jitter, and across it by a normal scatter that is a
- * fraction of the radius; some sites stay empty; and some strays lie anywhere between the inner and the outer radius.
- * Lengths in kpc, angles in degrees.
+ * Makes the complexes of an invented galaxy. Along a logarithmic spiral from the inner radius outward lie sites at
+ * equal steps of arc length; each is displaced along the arm by a normal jitter, and across it by a normal scatter
+ * that is a fraction of the radius; some sites stay empty; and some strays lie anywhere between the inner and the
+ * outer radius. Lengths in kpc, angles in degrees.
  *
  * @param pitch   pitch angle, negative for the other winding
  * @param inner   radius of the first site
