@@ -144,7 +144,7 @@ final class EnsembleCommand extends ModelCommand {
 
   private void prepare(DrawFolder folder, DrawRange range) throws IOException {
     folder.clear(range.first(), range.end(), common.overwrite);
-    for (DrawFolder.Block block : folder.blocks()) {
+    for (DrawFolder.Block block : folder.ownBlocks()) {
       if (block.first() < range.end() && block.last() >= range.first()) {
         keepOrRemove(folder, block, range);
       }

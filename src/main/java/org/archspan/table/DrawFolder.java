@@ -6,6 +6,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
@@ -55,12 +56,26 @@ public final class DrawFolder {
 
   /** All blocks in the folder and the folders in it, by their first draws. */
   public List<Block> blocks() throws ReadException {
+    return blocks(Files::walk);
+  }
+
+  /** The blocks in the folder itself; other runs may be writing into it meanwhile. */
+  public List<Block> ownBlocks() throws ReadException {
+    return blocks(Files::list);
+  }
+
+  /** A way to go through a folder. */
+  private interface Listing {
+    Stream<Path> of(Path folder) throws IOException;
+  }
+
+  private List<Block> blocks(Listing listing) throws ReadException {
     if (!Files.isDirectory(folder)) {
       return List.of();
     }
-    try (Stream<Path> files = Files.walk(folder, 4)) {
+    try (Stream<Path> files = listing.of(folder)) {
       return files.flatMap(file -> block(file).stream())
-          .sorted(java.util.Comparator.comparingLong(Block::first).thenComparingLong(Block::last)).toList();
+          .sorted(Comparator.comparingLong(Block::first).thenComparingLong(Block::last)).toList();
     } catch (IOException | UncheckedIOException fault) {
       throw new ReadException(folder + " cannot be read: " + fault.getMessage());
     }
