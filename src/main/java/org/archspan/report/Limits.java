@@ -11,19 +11,16 @@ final class Limits {
 
   /** Adds the sentences that hold for every case. */
   static void add(TextBlock block, Disk disk) {
-    if (disk.rotation().isPresent()) {
-      block.bullet("Rotation is given in the model and is not in these answers: it would slow long waves along the"
-          + " field.");
-    }
-    block.bullet("Linear theory on a static base state that varies with height alone; " + leftOut(disk.selfGravity())
-        + " not in it.");
+    block.bullet("Linear theory on a static base state that varies with height alone; "
+        + leftOut(disk.rotation().isPresent(), disk.selfGravity()) + " not in it.");
   }
 
-  private static String leftOut(SelfGravity selfGravity) {
+  private static String leftOut(boolean rotates, SelfGravity selfGravity) {
+    String motion = rotates ? "shear" : "rotation, shear";
     return switch (selfGravity) {
-      case OFF -> "shear and the gas's own gravity are";
-      case EQUILIBRIUM -> "shear and the gravity of the perturbation itself are";
-      case FULL -> "shear is";
+      case OFF -> motion + " and the gas's own gravity are";
+      case EQUILIBRIUM -> motion + " and the gravity of the perturbation itself are";
+      case FULL -> rotates ? "shear is" : "rotation and shear are";
     };
   }
 

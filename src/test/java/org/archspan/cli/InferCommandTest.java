@@ -70,6 +70,7 @@ class InferCommandTest {
   @Test
   void twoIntervalsWhereTheRelationTurns() {
     JsonObject json = json(CommandRun.of("infer", "models/stable-disk.toml", "--set", "gas.adiabatic-index=1.6",
+        "--set", "rotation.angular-speed=0 km/s/kpc",
         "--input", "field.strength=1uG:9uG:17", "--spacing", "5 kpc", "--error", "500 pc", "--draws", "64", "--quiet",
         "--json"));
     JsonArray intervals = json.getAsJsonArray("intervals");
