@@ -42,7 +42,7 @@ class ArchitectureTest {
   private static final List<String> KERNELS = List.of("linalg", "mesh");
   private static final List<String> NUMBERS = join(List.of(MODEL, KERNELS,
       List.of("disk", "equilibrium", "stability", "spacing", "shear", "comparison", "uncertainty", "inference",
-          "observe")));
+          "observe", "rivals")));
 
   /** Every package and the packages that it may use; a new package is added here. */
   private static Map<String, List<String>> mayUse() {
@@ -57,6 +57,7 @@ class ArchitectureTest {
     table.put("spacing", join(List.of(MODEL, KERNELS, List.of("disk", "equilibrium", "stability"))));
     table.put("shear", join(List.of(MODEL, KERNELS, List.of("disk", "equilibrium", "stability", "spacing"))));
     table.put("comparison", join(List.of(MODEL, List.of("disk", "equilibrium", "stability", "spacing"))));
+    table.put("rivals", join(List.of(MODEL, List.of("disk", "equilibrium", "stability", "spacing"))));
     table.put("uncertainty", List.of("units"));
     table.put("inference", List.of("uncertainty"));
     table.put("observe", List.of("units"));
@@ -64,7 +65,8 @@ class ArchitectureTest {
     table.put("table", NUMBERS);
     table.put("figure", NUMBERS);
     table.put("report", join(List.of(NUMBERS, List.of("table", "figure"))));
-    table.put("modelfile", join(List.of(MODEL, List.of("disk", "spacing", "comparison", "uncertainty", "inference"))));
+    table.put("modelfile", join(List.of(MODEL, List.of("disk", "spacing", "comparison", "uncertainty", "inference",
+        "rivals"))));
     table.put("cli", join(List.of(NUMBERS, List.of("catalogue", "table", "figure", "report", "modelfile"))));
     return table;
   }
