@@ -20,6 +20,7 @@ final class CommandList {
     commands.put("ensemble", EnsembleCommand::new);
     commands.put("infer", InferCommand::new);
     commands.put("observe", ObserveCommand::new);
+    commands.put("rivals", RivalsCommand::new);
     commands.put("check", CheckCommand::new);
     commands.put("models", ModelsCommand::new);
     commands.put("manual", ManualCommand::new);

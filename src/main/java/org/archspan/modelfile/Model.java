@@ -2,6 +2,7 @@ package org.archspan.modelfile;
 
 import java.util.Map;
 import org.archspan.disk.Disk;
+import org.archspan.rivals.RivalInputs;
 import org.archspan.spacing.Arm;
 import org.archspan.spacing.SearchOptions;
 import org.archspan.uncertainty.Uncertainty;
@@ -15,11 +16,12 @@ import org.archspan.units.OutputUnits;
  * @param disk          the physics
  * @param options       what to search
  * @param arm           the spiral arm
+ * @param rivals        what other instabilities need beside the disk
  * @param units         units of results
  * @param inputs        every key with its value as given, in the order of the file
  * @param uncertainties of the inputs that have one, by key
  * @param uncertain     the same model with any values of those inputs
  */
-public record Model(String source, String title, Disk disk, SearchOptions options, Arm arm, OutputUnits units,
-    Map<String, String> inputs, Map<String, Uncertainty> uncertainties, UncertainModel uncertain) {
+public record Model(String source, String title, Disk disk, SearchOptions options, Arm arm, RivalInputs rivals,
+    OutputUnits units, Map<String, String> inputs, Map<String, Uncertainty> uncertainties, UncertainModel uncertain) {
 }

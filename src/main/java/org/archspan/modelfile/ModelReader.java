@@ -87,7 +87,7 @@ public final class ModelReader {
     Map<String, String> given = new LinkedHashMap<>();
     inputs.entries().forEach((key, entry) -> given.put(key, String.valueOf(entry.value())));
     return new Model(source, inputs.text("title").orElse(source), central.disk(), central.options(), central.arm(),
-        new SurroundingsReader(inputs).units(), given, inputs.uncertainties(),
+        new RivalReader(inputs).read(gravity), new SurroundingsReader(inputs).units(), given, inputs.uncertainties(),
         new UncertainModel(inputs, folder, gravity, tolerance));
   }
 }

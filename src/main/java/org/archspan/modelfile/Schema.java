@@ -26,7 +26,7 @@ import org.archspan.gravity.LawInput;
 /** Every key of the model file. */
 public final class Schema {
   /** Arrays of tables; a single gravity table may stand without a number. */
-  static final List<String> ARRAYS = List.of("gas.component", "gas.stratum", "gas.layer", "gravity");
+  static final List<String> ARRAYS = List.of("gas.component", "gas.stratum", "gas.layer", "gravity", "interface");
   private static final Map<String, KeySpec> KEYS = keys();
 
   private Schema() {
@@ -73,6 +73,7 @@ public final class Schema {
     field(specs);
     gravity(specs);
     surroundings(specs);
+    rivals(specs);
     Map<String, KeySpec> keys = new LinkedHashMap<>();
     specs.forEach(spec -> keys.merge(spec.key(), spec, (first, second) -> first));
     return keys;
@@ -95,8 +96,11 @@ public final class Schema {
   }
 
   private static KeySpec density(String key) {
-    return new KeySpec(key, DENSITY, "cm^-3", POSITIVE, List.of(), "none",
-        "density at the midplane or on the floor: hydrogen nuclei or mass in a volume");
+    return density(key, "density at the midplane or on the floor: hydrogen nuclei or mass in a volume");
+  }
+
+  private static KeySpec density(String key, String meaning) {
+    return new KeySpec(key, DENSITY, "cm^-3", POSITIVE, List.of(), "none", meaning);
   }
 
   private static void gas(List<KeySpec> specs) {
@@ -178,5 +182,23 @@ public final class Schema {
     specs.add(quantity("arm.crossing-time", "Myr", POSITIVE, "none", "time the gas spends in the arm"));
     specs.add(new KeySpec("output.length", TEXT, "", ANY, List.of(), "pc", "unit of length in results"));
     specs.add(new KeySpec("output.time", TEXT, "", ANY, List.of(), "Myr", "unit of time in results"));
+  }
+
+  private static void rivals(List<KeySpec> specs) {
+    specs.add(quantity("rotation.lag", "km/s/kpc", POSITIVE, "none", "loss of rotation speed with height"));
+    specs.add(quantity("stars.surface-density", "Msun/pc^2", POSITIVE, "of the isothermal sheet",
+        "of the stellar disk"));
+    specs.add(quantity("stars.dispersion", "km/s", SPEED, "of the isothermal sheet", "of the stars along the radius"));
+    specs.add(quantity("stars.height", "pc", POSITIVE, "of an isothermal sheet",
+        "surface density over twice the midplane density of the stars"));
+    specs.add(new KeySpec("interface.#.name", TEXT, "", ANY, List.of(), "its number", "of an interface of two layers"));
+    specs.add(density("interface.#.density-below", "hydrogen nuclei or mass in a volume"));
+    specs.add(density("interface.#.density-above", "hydrogen nuclei or mass in a volume"));
+    specs.add(quantity("interface.#.field-below", "uG", NOT_NEGATIVE, "0", "horizontal field in the layer below"));
+    specs.add(quantity("interface.#.field-above", "uG", NOT_NEGATIVE, "0", "in the layer above, parallel to it"));
+    specs.add(quantity("interface.#.shear", "km/s", NOT_NEGATIVE, "0", "difference of velocity along the field"));
+    specs.add(quantity("interface.#.gravity", "cm/s^2", ANY, "none", "or deceleration, towards the layer below"));
+    specs.add(quantity("interface.#.depth-below", "pc", POSITIVE, "infinite", "of the layer below"));
+    specs.add(quantity("interface.#.depth-above", "pc", POSITIVE, "infinite", "of the layer above"));
   }
 }

@@ -11,7 +11,7 @@ public final class ShippedModels {
   private static final List<String> NAMES = List.of("thick-disk-near-the-sun", "solar-neighbourhood",
       "uniform-gravity-atmosphere", "stellar-sheet", "galactic-centre-ring", "outer-disk", "starburst", "tanh-halo",
       "stable-disk", "solar-flux-sheet", "cool-star-flux-sheet", "half-space-field",
-      "uncertain-disk");
+      "uncertain-disk", "gas-and-stars-with-shell");
 
   private ShippedModels() {
   }

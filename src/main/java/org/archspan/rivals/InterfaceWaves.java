@@ -6,6 +6,7 @@ import org.apache.commons.math3.optim.nonlinear.scalar.GoalType;
 import org.apache.commons.math3.optim.univariate.BrentOptimizer;
 import org.apache.commons.math3.optim.univariate.SearchInterval;
 import org.apache.commons.math3.optim.univariate.UnivariateObjectiveFunction;
+import org.archspan.units.Constants;
 
 /**
  * Buoyant (Rayleigh-Taylor) and shear (Kelvin-Helmholtz) overturning of an interface, for waves along the field and the
@@ -67,8 +68,8 @@ public final class InterfaceWaves {
   }
 
   /**
-   * In deep layers the wave that neither grows nor falls, cm: shorter waves are held by tension, or longer ones by gravity;
-   * NaN where there is none.
+   * In deep layers the wave that neither grows nor falls, cm: shorter waves are held by tension, or longer ones by
+   * gravity; NaN where there is none.
    */
   public double deepCutoff() {
     double wavelength = 2.0 * Math.PI * shortWaveStiffness() / layers.overturningWeight();
@@ -139,5 +140,14 @@ public final class InterfaceWaves {
         new UnivariateObjectiveFunction(x -> growthRateSquared(Math.exp(x))),
         new SearchInterval(high - (best + 1) * step, high - Math.max(0, best - 1) * step)).getPoint();
     return 2.0 * Math.PI / Math.exp(logarithm);
+  }
+
+  /** Shortest and longest wavelength that show the curve, cm: about the fastest, the cutoff, or the lesser depth. */
+  public double[] tellingRange() {
+    double fastest = fastest();
+    double cutoff = cutoff();
+    double depth = Math.min(layers.depthBelow(), layers.depthAbove());
+    double middle = fastest > 0.0 ? fastest : cutoff > 0.0 ? cutoff : Double.isFinite(depth) ? depth : Constants.PARSEC;
+    return new double[] {0.1 * middle, 30.0 * middle};
   }
 }

@@ -23,7 +23,7 @@ import org.junit.jupiter.api.Test;
 class ShearRichardsonTest {
   private static Equilibrium atmosphere() {
     return EquilibriumBuilder.build(new Disk(new Gas.Isothermal(1.0, OptionalDouble.of(1.0), OptionalDouble.empty()),
-        GasClosure.adiabatic(2.0), new MagneticField.ConstantRatio(0.0), CosmicRays.none(),
+        new GasClosure(2.0), new MagneticField.ConstantRatio(0.0), CosmicRays.none(),
         List.of(new UniformGravity(1.0)), new Domain(Optional.of(Height.centimetres(0.0)),
             Optional.of(Height.centimetres(5.0)), Optional.of(TopBoundary.LID))), 1e-8);
   }
