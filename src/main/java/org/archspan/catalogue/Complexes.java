@@ -7,9 +7,9 @@ import java.util.List;
  *
  * @param kind   what the two coordinates are
  * @param names  of the complexes
- * @param first  to the east, right ascension, or x; rad, or cm for positions in the plane
- * @param second to the north, declination, or y; rad, or cm for positions in the plane
- * @param error  standard error of both, rad or cm; 0 where none is given
+ * @param first  to the east, right ascension, or x; in rad; in cm, for positions in the plane
+ * @param second to the north, declination, or y; in rad; in cm, for positions in the plane
+ * @param error  standard error of both, in rad; in cm, for positions in the plane; 0 where none is given
  */
 public record Complexes(Kind kind, List<String> names, double[] first, double[] second, double[] error) {
   /** Kinds of coordinates. */

@@ -8,8 +8,8 @@ import org.archspan.units.UnitException;
 /**
  * The centre of a galaxy in the coordinates of a table.
  *
- * @param first  as the first coordinate of the table, rad or cm
- * @param second as the second, rad or cm
+ * @param first  as the first coordinate of the table, in rad; in cm, for positions in the plane
+ * @param second as the second, in rad; in cm, for positions in the plane
  */
 public record SkyCentre(double first, double second) {
   /** The origin of offsets. */

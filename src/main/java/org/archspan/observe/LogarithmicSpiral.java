@@ -5,7 +5,8 @@ package org.archspan.observe;
  * {@code ds^2 = r^2 (dphi^2 + d(ln r)^2)}, distances there are distances over the radius.
  *
  * @param pitchAngle      p, rad; positive where the radius grows with azimuth, not 0
- * @param offset          of the line {@code ln(r/referenceRadius) cos p - phi sin p = offset}, dimensionless
+ * @param offset          distance of the straight line from the origin, dimensionless; on it
+ *                        {@code ln(r/referenceRadius) cos p - phi sin p} has this value
  * @param referenceRadius any length, positive, cm
  */
 public record LogarithmicSpiral(double pitchAngle, double offset, double referenceRadius) {

@@ -13,9 +13,9 @@ import org.apache.commons.math3.optim.univariate.UnivariateObjectiveFunction;
  *
  * <p>Source: Rayleigh (1880), Phil. Mag. 10, 73; Mardia &amp; Jupp (2000), Directional Statistics, section 6.3.
  *
- * @param lowest  frequency, cycles per unit of the positions, in units of the inverse of that unit, positive
- * @param step    of the grid, in the same units
- * @param size    number of frequencies
+ * @param lowest frequency, positive, cm^-1
+ * @param step   between frequencies, cm^-1
+ * @param size   number of frequencies
  */
 public record RayleighPeriodogram(double lowest, double step, int size) {
   private static final int PER_RESOLUTION = 10;
