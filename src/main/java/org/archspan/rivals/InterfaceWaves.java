@@ -108,13 +108,14 @@ public final class InterfaceWaves {
   /** Wavelength that neither grows nor falls, depths included, cm; NaN where there is none. */
   public double cutoff() {
     double deep = 2.0 * Math.PI / deepCutoff();
-    if (!(deep > 0.0)) {
+    double scale = deep > 0.0 ? deep : 2.0 * Math.PI / Math.min(layers.depthBelow(), layers.depthAbove());
+    if (!(scale > 0.0)) {
       return Double.NaN;
     }
-    // walls stiffen tension and gravity's inertia alike: the change of sign may move far to long waves
+    // walls change inertia and tension: the change of sign may move far to long waves, or exist only because of them
     double step = Math.exp(-1.0);
-    boolean shortGrow = growthRateSquared(1e6 * deep) > 0.0;
-    for (double k = 1e6 * deep; k > 1e-8 * deep; k *= step) {
+    boolean shortGrow = growthRateSquared(1e6 * scale) > 0.0;
+    for (double k = 1e6 * scale; k > 1e-8 * scale; k *= step) {
       if (growthRateSquared(k * step) > 0.0 != shortGrow) {
         double root = new BrentSolver(1e-14, 1e-14).solve(500, x -> growthRateSquared(Math.exp(x)) / Math.exp(2.0 * x),
             Math.log(k * step), Math.log(k));

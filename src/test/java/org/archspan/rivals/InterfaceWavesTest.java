@@ -120,4 +120,18 @@ class InterfaceWavesTest {
     assertThat(new InterfaceWaves(layers(1, 3, 0.1, 0.1, 0.5, 1, 10, 10)).growthRateSquared(4.0))
         .isCloseTo(deep, within(1e-13));
   }
+
+  /** Tension below holds the shear of deep layers; a shallow layer without field above is heavy to long waves,
+   * which grow. */
+  @Test
+  void wallsMayLetLongWavesGrow() {
+    LayerInterface shallowAbove = layers(1, 1, 1, 0, Math.sqrt(1.9), 0, 10, 0.1);
+    InterfaceWaves waves = new InterfaceWaves(shallowAbove);
+    assertThat(waves.deepCutoff()).isNaN();
+    assertThat(waves.unbounded()).isFalse();
+    // r1 = 1, r2 = coth(0.1 k) = y, 10 k far above 1: 1.9 y/(1 + y) = 1, y = 10/9, k = 10 artanh(0.9) = 5 ln 19;
+    // 1e-9: the root finder's
+    assertThat(2.0 * Math.PI / waves.cutoff()).isCloseTo(5.0 * Math.log(19.0), within(1e-9));
+    assertThat(waves.fastest()).isGreaterThan(waves.cutoff());
+  }
 }
