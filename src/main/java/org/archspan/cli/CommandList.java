@@ -21,6 +21,7 @@ final class CommandList {
     commands.put("infer", InferCommand::new);
     commands.put("observe", ObserveCommand::new);
     commands.put("rivals", RivalsCommand::new);
+    commands.put("amplify", AmplifyCommand::new);
     commands.put("check", CheckCommand::new);
     commands.put("models", ModelsCommand::new);
     commands.put("manual", ManualCommand::new);

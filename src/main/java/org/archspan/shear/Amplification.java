@@ -45,6 +45,25 @@ public record Amplification(Parity parity, double wavenumber, double shear, doub
     return peak() == time.length - 1;
   }
 
+  /**
+   * Time at which the density contrast first reaches one, where linear theory ends, s; NaN where it never does.
+   *
+   * @param initialMach root mean square by mass of the velocity at the start over the isothermal speed, dimensionless
+   */
+  public double timeToUnitContrast(double initialMach) {
+    for (int i = 0; i < time.length; i++) {
+      if (initialMach * densityContrast[i] >= 1.0) {
+        return time[i];
+      }
+    }
+    return Double.NaN;
+  }
+
+  /** Span of time that is followed, s. */
+  public double duration() {
+    return time[time.length - 1];
+  }
+
   /** Growth rate of the amplitude over the last tenth of the time, s^-1. */
   public double lateGrowth() {
     int last = time.length - 1;

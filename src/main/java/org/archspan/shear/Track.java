@@ -2,6 +2,9 @@ package org.archspan.shear;
 
 /** A wave followed from a motion at the start, in units of its column. */
 final class Track {
+  /** Enough for a curve and for the time of a peak; the steps themselves may be thousands. */
+  private static final int MOST_SAMPLES = 400;
+
   private final WindingWave winding;
   private final double step;
   private final double start;
@@ -43,11 +46,20 @@ final class Track {
     return winding;
   }
 
-  /** Times, s. */
+  /** The step of a sample: all of them, or an even choice that keeps both ends. */
+  private int at(int sample) {
+    return (int) Math.round((double) sample * (energy.length - 1) / (samples() - 1));
+  }
+
+  private int samples() {
+    return Math.min(energy.length, MOST_SAMPLES + 1);
+  }
+
+  /** Times of the samples, s. */
   double[] times() {
-    double[] times = new double[energy.length];
+    double[] times = new double[samples()];
     for (int i = 0; i < times.length; i++) {
-      times[i] = i * step * winding.column().time;
+      times[i] = at(i) * step * winding.column().time;
     }
     return times;
   }
@@ -55,9 +67,9 @@ final class Track {
   /** Radial over azimuthal wavenumber at the times, dimensionless. */
   double[] windings() {
     double kx = winding.column().kx;
-    double[] windings = new double[energy.length];
+    double[] windings = new double[samples()];
     for (int i = 0; i < windings.length; i++) {
-      windings[i] = -start / kx - winding.flow().shear() * i * step;
+      windings[i] = -start / kx - winding.flow().shear() * at(i) * step;
     }
     return windings;
   }
@@ -73,9 +85,9 @@ final class Track {
   }
 
   private double[] roots(double[] halfSquares) {
-    double[] roots = new double[halfSquares.length];
+    double[] roots = new double[samples()];
     for (int i = 0; i < roots.length; i++) {
-      roots[i] = Math.sqrt(halfSquares[i] / energy[0]);
+      roots[i] = Math.sqrt(halfSquares[at(i)] / energy[0]);
     }
     return roots;
   }
