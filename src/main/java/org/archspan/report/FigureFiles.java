@@ -45,6 +45,7 @@ public final class FigureFiles {
   /** One mode. */
   public void mode(EigenMode mode, Equilibrium equilibrium, Table table, OutputUnits units) throws WriteException {
     new OutputFolder().table("mode", table).figure("mode", new ModeFigure(mode, units, FigureStyle.journal()))
+        .figure("drivers", Drivers.figure(mode.work(), FigureStyle.journal()))
         .write(folder, overwrite);
   }
 

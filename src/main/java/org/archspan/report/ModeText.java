@@ -2,12 +2,10 @@ package org.archspan.report;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import org.archspan.boundary.Parity;
 import org.archspan.disk.Disk;
 import org.archspan.equilibrium.Equilibrium;
 import org.archspan.stability.EigenMode;
-import org.archspan.stability.WorkTerms;
 import org.archspan.units.OutputUnits;
 
 /** One mode in words and a short table. */
@@ -44,26 +42,10 @@ public final class ModeText {
   }
 
   private static List<List<String>> work(EigenMode mode) {
-    double square = mode.growthRate() * mode.growthRate();
     List<List<String>> rows = new ArrayList<>();
     rows.add(List.of("term", "share", ""));
-    WorkTerms work = mode.work();
-    rows.add(term("weight of gas that sinks and is compressed", work.weight(), square));
-    rows.add(term("stratification", work.stratification(), square));
-    rows.add(term("tension of the field", work.fieldTension(), square));
-    rows.add(term("compression of the field", work.fieldCompression(), square));
-    rows.add(term("compression of the gas", work.gasCompression(), square));
-    rows.add(term("compression of the cosmic rays", work.cosmicRayCompression(), square));
-    if (work.topSurface() != 0.0) {
-      rows.add(term("free surface at the top", work.topSurface(), square));
-    }
+    Drivers.of(mode.work()).forEach(term -> rows.add(List.of(term.name(), term.words(), term.verdict())));
     return rows;
-  }
-
-  private static List<String> term(String name, double value, double square) {
-    double share = value / square;
-    String verdict = Math.abs(share) < 5e-4 ? "" : share > 0.0 ? "drives" : "resists";
-    return List.of(name, String.format(Locale.ROOT, "%+.3f", share == 0.0 ? 0.0 : share), verdict);
   }
 
   private static List<List<String>> rows(EigenMode mode, OutputUnits units) {

@@ -61,13 +61,14 @@ public final class ResultJson {
         .put("column-contrast", mode.columnContrast()).put("work", work(mode.work(), units)).put("profile", columns(table)).text();
   }
 
-  private static Json work(WorkTerms work, OutputUnits units) {
+  static Json work(WorkTerms work, OutputUnits units) {
     double square = units.secondsPerTime() * units.secondsPerTime();
     return new Json().put("unit", "1/" + units.time() + "^2")
         .put("weight", work.weight() * square).put("stratification", work.stratification() * square)
         .put("field-tension", work.fieldTension() * square).put("field-compression", work.fieldCompression() * square)
         .put("gas-compression", work.gasCompression() * square)
         .put("cosmic-ray-compression", work.cosmicRayCompression() * square)
+        .put("self-gravity", work.selfGravity() * square)
         .put("top-surface", work.topSurface() * square).put("sum", work.sum() * square);
   }
 

@@ -76,6 +76,8 @@ public final class SpacingFiles {
   private void mode(EigenMode mode, OutputFolder output, ReportPage page, FigureStyle style) {
     output.table("mode", ModeTable.of(mode, units)).figure("mode", new ModeFigure(mode, units, style));
     page.figure("Mode that sets the spacing", output.content("mode.svg"));
+    output.figure("drivers", Drivers.figure(mode.work(), style));
+    page.figure("What drives it, and what resists it", output.content("drivers.svg"));
   }
 
   private GrowthFigure growthFigure(List<GrowthCurve> curves, FigureStyle style) {

@@ -68,6 +68,7 @@ public final class SpacingJson {
         .put("centroid-height", units.length(peak.centroidHeight()), units.length())
         .put("column-contrast", peak.columnContrast())
         .put("held-by", peak.heldBy().name().toLowerCase(Locale.ROOT))
+        .put("work", peak.work().map(work -> ResultJson.work(work, units)).orElse(null))
         .put("taller-domain", new Json().put("growth-rate-change", peak.tallerGrowthChange())
             .put("wavelength-change", peak.tallerWavelengthChange()));
   }

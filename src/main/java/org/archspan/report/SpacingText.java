@@ -62,6 +62,8 @@ public final class SpacingText {
     block.sentence(sentence(result, units));
     result.complex().ifPresent(this::complex);
     result.rotation().ifPresent(this::rotation);
+    result.drivenPeak().flatMap(BranchPeak::work).ifPresent(work -> block.sentence(
+        (result.rotation().isPresent() ? "What drives it without rotation. " : "") + Drivers.sentence(work)));
     BranchPeak peak = result.spacingPeak().orElseThrow();
     if (peak.heldBy() == HeldBy.DISK) {
       block.sentence("In a domain 1.5 times as tall its wavelength changes by "

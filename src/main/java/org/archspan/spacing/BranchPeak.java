@@ -1,6 +1,8 @@
 package org.archspan.spacing;
 
+import java.util.Optional;
 import org.archspan.boundary.Parity;
+import org.archspan.stability.WorkTerms;
 
 /**
  * The fastest mode of one unstable branch (parity and mode order), CGS.
@@ -23,16 +25,18 @@ import org.archspan.boundary.Parity;
  *                            NaN when not computed
  * @param tallerWavelengthChange the same for the wavelength, dimensionless
  * @param frequency           of oscillation while it grows, s^-1; 0 without rotation, and for most modes with it
+ * @param work                what drives the mode and what resists it; empty for the continuum, and with rotation
  */
 public record BranchPeak(Parity parity, int order, double wavenumber, double crossWavenumber, double growthRate,
     double growthError, double wavelengthError, int unstableModes, double centroidHeight, double columnContrast,
-    HeldBy heldBy, double tallerGrowthChange, double tallerWavelengthChange, double frequency) {
-  /** A mode that does not oscillate. */
+    HeldBy heldBy, double tallerGrowthChange, double tallerWavelengthChange, double frequency,
+    Optional<WorkTerms> work) {
+  /** A mode that does not oscillate, or a continuum. */
   public BranchPeak(Parity parity, int order, double wavenumber, double crossWavenumber, double growthRate,
       double growthError, double wavelengthError, int unstableModes, double centroidHeight, double columnContrast,
-      HeldBy heldBy, double tallerGrowthChange, double tallerWavelengthChange) {
+      HeldBy heldBy, double tallerGrowthChange, double tallerWavelengthChange, Optional<WorkTerms> work) {
     this(parity, order, wavenumber, crossWavenumber, growthRate, growthError, wavelengthError, unstableModes,
-        centroidHeight, columnContrast, heldBy, tallerGrowthChange, tallerWavelengthChange, 0.0);
+        centroidHeight, columnContrast, heldBy, tallerGrowthChange, tallerWavelengthChange, 0.0, work);
   }
 
 

@@ -53,7 +53,7 @@ final class DomainInfluence {
     double wavelengthChange = other.map(point -> edge.wavenumber() / point.wavenumber() - 1.0).orElse(Double.NaN);
     return new BranchPeak(parity, 0, edge.wavenumber(), crossWavenumber, edge.growthRate(),
         edge.relativeError() + Math.abs(growthChange), edge.relativeError() + Math.abs(wavelengthChange), -1,
-        Double.POSITIVE_INFINITY, Double.NaN, HeldBy.HALO, growthChange, wavelengthChange);
+        Double.POSITIVE_INFINITY, Double.NaN, HeldBy.HALO, growthChange, wavelengthChange, Optional.empty());
   }
 
   /** Every peak with what holds it. */
@@ -82,7 +82,7 @@ final class DomainInfluence {
         peak.growthError() + (truncated ? Math.abs(growthChange) : 0.0),
         peak.wavelengthError() + (truncated ? Math.abs(wavelengthChange) : 0.0), peak.unstableModes(),
         peak.mode().centroidHeight(), peak.mode().columnContrast(), heldBy(peak, lid), growthChange,
-        wavelengthChange);
+        wavelengthChange, Optional.of(peak.mode().work()));
   }
 
   /** A branch that still rises where it ends in the continuum above an open top is held by neither disk nor lid. */

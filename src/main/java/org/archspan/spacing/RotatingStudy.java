@@ -134,7 +134,7 @@ final class RotatingStudy {
     return new BranchPeak(parity, order, mode.wavenumber(), without.range().crossWavenumber(), mode.growthRate(),
         mode.growthError(), WAVELENGTH_ERROR, count.number(), branch.solver().centroidHeight(mode),
         branch.solver().columnContrast(mode), held ? HeldBy.DISK : HeldBy.LID, growthChange, wavelengthChange,
-        mode.frequency());
+        mode.frequency(), Optional.empty());
   }
 
   private Optional<RotatingMode> inTallerDomain(Parity parity, RotatingMode mode) {

@@ -46,4 +46,9 @@ public record SpacingResult(Equilibrium equilibrium, double forceBalanceResidual
   public Optional<BranchPeak> spacingPeak() {
     return spacing.map(branches::get).or(() -> fastest);
   }
+
+  /** The peak whose drivers are known: that of the spacing, without rotation. */
+  public Optional<BranchPeak> drivenPeak() {
+    return rotation.map(RotatingAnswer::without).orElse(this).spacingPeak();
+  }
 }
