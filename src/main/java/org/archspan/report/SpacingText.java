@@ -88,6 +88,11 @@ public final class SpacingText {
   }
 
   private void stable() {
+    if (result.rotation().isPresent()) {
+      block.sentence("Stable, as far as was searched, by its rotation.");
+      result.rotation().ifPresent(this::rotation);
+      return;
+    }
     block.sentence("Stable: no wave " + whose() + " grows" + range() + ".");
     if (result.acrossLimit().growthRate() > 0.0) {
       block.sentence("Shorter waves across the field do grow: infinitely short ones in "
@@ -160,8 +165,8 @@ public final class SpacingText {
     String spin = " (" + Numbers.plain(rotation.angularSpeed() * 1e3 * Constants.PARSEC / 1e5) + " km/s/kpc)";
     result.spacingPeak().filter(peak -> peak.frequency() > 0.0).ifPresent(peak -> block.sentence(
         "It oscillates while it grows, with a period of " + Numbers.time(2.0 * Math.PI / peak.frequency(), units) + "."));
-    rotation.without().spacingPeak().ifPresent(still -> block.sentence("All this is with rotation" + spin
-        + "; without it the wavelength would be " + Numbers.length(still.wavelength(), still.wavelengthError(), units)
+    rotation.without().spacingPeak().ifPresent(still -> block.sentence((result.stable() ? "That is with rotation"
+        : "All this is with rotation") + spin + "; without it the wavelength would be " + Numbers.length(still.wavelength(), still.wavelengthError(), units)
         + " and the growth time " + Numbers.time(still.growthTime(), still.growthError(), units) + "."));
   }
 
@@ -182,6 +187,12 @@ public final class SpacingText {
 
   private void sure() {
     block.heading("How sure");
+    if (result.stable() && result.rotation().isPresent()) {
+      block.sentence("Without rotation the gas is unstable. With it the argument principle counts no mode that grows faster than"
+          + " a twentieth of the fastest without, at " + result.rotation().get().checkedWavelengths()
+          + " wavelengths over the range; slower growth, and waves between those, are not excluded.");
+      return;
+    }
     if (result.stable()) {
       block.sentence("Proved by counting: the number of growing modes, which cannot rise towards shorter waves along the"
           + " field, is zero already for the longest.");
