@@ -1,5 +1,7 @@
 package org.archspan.report;
 
+import java.util.LinkedHashMap;
+import java.util.Map;
 import org.archspan.observe.ChanceProbability;
 import org.archspan.observe.FittedArm;
 import org.archspan.observe.MeasuredLength;
@@ -15,7 +17,7 @@ public final class ObservationJson {
 
   /** The document. */
   public static String text(ObservationSource source, ObservedArm arm, OutputUnits units) {
-    return new Json().put("table", source.file()).put("geometry", source.geometry()).put("seed", source.seed())
+    return new Json().put("table", source.file()).put("geometry", geometry(source)).put("seed", source.seed())
         .put("summary", ObservationText.sentence(arm, units))
         .put("spacing", length(arm.peak().wavelength(), units).put("method", "periodogram")
             .put("p-value", arm.chance().peak().value()))
@@ -54,5 +56,12 @@ public final class ObservationJson {
   private static Json length(MeasuredLength length, OutputUnits units) {
     return new Json().put("value", units.length(length.value())).put("unit", units.length())
         .put("error", units.length(length.error()));
+  }
+
+  /** The geometry with the keys of the options, where the summary shortens them. */
+  private static Map<String, String> geometry(ObservationSource source) {
+    Map<String, String> keys = new LinkedHashMap<>();
+    source.geometry().forEach((key, value) -> keys.put(key.equals("pos. angle") ? "position-angle" : key, value));
+    return keys;
   }
 }
