@@ -6,6 +6,7 @@ import org.archspan.modelfile.Model;
 import org.archspan.report.SpacingJson;
 import org.archspan.report.SpacingText;
 import org.archspan.report.SpacingFiles;
+import org.archspan.spacing.ElasticityStudy;
 import org.archspan.spacing.SpacingResult;
 import org.archspan.spacing.SpacingStudy;
 import picocli.CommandLine.Command;
@@ -17,7 +18,9 @@ import picocli.CommandLine.Command;
 final class SpacingCommand extends ModelCommand {
   @Override
   void solve(Model model) throws IOException {
-    SpacingResult result = solved(model.disk(), model);
+    SpacingResult solved = solved(model.disk(), model);
+    SpacingResult result =
+        solved.with(new ElasticityStudy(model.disk(), model.options(), solved).of(model.numbers()));
     if (common.out != null) {
       String text = SpacingText.text(model.title(), model.disk(), result, model.units(), 88);
       new SpacingFiles(result, model.disk(), model.options(), model.units()).write(common.out,

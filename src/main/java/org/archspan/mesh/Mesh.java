@@ -37,6 +37,22 @@ public record Mesh(double[] edges, int degree) {
     return nodes;
   }
 
+  /** The derivative of a function on the nodes, per unit of the edges, shape of the nodes. O(elements * degree^2). */
+  public double[] slopes(double[] values) {
+    double[] derivative = reference().derivative();
+    int n = degree + 1;
+    double[] slopes = new double[values.length];
+    for (int i = 0; i < values.length; i++) {
+      int e = i / n;
+      double sum = 0.0;
+      for (int j = 0; j < n; j++) {
+        sum += derivative[(i - e * n) * n + j] * values[e * n + j];
+      }
+      slopes[i] = 2.0 / length(e) * sum;
+    }
+    return slopes;
+  }
+
   /** The same elements with another degree. */
   public Mesh withDegree(int newDegree) {
     return new Mesh(edges, newDegree);

@@ -45,6 +45,14 @@ final class Inputs {
     return changed;
   }
 
+  /** The same inputs with one number times a factor (dimensionless), and no faults yet. */
+  Inputs scaled(String key, double factor) {
+    Inputs changed = new Inputs(this);
+    changed.values.put(key, values.get(key) instanceof Height height
+        ? new Height(factor * height.value(), height.inScaleHeights()) : (Object) (factor * number(key).orElseThrow()));
+    return changed;
+  }
+
   Entry entry(String key) {
     return entries.get(key);
   }
@@ -98,6 +106,11 @@ final class Inputs {
 
   Optional<String> text(String key) {
     return values.get(key) instanceof String text ? Optional.of(text) : Optional.empty();
+  }
+
+  /** The keys that hold numbers, in the order in which they were read. */
+  List<String> numericKeys() {
+    return values.keySet().stream().filter(key -> !(values.get(key) instanceof String)).toList();
   }
 
   Optional<Height> height(String key) {

@@ -88,6 +88,7 @@ public final class ModelReader {
     inputs.entries().forEach((key, entry) -> given.put(key, String.valueOf(entry.value())));
     return new Model(source, inputs.text("title").orElse(source), central.disk(), central.options(), central.arm(),
         new RivalReader(inputs).read(gravity), new SurroundingsReader(inputs).units(), given, inputs.uncertainties(),
-        new UncertainModel(inputs, folder, gravity, tolerance));
+        new UncertainModel(inputs, folder, gravity, tolerance),
+        new ModelInputs(inputs, folder, gravity, tolerance).list());
   }
 }

@@ -4,7 +4,6 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
-import java.util.stream.Collectors;
 import org.archspan.disk.RefusedModelException;
 import org.archspan.gravity.GravityLaw;
 import org.archspan.uncertainty.UncertainInput;
@@ -66,17 +65,6 @@ public final class UncertainModel {
    * @throws RefusedModelException when they do not make a model
    */
   public DrawnModel with(double[] values) {
-    Inputs drawn = inputs.with(keys, values);
-    try {
-      DrawnModel model =
-          DrawnModel.of(drawn, gravityVaries ? new GravityReader(drawn, folder).laws() : gravity, tolerance);
-      if (drawn.faults().isEmpty()) {
-        return model;
-      }
-    } catch (UnreadableFileException gone) {
-      throw new RefusedModelException(gone.getMessage());
-    }
-    throw new RefusedModelException(
-        drawn.faults().stream().map(Diagnostic::toString).collect(Collectors.joining("; ")));
+    return DrawnModel.of(inputs.with(keys, values), folder, gravityVaries ? List.of() : gravity, tolerance);
   }
 }

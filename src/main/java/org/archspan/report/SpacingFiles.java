@@ -12,6 +12,7 @@ import org.archspan.figure.GrowthFigure;
 import org.archspan.figure.ModeFigure;
 import org.archspan.spacing.Arm;
 import org.archspan.spacing.BranchPeak;
+import org.archspan.spacing.Elasticities;
 import org.archspan.spacing.GrowthCurves;
 import org.archspan.spacing.ModeStudy;
 import org.archspan.spacing.SearchOptions;
@@ -20,9 +21,11 @@ import org.archspan.stability.EigenMode;
 import org.archspan.stability.GrowthCurve;
 import org.archspan.stability.GrowthPoint;
 import org.archspan.table.BranchTable;
+import org.archspan.table.ElasticityTable;
 import org.archspan.table.EquilibriumTable;
 import org.archspan.table.GrowthTable;
 import org.archspan.table.ModeTable;
+import org.archspan.table.Table;
 import org.archspan.table.WriteException;
 import org.archspan.units.OutputUnits;
 
@@ -56,8 +59,17 @@ public final class SpacingFiles {
     new ModeStudy(disk, result.equilibrium(), options, Arm.unknown()).spacingMode(result)
         .ifPresent(mode -> mode(mode, output, page, style));
     page.table("Base state", EquilibriumTable.of(result.equilibrium(), PRINTED_ROWS, units));
+    result.elasticities().ifPresent(answers -> elasticities(answers, output, page));
     output.text("report.html", page.html(model, SpacingText.sentence(result, units), summary));
     output.write(folder, overwrite);
+  }
+
+  private static void elasticities(Elasticities answers, OutputFolder output, ReportPage page) {
+    Table table = ElasticityTable.of(answers);
+    output.table("elasticities", table);
+    if (table.rows() > 0) {
+      page.table("Per cent of change for each per cent of an input", table);
+    }
   }
 
   private void growth(OutputFolder output, ReportPage page, FigureStyle style) {

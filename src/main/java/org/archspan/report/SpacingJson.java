@@ -47,6 +47,7 @@ public final class SpacingJson {
     json.put("certificate", certificate(result.certificate()));
     result.rotation().ifPresent(rotation -> json.put("rotation", rotation(rotation))
         .put("without-rotation", without(rotation.without())));
+    result.elasticities().ifPresent(answers -> json.put("elasticities", ElasticityWords.json(answers)));
     json.put("warnings", result.warnings());
     return json;
   }

@@ -37,6 +37,7 @@ public final class SpacingText {
     Assumptions.of(disk, result.equilibrium(), result.range(), units).forEach(text.block::labelled);
     text.baseState();
     text.found();
+    result.elasticities().filter(answers -> !result.stable()).ifPresent(answers -> ElasticityWords.write(answers, text.block));
     text.sure();
     text.limits();
     return text.block.text();

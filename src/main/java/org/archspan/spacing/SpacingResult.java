@@ -23,18 +23,35 @@ import org.archspan.equilibrium.Equilibrium;
  * @param gatheringHeight         greatest centroid height that counts as gathering the disk's own gas, cm
  * @param warnings                what a reader of the result must know, one sentence each
  * @param rotation                how modes were counted under rotation, and the result without it; empty without rotation
+ * @param elasticities            how the spacing answers each input; empty where that was not asked
  */
 public record SpacingResult(Equilibrium equilibrium, double forceBalanceResidual, WaveRange range, List<BranchPeak> branches,
     Optional<BranchPeak> fastest, Optional<Integer> spacing, AcrossLimit acrossLimit,
     OptionalDouble longestStableWavelength, Optional<CloudComplex> complex, Certificate certificate,
-    double gatheringHeight, List<String> warnings, Optional<RotatingAnswer> rotation) {
+    double gatheringHeight, List<String> warnings, Optional<RotatingAnswer> rotation,
+    Optional<Elasticities> elasticities) {
+  /** Without elasticities. */
+  public SpacingResult(Equilibrium equilibrium, double forceBalanceResidual, WaveRange range, List<BranchPeak> branches,
+      Optional<BranchPeak> fastest, Optional<Integer> spacing, AcrossLimit acrossLimit,
+      OptionalDouble longestStableWavelength, Optional<CloudComplex> complex, Certificate certificate,
+      double gatheringHeight, List<String> warnings, Optional<RotatingAnswer> rotation) {
+    this(equilibrium, forceBalanceResidual, range, branches, fastest, spacing, acrossLimit, longestStableWavelength,
+        complex, certificate, gatheringHeight, warnings, rotation, Optional.empty());
+  }
 
   /** The same result with one more warning. */
   public SpacingResult warned(String warning) {
     List<String> more = new ArrayList<>(warnings);
     more.add(warning);
     return new SpacingResult(equilibrium, forceBalanceResidual, range, branches, fastest, spacing, acrossLimit,
-        longestStableWavelength, complex, certificate, gatheringHeight, List.copyOf(more), rotation);
+        longestStableWavelength, complex, certificate, gatheringHeight, List.copyOf(more), rotation,
+        elasticities);
+  }
+
+  /** The same result with elasticities. */
+  public SpacingResult with(Elasticities newElasticities) {
+    return new SpacingResult(equilibrium, forceBalanceResidual, range, branches, fastest, spacing, acrossLimit,
+        longestStableWavelength, complex, certificate, gatheringHeight, warnings, rotation, Optional.of(newElasticities));
   }
 
   /** Whether no wave grows. */

@@ -90,7 +90,7 @@ class CommandsTest {
     try (Stream<Path> files = Files.list(out)) {
       assertThat(files.map(file -> file.getFileName().toString())).containsExactlyInAnyOrder("summary.json",
           "summary.txt", "equilibrium.ecsv", "equilibrium.svg", "equilibrium.png", "growth.ecsv", "growth.svg",
-          "growth.png", "branches.ecsv", "mode.ecsv", "mode.svg", "mode.png",
+          "growth.png", "branches.ecsv", "elasticities.ecsv", "mode.ecsv", "mode.svg", "mode.png",
           "drivers.svg", "drivers.png", "report.html");
     }
     byte[] before = Files.readAllBytes(out.resolve("summary.json"));
