@@ -58,13 +58,8 @@ public final class AmplificationFigure implements Figure {
 
   @Override
   public void draw(Graphics2D graphics, Rectangle2D area) {
-    graphics.setPaint(style.background());
-    graphics.fill(area);
-    double left = SHARE * area.getWidth();
-    Plots.chart(growth(), true, style).draw(graphics,
-        new Rectangle2D.Double(area.getX(), area.getY(), left, area.getHeight()));
-    Plots.chart(wave.starts().size() > 1 ? starts() : winding(), true, style).draw(graphics,
-        new Rectangle2D.Double(area.getX() + left, area.getY(), area.getWidth() - left, area.getHeight()));
+    Plots.column(growth(), true, style, graphics, area, 0.0, SHARE);
+    Plots.column(wave.starts().size() > 1 ? starts() : winding(), true, style, graphics, area, SHARE, 1.0);
   }
 
   private double[] times() {

@@ -67,8 +67,6 @@ public final class ComparisonCurves implements Figure {
 
   @Override
   public void draw(Graphics2D graphics, Rectangle2D area) {
-    graphics.setPaint(style.background());
-    graphics.fill(area);
     String massUnit = (massScale == 0 ? "" : "10" + DecadeAxis.superscript(massScale) + " ")
         + (massive() ? units.mass() : units.mass() + "/" + units.length());
     panel(graphics, area, 0, 0.36, "wavelength (" + units.length() + ")", result -> peak(result,

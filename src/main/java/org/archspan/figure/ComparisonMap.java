@@ -74,8 +74,6 @@ public final class ComparisonMap implements Figure {
 
   @Override
   public void draw(Graphics2D graphics, Rectangle2D area) {
-    graphics.setPaint(style.background());
-    graphics.fill(area);
     graphics.setPaint(style.ink());
     graphics.setFont(style.smallFont());
     graphics.drawString(MARKS, (float) area.getX() + 6f, (float) (area.getY() + KEY - 3.0));

@@ -68,16 +68,11 @@ public final class EnsembleFigure implements Figure {
 
   @Override
   public void draw(Graphics2D graphics, Rectangle2D area) {
-    graphics.setPaint(style.background());
-    graphics.fill(area);
-    double third = driven() ? 0.3 * area.getWidth() : 0.5 * area.getWidth();
-    Plots.chart(histogram(), false, style).draw(graphics,
-        new Rectangle2D.Double(area.getX(), area.getY(), third, area.getHeight()));
-    Plots.chart(joint(), false, style).draw(graphics,
-        new Rectangle2D.Double(area.getX() + third, area.getY(), third, area.getHeight()));
+    double share = driven() ? 0.3 : 0.5;
+    Plots.column(histogram(), false, style, graphics, area, 0.0, share);
+    Plots.column(joint(), false, style, graphics, area, share, 2.0 * share);
     if (driven()) {
-      Plots.chart(drivers(), true, style).draw(graphics, new Rectangle2D.Double(area.getX() + 2.0 * third, area.getY(),
-          area.getWidth() - 2.0 * third, area.getHeight()));
+      Plots.column(drivers(), true, style, graphics, area, 2.0 * share, 1.0);
     }
   }
 

@@ -49,9 +49,7 @@ public final class FigureImage {
     graphics.setRenderingHint(RenderingHints.KEY_STROKE_CONTROL, RenderingHints.VALUE_STROKE_PURE);
     graphics.setRenderingHint(RenderingHints.KEY_INTERPOLATION, RenderingHints.VALUE_INTERPOLATION_BICUBIC);
     graphics.scale(scale, scale);
-    graphics.setPaint(figure.background());
-    graphics.fill(new Rectangle2D.Double(0.0, 0.0, figure.width() + 1.0, figure.height() + 1.0));
-    figure.draw(graphics, area(figure));
+    page(figure, graphics);
     graphics.dispose();
     try {
       return encoded(image);
@@ -60,8 +58,11 @@ public final class FigureImage {
     }
   }
 
-  private static Rectangle2D area(Figure figure) {
-    return new Rectangle2D.Double(0.0, 0.0, figure.width(), figure.height());
+  /** The figure on a page of its colour, which reaches to the last, broken dot. */
+  private static void page(Figure figure, Graphics2D graphics) {
+    graphics.setPaint(figure.background());
+    graphics.fill(new Rectangle2D.Double(0.0, 0.0, figure.width() + 1.0, figure.height() + 1.0));
+    figure.draw(graphics, new Rectangle2D.Double(0.0, 0.0, figure.width(), figure.height()));
   }
 
   private static byte[] encoded(BufferedImage image) throws IOException {
@@ -99,7 +100,7 @@ public final class FigureImage {
     context.setImageHandler(new EmbeddedImages());
     SVGGraphics2D graphics = new SVGGraphics2D(context, false);
     graphics.setSVGCanvasSize(new java.awt.Dimension((int) Math.ceil(figure.width()), (int) Math.ceil(figure.height())));
-    figure.draw(graphics, area(figure));
+    page(figure, graphics);
     StringWriter text = new StringWriter();
     try {
       graphics.stream(text, false);

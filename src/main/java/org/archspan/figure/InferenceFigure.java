@@ -62,13 +62,8 @@ public final class InferenceFigure implements Figure {
 
   @Override
   public void draw(Graphics2D graphics, Rectangle2D area) {
-    graphics.setPaint(style.background());
-    graphics.fill(area);
-    double half = 0.5 * area.getWidth();
-    Plots.chart(relation(), true, style).draw(graphics,
-        new Rectangle2D.Double(area.getX(), area.getY(), half, area.getHeight()));
-    Plots.chart(distribution(), true, style).draw(graphics,
-        new Rectangle2D.Double(area.getX() + half, area.getY(), half, area.getHeight()));
+    Plots.column(relation(), true, style, graphics, area, 0.0, 0.5);
+    Plots.column(distribution(), true, style, graphics, area, 0.5, 1.0);
   }
 
   private double value(DrawRow row) {

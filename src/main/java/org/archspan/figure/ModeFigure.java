@@ -74,8 +74,6 @@ public final class ModeFigure implements Figure {
 
   @Override
   public void draw(Graphics2D graphics, Rectangle2D area) {
-    graphics.setPaint(style.background());
-    graphics.fill(area);
     double greatest = greatestContrast();
     double w = area.getWidth();
     double h = area.getHeight();

@@ -70,8 +70,6 @@ public final class ObservationFigure implements Figure {
 
   @Override
   public void draw(Graphics2D graphics, Rectangle2D area) {
-    graphics.setPaint(style.background());
-    graphics.fill(area);
     double left = MAP * area.getWidth();
     double upper = STRIP * area.getHeight();
     panel(map(), graphics, new Rectangle2D.Double(area.getX(), area.getY(), left, area.getHeight()));

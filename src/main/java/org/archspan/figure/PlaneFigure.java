@@ -84,14 +84,10 @@ public final class PlaneFigure implements Figure {
 
   @Override
   public void draw(Graphics2D graphics, Rectangle2D area) {
-    graphics.setPaint(style.background());
-    graphics.fill(area);
     double w = area.getWidth();
     double h = area.getHeight();
-    Plots.chart(map(), false, style).draw(graphics,
-        new Rectangle2D.Double(area.getX(), area.getY(), 0.56 * w, h));
-    Plots.chart(limit(), false, style).draw(graphics,
-        new Rectangle2D.Double(area.getX() + 0.56 * w, area.getY(), 0.27 * w, h));
+    Plots.column(map(), false, style, graphics, area, 0.0, 0.56);
+    Plots.column(limit(), false, style, graphics, area, 0.56, 0.83);
     if (greatest > 0.0) {
       ColourBar.draw(graphics, new Rectangle2D.Double(area.getX() + 0.83 * w, area.getY(), 0.17 * w, h),
           ColourMap.SEQUENTIAL, 0.0, greatest, "growth rate (" + units.time() + "\u207b\u00b9)", style);

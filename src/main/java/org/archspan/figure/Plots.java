@@ -98,6 +98,13 @@ final class Plots {
     return chart;
   }
 
+  /** Draws a chart of a plot over a part of the width of an area, from one share of it (0 to 1) to another. */
+  static void column(Plot plot, boolean legend, FigureStyle style, Graphics2D graphics, Rectangle2D area, double from,
+      double to) {
+    chart(plot, legend, style).draw(graphics, new Rectangle2D.Double(area.getX() + from * area.getWidth(), area.getY(),
+        (to - from) * area.getWidth(), area.getHeight()));
+  }
+
   private static LegendTitle legend(Plot plot, FigureStyle style) {
     LegendTitle title = new LegendTitle(plot);
     title.setItemFont(style.smallFont());

@@ -50,8 +50,6 @@ public final class RivalFigure implements Figure {
 
   @Override
   public void draw(Graphics2D graphics, Rectangle2D area) {
-    graphics.setPaint(style.background());
-    graphics.fill(area);
     Plots.chart(plot(), true, style).draw(graphics, area);
   }
 
