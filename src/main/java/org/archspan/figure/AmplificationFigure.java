@@ -12,6 +12,7 @@ import org.archspan.shear.StartGain;
 import org.archspan.units.OutputUnits;
 import org.jfree.chart.axis.NumberAxis;
 import org.jfree.chart.axis.ValueAxis;
+import org.jfree.chart.plot.SeriesRenderingOrder;
 import org.jfree.chart.plot.XYPlot;
 import org.jfree.chart.renderer.xy.XYLineAndShapeRenderer;
 import org.jfree.data.xy.DefaultXYDataset;
@@ -117,10 +118,12 @@ public final class AmplificationFigure implements Figure {
           gains.stream().mapToDouble(StartGain::winding).toArray(),
           gains.stream().mapToDouble(StartGain::eFoldings).toArray()});
     }
-    XYPlot plot = Plots.plot(Plots.axis("k_R / k_az at the start", style),
+    XYPlot plot = Plots.plot(Plots.axis("radial / azimuthal wavenumber", style),
         Plots.axis("e-foldings gained", style), style);
     plot.setDataset(data);
     plot.setRenderer(lines(parities.size()));
+    // the dashed curve on top: where both gain the same it would hide behind the full one
+    plot.setSeriesRenderingOrder(SeriesRenderingOrder.FORWARD);
     return plot;
   }
 

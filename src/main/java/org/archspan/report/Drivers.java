@@ -51,9 +51,10 @@ final class Drivers {
     return terms;
   }
 
-  /** The bars. */
+  /** The bars; what does no work has none. */
   static DriverFigure figure(WorkTerms work, FigureStyle style) {
-    return new DriverFigure(of(work).stream().map(term -> new DriverFigure.Bar(term.name(), term.share())).toList(), style);
+    return new DriverFigure(of(work).stream().filter(term -> term.share() != 0.0)
+        .map(term -> new DriverFigure.Bar(term.name(), term.share())).toList(), style);
   }
 
   /** One sentence. */

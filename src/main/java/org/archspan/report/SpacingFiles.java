@@ -81,15 +81,20 @@ public final class SpacingFiles {
     }
     if (!result.stable()) {
       output.figure("growth", growthFigure(curves, style));
-      page.figure("Growth rate against wavelength", output.content("growth.svg"));
+      page.figure("Growth rate against wavelength" + still(), output.content("growth.svg"));
     }
   }
 
   private void mode(EigenMode mode, OutputFolder output, ReportPage page, FigureStyle style) {
     output.table("mode", ModeTable.of(mode, units)).figure("mode", new ModeFigure(mode, units, style));
-    page.figure("Mode that sets the spacing", output.content("mode.svg"));
+    page.figure("Mode that sets the spacing" + still(), output.content("mode.svg"));
     output.figure("drivers", Drivers.figure(mode.work(), style));
-    page.figure("What drives it, and what resists it", output.content("drivers.svg"));
+    page.figure("What drives it, and what resists it" + still(), output.content("drivers.svg"));
+  }
+
+  /** What a caption adds where the answer is with rotation and the drawing is not. */
+  private String still() {
+    return result.rotation().isPresent() ? ", without rotation" : "";
   }
 
   private GrowthFigure growthFigure(List<GrowthCurve> curves, FigureStyle style) {
@@ -97,9 +102,17 @@ public final class SpacingFiles {
         result.longestStableWavelength(), units, style);
   }
 
-  /** The mode that sets the spacing, and the fastest where that is another. */
+  /**
+   * The mode that sets the spacing, and the fastest where that is another; with rotation the mode that sets the spacing, and
+   * the one on the curves, which are without.
+   */
   private List<GrowthFigure.Mark> marks() {
     List<GrowthFigure.Mark> marks = new ArrayList<>();
+    if (result.rotation().isPresent()) {
+      result.spacingPeak().ifPresent(peak -> marks.add(mark("with rotation", peak)));
+      result.drivenPeak().ifPresent(peak -> marks.add(mark("without, as the curves", peak)));
+      return marks;
+    }
     result.spacing().map(result.branches()::get).ifPresent(peak -> marks.add(mark("sets the spacing", peak)));
     result.fastest().filter(peak -> !result.spacingPeak().equals(Optional.of(peak)) || marks.isEmpty())
         .ifPresent(peak -> marks.add(mark(peak.continuum() ? "continuum edge" : "fastest", peak)));
