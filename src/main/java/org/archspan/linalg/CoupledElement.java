@@ -23,11 +23,11 @@ public final class CoupledElement {
    *
    * @param n          number of nodes
    * @param derivative slopes at node q of the polynomial of node i, row-major [n][n]
-   * @param weights    of the quadrature on the nodes, shape [n]
+   * @param slopeGram  integrals of products of slopes, row-major [n][n]
    * @param pairFirst  first node of each packed pair in elimination order: inner nodes, left end, right end
    * @param pairSecond second node of each
    */
-  public CoupledElement(int n, double[] derivative, double[] weights, int[] pairFirst, int[] pairSecond) {
+  public CoupledElement(int n, double[] derivative, double[] slopeGram, int[] pairFirst, int[] pairSecond) {
     this.n = n;
     this.derivative = derivative;
     this.pairFirst = pairFirst;
@@ -43,9 +43,7 @@ public final class CoupledElement {
       int j = pairSecond[pair];
       firstBlock[pair] = packedIndex(position(i, 0), position(j, 0));
       secondBlock[pair] = packedIndex(position(i, 1), position(j, 1));
-      for (int q = 0; q < n; q++) {
-        gram[pair] += weights[q] * derivative[q * n + i] * derivative[q * n + j];
-      }
+      gram[pair] = slopeGram[i * n + j];
     }
     for (int i = 0; i < n; i++) {
       for (int j = 0; j < n; j++) {

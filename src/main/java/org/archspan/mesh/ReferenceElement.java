@@ -24,6 +24,7 @@ public final class ReferenceElement {
   private final double[] pairSlope;
   private final double[] pairSlopeReversed;
   private final double[] slopeProducts;
+  private final double[] slopeGram;
   private final double[] legendreTail;
 
   private ReferenceElement(int degree) {
@@ -47,6 +48,7 @@ public final class ReferenceElement {
       }
     }
     this.slopeProducts = products();
+    this.slopeGram = gram();
     this.legendreTail = tail();
   }
 
@@ -161,6 +163,24 @@ public final class ReferenceElement {
    */
   public double[] legendreTail() {
     return legendreTail;
+  }
+
+  /** Integrals of products of slopes, {@code Sum_q w_q D_qi D_qj}, row-major, shape [(p+1)(p+1)]. */
+  public double[] slopeGram() {
+    return slopeGram;
+  }
+
+  private double[] gram() {
+    int n = degree + 1;
+    double[] gram = new double[n * n];
+    for (int q = 0; q < n; q++) {
+      for (int i = 0; i < n; i++) {
+        for (int j = 0; j < n; j++) {
+          gram[i * n + j] += weights[q] * derivative[q * n + i] * derivative[q * n + j];
+        }
+      }
+    }
+    return gram;
   }
 
   private double[] tail() {

@@ -3,6 +3,7 @@ package org.archspan.spacing;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.EnumMap;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -44,8 +45,17 @@ final class RotatingStudy {
   private record Found(RotatingSolver solver, RotatingMode mode) {
   }
 
-  /** The peaks, fastest first. */
-  List<BranchPeak> branches() {
+  /**
+   * What was found.
+   *
+   * @param peaks  fastest first
+   * @param counts of all modes at the wavelength of each
+   */
+  record Branches(List<BranchPeak> peaks, Map<BranchPeak, RotatingCount> counts) {
+  }
+
+  /** Searches. */
+  Branches branches() {
     Map<Parity, RotatingSolver> solvers = new EnumMap<>(Parity.class);
     List<Found> found = new ArrayList<>();
     for (BranchPeak still : without.branches()) {
@@ -57,12 +67,14 @@ final class RotatingStudy {
     for (RotatingSolver solver : solvers.values()) {
       check(solver, found);
     }
-    List<BranchPeak> peaks = new ArrayList<>();
+    Map<BranchPeak, RotatingCount> counts = new LinkedHashMap<>();
     for (Found branch : found) {
-      peaks.add(judged(branch));
+      RotatingCount count = branch.solver().modes(branch.mode().wavenumber());
+      counts.put(judged(branch, count), count);
     }
-    peaks.sort(Comparator.comparingDouble(BranchPeak::growthRate).reversed());
-    return List.copyOf(peaks);
+    List<BranchPeak> peaks = counts.keySet().stream()
+        .sorted(Comparator.comparingDouble(BranchPeak::growthRate).reversed()).toList();
+    return new Branches(peaks, counts);
   }
 
   private RotatingSolver solver(Parity parity) {
@@ -121,9 +133,8 @@ final class RotatingStudy {
     return Double.NaN;
   }
 
-  private BranchPeak judged(Found branch) {
+  private BranchPeak judged(Found branch, RotatingCount count) {
     RotatingMode mode = branch.mode();
-    RotatingCount count = branch.solver().modes(mode.wavenumber());
     Parity parity = branch.solver().problem().parity();
     Optional<RotatingMode> taller = inTallerDomain(parity, mode);
     double growthChange = taller.map(other -> other.growthRate() / mode.growthRate() - 1.0).orElse(Double.NaN);
@@ -138,15 +149,13 @@ final class RotatingStudy {
   }
 
   private Optional<RotatingMode> inTallerDomain(Parity parity, RotatingMode mode) {
-    Equilibrium equilibrium = without.equilibrium();
-    double top = equilibrium.bottom() + DomainInfluence.TALLER * (equilibrium.top() - equilibrium.bottom());
-    Equilibrium stretched = equilibrium.withTop(top);
-    if (stretched.top() < top || !(stretched.at(top).magneticPerMass() >= 0.0)) {
+    Optional<Equilibrium> stretched = DomainInfluence.stretched(without.equilibrium());
+    if (stretched.isEmpty()) {
       return Optional.empty();
     }
     try {
       RotatingSolver solver = new RotatingSolver(
-          without.range().problem(disk, stretched, parity, options.tolerance()), angularSpeed);
+          without.range().problem(disk, stretched.get(), parity, options.tolerance()), angularSpeed);
       return solver.follow(mode.wavenumber(), mode)
           .map(start -> new RotatingBranch(solver, without.range()).climb(start));
     } catch (RefusedModelException | UnsolvedException impossible) {
@@ -154,12 +163,9 @@ final class RotatingStudy {
     }
   }
 
-  /** What belongs to the answer, beside the branches. */
-  RotatingAnswer answer(Optional<BranchPeak> peak) {
-    if (peak.isEmpty()) {
-      return new RotatingAnswer(angularSpeed, CHECKED_WAVELENGTHS, 0.0, 0, without);
-    }
-    RotatingCount count = solver(peak.get().parity()).modes(peak.get().wavenumber());
-    return new RotatingAnswer(angularSpeed, CHECKED_WAVELENGTHS, count.edge(), count.contourPoints(), without);
+  /** What belongs to the answer, beside the branches; counted at the wavelength of the peak, if one is left. */
+  RotatingAnswer answer(Optional<RotatingCount> count) {
+    return new RotatingAnswer(angularSpeed, CHECKED_WAVELENGTHS, count.map(RotatingCount::edge).orElse(0.0),
+        count.map(RotatingCount::contourPoints).orElse(0), without);
   }
 }

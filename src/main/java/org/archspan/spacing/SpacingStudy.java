@@ -45,7 +45,8 @@ public final class SpacingStudy {
           + " for which it is not solved; with domain.top-boundary = \"lid\" it is.");
     }
     RotatingStudy study = new RotatingStudy(disk, options, still);
-    List<BranchPeak> branches = study.branches();
+    RotatingStudy.Branches found = study.branches();
+    List<BranchPeak> branches = found.peaks();
     Equilibrium equilibrium = still.equilibrium();
     Optional<BranchPeak> fastest = branches.stream().findFirst();
     Optional<Integer> spacing = gathering(branches, equilibrium.bottom() + still.gatheringHeight());
@@ -54,7 +55,7 @@ public final class SpacingStudy {
         still.acrossLimit(), still.longestStableWavelength(),
         peak.map(at -> complex(equilibrium, at, still.range())), still.certificate(), still.gatheringHeight(),
         Findings.of(disk, equilibrium, branches, fastest, spacing, still.acrossLimit(), options, still.range()),
-        Optional.of(study.answer(peak)))
+        Optional.of(study.answer(peak.map(found.counts()::get))))
         .warned("Growth curves and the shape of the mode are those without rotation.");
   }
 

@@ -89,4 +89,14 @@ final class Atmosphere {
   int nodes() {
     return height.length;
   }
+
+  /** Square root of the density at the nodes over that at the lower end. */
+  double[] rootDensity(Equilibrium equilibrium, Scales scales) {
+    double bottom = equilibrium.at(equilibrium.bottom()).logDensity();
+    double[] root = new double[height.length];
+    for (int i = 0; i < root.length; i++) {
+      root[i] = Math.exp(0.5 * (equilibrium.at(height[i] * scales.length()).logDensity() - bottom));
+    }
+    return root;
+  }
 }

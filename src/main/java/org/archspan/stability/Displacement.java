@@ -251,19 +251,12 @@ final class Displacement {
 
   /** The terms of the form that hold the potential. */
   private double gravitation() {
-    ReferenceElement element = atmosphere.mesh.reference();
-    int n = element.degree() + 1;
+    double[] slope = atmosphere.mesh.slopes(potential);
     double waveSquared = kx * kx + ky * ky;
     double sum = 0.0;
     for (int i = 0; i < potential.length; i++) {
-      int start = i / n * n;
-      double slope = 0.0;
-      for (int j = 0; j < n; j++) {
-        slope += element.derivative()[(i - start) * n + j] * potential[start + j];
-      }
-      slope *= 2.0 / atmosphere.mesh.length(i / n);
       double compression = divergence[i] - atmosphere.inverseScaleHeight[i] * zeta[i];
-      sum += atmosphere.weight[i] * (slope * slope + waveSquared * potential[i] * potential[i]
+      sum += atmosphere.weight[i] * (slope[i] * slope[i] + waveSquared * potential[i] * potential[i]
           - 2.0 * atmosphere.jeansFrequency[i] * potential[i] * compression);
     }
     int last = potential.length - 1;

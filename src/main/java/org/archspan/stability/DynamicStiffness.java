@@ -21,21 +21,22 @@ abstract sealed class DynamicStiffness permits LightStiffness, GravitatingStiffn
   final int elements;
   final boolean bottomFixed;
   final CondensedForm form;
-  final WaveSquared wave = new WaveSquared();
+  final PotentialForm potential;
+  final WaveSquared wave;
   final boolean[] crowded;
-  final TurningForm turning;
-  private final PressureResponse response;
+  private final NodalForm nodal;
   private long factorisations;
 
   DynamicStiffness(Atmosphere atmosphere, PressureResponse response, boolean bottomFixed, TopBoundary topBoundary) {
     this.atmosphere = atmosphere;
-    this.response = response;
+    nodal = new NodalForm(atmosphere, response, topBoundary);
     this.bottomFixed = bottomFixed;
-    this.top = new TopCondition(topBoundary);
+    this.top = nodal.top;
+    this.wave = nodal.wave;
     this.element = atmosphere.mesh.reference();
     this.elements = atmosphere.mesh.elements();
-    this.form = new CondensedForm(atmosphere.nodes());
-    this.turning = new TurningForm(atmosphere.turning ? atmosphere.nodes() : 0, response);
+    this.form = nodal.light;
+    this.potential = nodal.potential;
     this.crowded = new boolean[elements];
   }
 
@@ -89,20 +90,11 @@ abstract sealed class DynamicStiffness permits LightStiffness, GravitatingStiffn
 
   private int count(double growth, double softestAt) {
     factorisations++;
-    if (atmosphere.turning) {
-      turning.fill(form, atmosphere, growth, wave, softestAt);
-    } else {
-      response.evaluate(growth, softestAt);
-      form.fill(atmosphere, 0, atmosphere.nodes(), growth * growth, wave, response.gas, response.cosmicRay);
-    }
-    if (!top.evaluate(form, atmosphere, atmosphere.nodes() - 1)) {
-      return INFINITE;
-    }
-    return factor(growth * growth);
+    return nodal.fill(growth, softestAt) ? factor() : INFINITE;
   }
 
   /** Weighs the filled form, factors the matrix and counts its negative eigenvalues. */
-  abstract int factor(double growthSquared);
+  abstract int factor();
 
   /** From coefficients at a height to those of the quadrature. */
   final void weigh() {

@@ -9,44 +9,28 @@ import org.archspan.mesh.Mesh;
  */
 final class FormAlong {
   private final Atmosphere atmosphere;
-  private final PressureResponse response;
-  private final TopCondition top;
-  private final CondensedForm form;
-  private final TurningForm turning;
-  private final PotentialForm potential;
-  private final WaveSquared wave = new WaveSquared();
+  private final NodalForm nodal;
   private final double ky;
 
   FormAlong(ModeProblem problem, TopBoundary topBoundary, Scales scales, Mesh mesh) {
     atmosphere = new Atmosphere(problem.equilibrium(), scales, mesh, problem.perturbedGravity(), problem.turn());
-    response = new PressureResponse(problem.gas(), problem.cosmicRays(), scales);
-    top = new TopCondition(topBoundary);
-    form = new CondensedForm(atmosphere.nodes());
-    turning = new TurningForm(atmosphere.turning ? atmosphere.nodes() : 0, response);
-    potential = new PotentialForm(atmosphere.gravitating ? atmosphere.nodes() : 0);
+    nodal = new NodalForm(atmosphere, new PressureResponse(problem.gas(), problem.cosmicRays(), scales), topBoundary);
     ky = problem.crossWavenumber() * scales.length();
   }
 
   /** The form along a vector at its own growth rate and wavenumber; NaN in the continuum above. O(elements * degree^2). */
   double of(ModeVector vector) {
-    double square = vector.growth() * vector.growth();
-    wave.exact(vector.kx(), ky);
-    if (atmosphere.turning) {
-      turning.fill(form, atmosphere, vector.growth(), wave, vector.kx());
-    } else {
-      response.evaluate(vector.growth(), vector.kx());
-      form.fill(atmosphere, 0, atmosphere.nodes(), square, wave, response.gas, response.cosmicRay);
-    }
-    int last = atmosphere.nodes() - 1;
-    if (!top.evaluate(form, atmosphere, last)) {
+    nodal.wave.exact(vector.kx(), ky);
+    if (!nodal.fill(vector.growth(), vector.kx())) {
       return Double.NaN;
     }
-    double zeta = vector.zeta()[last];
-    double sum = top.entry() * zeta * zeta + light(vector);
-    return atmosphere.gravitating ? sum + gravitating(vector, square) : sum;
+    double zeta = vector.zeta()[atmosphere.nodes() - 1];
+    double sum = nodal.top.entry() * zeta * zeta + light(vector);
+    return atmosphere.gravitating ? sum + gravitating(vector) : sum;
   }
 
   private double light(ModeVector vector) {
+    CondensedForm form = nodal.light;
     double[] slope = atmosphere.mesh.slopes(vector.zeta());
     double sum = 0.0;
     for (int i = 0; i < slope.length; i++) {
@@ -57,12 +41,8 @@ final class FormAlong {
     return sum;
   }
 
-  private double gravitating(ModeVector vector, double growthSquared) {
-    if (atmosphere.turning) {
-      potential.fill(atmosphere, wave, turning);
-    } else {
-      potential.fill(atmosphere, growthSquared, wave, form.stiffness());
-    }
+  private double gravitating(ModeVector vector) {
+    PotentialForm potential = nodal.potential;
     double[] psi = vector.potential();
     double[] zeta = vector.zeta();
     double[] slope = atmosphere.mesh.slopes(zeta);
@@ -73,7 +53,7 @@ final class FormAlong {
           + 2.0 * psi[i] * (potential.slope[i] * slope[i] + potential.value[i] * zeta[i]));
     }
     int last = psi.length - 1;
-    return sum + Math.sqrt(wave.bending + wave.across) * psi[last] * psi[last]
+    return sum + Math.sqrt(nodal.wave.bending + nodal.wave.across) * psi[last] * psi[last]
         + 2.0 * atmosphere.jeansFrequency[last] * psi[last] * zeta[last];
   }
 }

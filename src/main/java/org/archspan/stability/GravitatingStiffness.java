@@ -12,7 +12,6 @@ import org.archspan.linalg.TwistedBlockTridiagonal;
  */
 final class GravitatingStiffness extends DynamicStiffness {
   private final CoupledElement coupled;
-  private final PotentialForm potential;
   private final double[] packed;
   private final double[] diagonal;
   private final double[] offDiagonal;
@@ -27,9 +26,8 @@ final class GravitatingStiffness extends DynamicStiffness {
    */
   GravitatingStiffness(Atmosphere atmosphere, PressureResponse response, boolean bottomFixed, TopBoundary topBoundary) {
     super(atmosphere, response, bottomFixed, topBoundary);
-    coupled = new CoupledElement(element.degree() + 1, element.derivative(), element.weights(), element.pairFirst(),
+    coupled = new CoupledElement(element.degree() + 1, element.derivative(), element.slopeGram(), element.pairFirst(),
         element.pairSecond());
-    potential = new PotentialForm(atmosphere.nodes());
     packed = new double[elements * coupled.packedLength()];
     diagonal = new double[3 * (elements + 1)];
     offDiagonal = new double[4 * elements];
@@ -45,12 +43,7 @@ final class GravitatingStiffness extends DynamicStiffness {
   }
 
   @Override
-  int factor(double growthSquared) {
-    if (atmosphere.turning) {
-      potential.fill(atmosphere, wave, turning);
-    } else {
-      potential.fill(atmosphere, growthSquared, wave, form.stiffness());
-    }
+  int factor() {
     weigh();
     double[] mixedWeight = atmosphere.mixedWeight;
     double[] weight = atmosphere.weight;

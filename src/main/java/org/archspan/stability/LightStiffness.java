@@ -34,7 +34,7 @@ final class LightStiffness extends DynamicStiffness {
   }
 
   @Override
-  int factor(double growthSquared) {
+  int factor() {
     weigh();
     return condense() + tridiagonal.count(diagonal, offDiagonal, first, unknowns);
   }

@@ -23,12 +23,7 @@ final class ModeShape {
     atmosphere = solver.checking().stiffness().atmosphere();
     displacement = solver.checking().displacement();
     equilibrium = solver.problem().equilibrium();
-    double bottom = equilibrium.at(equilibrium.bottom()).logDensity();
-    rootDensity = new double[atmosphere.nodes()];
-    for (int i = 0; i < rootDensity.length; i++) {
-      double z = atmosphere.height[i] * solver.scales().length();
-      rootDensity[i] = Math.exp(0.5 * (equilibrium.at(z).logDensity() - bottom));
-    }
+    rootDensity = atmosphere.rootDensity(equilibrium, solver.scales());
   }
 
   /** Root-mean-square displacement weighted by the square of the density, in the vector's own unit. */

@@ -1,5 +1,6 @@
 package org.archspan.stability;
 
+import org.apache.commons.math3.complex.Complex;
 import org.archspan.linalg.ComplexFront;
 import org.archspan.mesh.Mesh;
 import org.archspan.mesh.ReferenceElement;
@@ -29,23 +30,10 @@ final class RotatingDeterminant {
     unknowns = problem.perturbedGravity() ? 2 : 1;
     int n = element.degree() + 1;
     front = new ComplexFront(mesh.elements(), unknowns * n, unknowns);
-    gram = gram(element);
+    gram = element.slopeGram();
     int length = mesh.elements() * unknowns * (n - 1) + unknowns;
     vectorReal = new double[length];
     vectorImaginary = new double[length];
-  }
-
-  private static double[] gram(ReferenceElement element) {
-    int n = element.degree() + 1;
-    double[] gram = new double[n * n];
-    for (int q = 0; q < n; q++) {
-      for (int i = 0; i < n; i++) {
-        for (int j = 0; j < n; j++) {
-          gram[i * n + j] += element.weights()[q] * element.derivative()[q * n + i] * element.derivative()[q * n + j];
-        }
-      }
-    }
-    return gram;
   }
 
   Atmosphere atmosphere() {
@@ -210,20 +198,20 @@ final class RotatingDeterminant {
     Complex a = new Complex(form.real[0][top], form.imaginary[0][top]);
     Complex first = new Complex(g * form.real[1][top], g * form.imaginary[1][top]);
     Complex second = new Complex(g * form.real[2][top], g * form.imaginary[2][top]);
-    Complex rowMixed = first.plus(a.times(half));
+    Complex rowMixed = first.add(a.multiply(half));
     Complex c = new Complex(form.real[4][top] - g * g * form.real[3][top],
         form.imaginary[4][top] - g * g * form.imaginary[3][top])
-        .plus(first.plus(second).plus(a.times(half)).times(half));
-    Complex difference = second.minus(first);
-    Complex root = difference.times(difference).plus(a.times(c).times(4.0)).sqrt();
-    Complex decay = root.minus(difference).over(a.times(2.0));
-    if (decay.re() < 0.0) {
-      decay = root.times(-1.0).minus(difference).over(a.times(2.0));
+        .add(first.add(second).add(a.multiply(half)).multiply(half));
+    Complex difference = second.subtract(first);
+    Complex root = difference.multiply(difference).add(a.multiply(c).multiply(4.0)).sqrt();
+    Complex decay = root.subtract(difference).divide(a.multiply(2.0));
+    if (decay.getReal() < 0.0) {
+      decay = root.multiply(-1.0).subtract(difference).divide(a.multiply(2.0));
     }
-    Complex added = a.times(decay).minus(rowMixed);
+    Complex added = a.multiply(decay).subtract(rowMixed);
     int at = entry(e, node, 0, node, 0);
-    front.real()[at] += added.re();
-    front.imaginary()[at] += added.im();
+    front.real()[at] += added.getReal();
+    front.imaginary()[at] += added.getImaginary();
   }
 
   /** After an evaluation at a root: the values of zeta at the nodes, and of the potential, by one inverse iteration. */

@@ -1,5 +1,6 @@
 package org.archspan.stability;
 
+import org.apache.commons.math3.complex.Complex;
 import org.archspan.closure.CosmicRayClosure;
 import org.archspan.closure.GasClosure;
 
@@ -100,21 +101,21 @@ final class RotatingForm {
 
   /** X and Y at a node, from sqrt(rho) Z' and the force along D. */
   Complex[] horizontal(int i, Complex s, double kx, double ky, Complex slope, Complex force) {
-    respond(s.re(), s.im(), kx);
+    respond(s.getReal(), s.getImaginary(), kx);
     double v = atmosphere.alfvenSquared[i];
     Complex stiffness = new Complex(gasReal * atmosphere.gasPerMass[i] + cosmicRayReal * atmosphere.cosmicRayPerMass[i],
         gasImaginary * atmosphere.gasPerMass[i] + cosmicRayImaginary * atmosphere.cosmicRayPerMass[i]);
-    Complex square = s.times(s);
-    Complex coriolis = s.times(2.0 * angularSpeed);
-    Complex xx = square.plus(stiffness.times(kx * kx));
-    Complex yy = square.plus(stiffness.times(ky * ky)).plus(new Complex(v * (kx * kx + ky * ky), 0.0));
-    Complex off = stiffness.times(kx * ky);
-    Complex pressure = stiffness.times(slope).minus(force);
-    Complex alongForce = pressure.times(-kx);
-    Complex acrossForce = pressure.plus(slope.times(v)).times(-ky);
-    Complex det = xx.times(yy).minus(off.minus(coriolis).times(off.plus(coriolis)));
-    Complex x = yy.times(alongForce).minus(off.minus(coriolis).times(acrossForce)).over(det);
-    Complex y = xx.times(acrossForce).minus(off.plus(coriolis).times(alongForce)).over(det);
+    Complex square = s.multiply(s);
+    Complex coriolis = s.multiply(2.0 * angularSpeed);
+    Complex xx = square.add(stiffness.multiply(kx * kx));
+    Complex yy = square.add(stiffness.multiply(ky * ky)).add(new Complex(v * (kx * kx + ky * ky), 0.0));
+    Complex off = stiffness.multiply(kx * ky);
+    Complex pressure = stiffness.multiply(slope).subtract(force);
+    Complex alongForce = pressure.multiply(-kx);
+    Complex acrossForce = pressure.add(slope.multiply(v)).multiply(-ky);
+    Complex det = xx.multiply(yy).subtract(off.subtract(coriolis).multiply(off.add(coriolis)));
+    Complex x = yy.multiply(alongForce).subtract(off.subtract(coriolis).multiply(acrossForce)).divide(det);
+    Complex y = xx.multiply(acrossForce).subtract(off.add(coriolis).multiply(alongForce)).divide(det);
     return new Complex[] {x, y};
   }
 

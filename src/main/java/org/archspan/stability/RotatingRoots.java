@@ -2,6 +2,7 @@ package org.archspan.stability;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.apache.commons.math3.complex.Complex;
 
 /**
  * Zeros of det S(s) by Muller's method, zeros already found divided out. One instance for one thread.
@@ -30,7 +31,7 @@ final class RotatingRoots {
 
   /** How many zeros these are, conjugates included. */
   int count() {
-    return (int) found.stream().mapToLong(root -> root.im() == 0.0 ? 1 : 2).sum();
+    return (int) found.stream().mapToLong(root -> root.getImaginary() == 0.0 ? 1 : 2).sum();
   }
 
   /** Refines a guess with nothing divided out; null when it leads nowhere. */
@@ -81,13 +82,13 @@ final class RotatingRoots {
   }
 
   private boolean add(Complex root, double edge, double radius) {
-    if (root == null || !(root.re() > edge && root.magnitude() < radius)) {
+    if (root == null || !(root.getReal() > edge && root.abs() < radius)) {
       return false;
     }
-    Complex upper = Math.abs(root.im()) < SAME * root.magnitude() ? new Complex(root.re(), 0.0)
-        : new Complex(root.re(), Math.abs(root.im()));
+    Complex upper = Math.abs(root.getImaginary()) < SAME * root.abs() ? new Complex(root.getReal(), 0.0)
+        : new Complex(root.getReal(), Math.abs(root.getImaginary()));
     for (Complex known : found) {
-      if (known.minus(upper).magnitude() < SAME * upper.magnitude()) {
+      if (known.subtract(upper).abs() < SAME * upper.abs()) {
         return false;
       }
     }
@@ -97,10 +98,10 @@ final class RotatingRoots {
 
   /** Muller's method: the parabola through the last three points (Muller 1956, Math. Tables Aids Comput. 10, 208). */
   private Complex muller(Complex guess, List<Complex> divided) {
-    Complex x0 = guess.times(1.0 - FIRST_STEP);
-    Complex x1 = guess.plus(new Complex(0.0, FIRST_STEP * guess.magnitude()));
+    Complex x0 = guess.multiply(1.0 - FIRST_STEP);
+    Complex x1 = guess.add(new Complex(0.0, FIRST_STEP * guess.abs()));
     Complex x2 = guess;
-    determinant.evaluate(x2.re(), x2.im(), kx, ky);
+    determinant.evaluate(x2.getReal(), x2.getImaginary(), kx, ky);
     double reference = determinant.logMagnitude();
     Complex f2 = value(reference, x2, divided);
     Complex f0 = evaluated(reference, x0, divided);
@@ -108,16 +109,16 @@ final class RotatingRoots {
     double last = Double.POSITIVE_INFINITY;
     for (int step = 0; step < MOST_STEPS; step++) {
       Complex change = step(x0, f0, x1, f1, x2, f2);
-      double size = change.magnitude();
-      if (!(size < 0.5 * x2.magnitude())) {
-        change = change.times(0.5 * x2.magnitude() / size);
+      double size = change.abs();
+      if (!(size < 0.5 * x2.abs())) {
+        change = change.multiply(0.5 * x2.abs() / size);
       }
-      Complex x3 = x2.plus(change);
-      if (!(x3.re() > 0.0) || Double.isNaN(size)) {
+      Complex x3 = x2.add(change);
+      if (!(x3.getReal() > 0.0) || Double.isNaN(size)) {
         return null;
       }
-      boolean stalled = size < GOOD * x3.magnitude() && size >= 0.5 * last;
-      if (size < SETTLED * x3.magnitude() || stalled) {
+      boolean stalled = size < GOOD * x3.abs() && size >= 0.5 * last;
+      if (size < SETTLED * x3.abs() || stalled) {
         return x3;
       }
       last = size;
@@ -127,7 +128,7 @@ final class RotatingRoots {
       f1 = f2;
       x2 = x3;
       f2 = evaluated(reference, x3, divided);
-      if (f2.magnitude() == 0.0) {
+      if (f2.abs() == 0.0) {
         return x3;
       }
     }
@@ -135,18 +136,18 @@ final class RotatingRoots {
   }
 
   private static Complex step(Complex x0, Complex f0, Complex x1, Complex f1, Complex x2, Complex f2) {
-    Complex first = f2.minus(f1).over(x2.minus(x1));
-    Complex second = f1.minus(f0).over(x1.minus(x0));
-    Complex curvature = first.minus(second).over(x2.minus(x0));
-    Complex slope = first.plus(curvature.times(x2.minus(x1)));
-    Complex root = slope.times(slope).minus(curvature.times(f2).times(4.0)).sqrt();
-    Complex plus = slope.plus(root);
-    Complex minus = slope.minus(root);
-    return f2.times(-2.0).over(plus.magnitude() > minus.magnitude() ? plus : minus);
+    Complex first = f2.subtract(f1).divide(x2.subtract(x1));
+    Complex second = f1.subtract(f0).divide(x1.subtract(x0));
+    Complex curvature = first.subtract(second).divide(x2.subtract(x0));
+    Complex slope = first.add(curvature.multiply(x2.subtract(x1)));
+    Complex root = slope.multiply(slope).subtract(curvature.multiply(f2).multiply(4.0)).sqrt();
+    Complex plus = slope.add(root);
+    Complex minus = slope.subtract(root);
+    return f2.multiply(-2.0).divide(plus.abs() > minus.abs() ? plus : minus);
   }
 
   private Complex evaluated(double reference, Complex s, List<Complex> divided) {
-    determinant.evaluate(s.re(), s.im(), kx, ky);
+    determinant.evaluate(s.getReal(), s.getImaginary(), kx, ky);
     return value(reference, s, divided);
   }
 
@@ -155,9 +156,9 @@ final class RotatingRoots {
     double size = Math.exp(determinant.logMagnitude() - reference);
     Complex value = new Complex(size * Math.cos(determinant.phase()), size * Math.sin(determinant.phase()));
     for (Complex root : divided) {
-      value = value.over(s.minus(root));
-      if (root.im() != 0.0) {
-        value = value.over(s.minus(new Complex(root.re(), -root.im())));
+      value = value.divide(s.subtract(root));
+      if (root.getImaginary() != 0.0) {
+        value = value.divide(s.subtract(new Complex(root.getReal(), -root.getImaginary())));
       }
     }
     return value;

@@ -1,7 +1,7 @@
 package org.archspan.stability;
 
+import org.apache.commons.math3.complex.Complex;
 import org.archspan.boundary.Parity;
-import org.archspan.mesh.ReferenceElement;
 
 /**
  * Where a rotating mode has its kinetic energy, and what it gathers. The displacement is complex; amplitudes are its magnitudes.
@@ -21,36 +21,24 @@ final class RotatingShape {
     energy = new double[n];
     densityChange = new Complex[n];
     double[][] vector = new double[4][n];
-    determinant.evaluate(s.re(), s.im(), kx, ky);
+    determinant.evaluate(s.getReal(), s.getImaginary(), kx, ky);
     determinant.nullVector(vector[0], vector[1], vector[2], vector[3]);
+    double[] slopeReal = atmosphere.mesh.slopes(vector[0]);
+    double[] slopeImaginary = atmosphere.mesh.slopes(vector[1]);
     for (int i = 0; i < n; i++) {
       Complex zeta = new Complex(vector[0][i], vector[1][i]);
-      Complex slope = slope(vector, i).plus(zeta.times(0.5 * atmosphere.inverseScaleHeight[i]));
-      Complex force = zeta.times(atmosphere.gravity[i])
-          .plus(new Complex(vector[2][i], vector[3][i]).times(atmosphere.jeansFrequency[i]));
+      Complex slope = new Complex(slopeReal[i], slopeImaginary[i]).add(zeta.multiply(0.5 * atmosphere.inverseScaleHeight[i]));
+      Complex force = zeta.multiply(atmosphere.gravity[i])
+          .add(new Complex(vector[2][i], vector[3][i]).multiply(atmosphere.jeansFrequency[i]));
       Complex[] horizontal = determinant.form().horizontal(i, s, kx, ky, slope, force);
-      Complex divergence = horizontal[0].times(kx).plus(horizontal[1].times(ky)).plus(slope);
+      Complex divergence = horizontal[0].multiply(kx).add(horizontal[1].multiply(ky)).add(slope);
       energy[i] = square(horizontal[0]) + square(horizontal[1]) + square(zeta);
-      densityChange[i] = zeta.times(atmosphere.inverseScaleHeight[i]).minus(divergence);
+      densityChange[i] = zeta.multiply(atmosphere.inverseScaleHeight[i]).subtract(divergence);
     }
   }
 
   private static double square(Complex value) {
-    return value.re() * value.re() + value.im() * value.im();
-  }
-
-  private Complex slope(double[][] vector, int node) {
-    ReferenceElement element = atmosphere.mesh.reference();
-    int n = element.degree() + 1;
-    int start = node / n * n;
-    double re = 0.0;
-    double im = 0.0;
-    for (int j = 0; j < n; j++) {
-      double d = element.derivative()[(node - start) * n + j];
-      re += d * vector[0][start + j];
-      im += d * vector[1][start + j];
-    }
-    return new Complex(re, im).times(2.0 / atmosphere.mesh.length(node / n));
+    return value.getReal() * value.getReal() + value.getImaginary() * value.getImaginary();
   }
 
   /** Height of the kinetic-energy centroid in scale lengths. */
@@ -74,10 +62,10 @@ final class RotatingShape {
     double moved = 0.0;
     for (int i = 0; i < energy.length; i++) {
       double density = rootDensity[i] * rootDensity[i];
-      column = column.plus(densityChange[i].times(atmosphere.weight[i] * rootDensity[i]));
+      column = column.add(densityChange[i].multiply(atmosphere.weight[i] * rootDensity[i]));
       weights += atmosphere.weight[i] * density * density;
       moved += atmosphere.weight[i] * density * energy[i];
     }
-    return column.magnitude() / Math.sqrt(moved / weights);
+    return column.abs() / Math.sqrt(moved / weights);
   }
 }

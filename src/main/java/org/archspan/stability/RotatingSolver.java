@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
+import org.apache.commons.math3.complex.Complex;
 import org.archspan.disk.RefusedModelException;
 import org.archspan.mesh.Mesh;
 
@@ -150,7 +151,7 @@ public final class RotatingSolver {
     }
     for (double shrunk : new double[] {0.97, 0.85, 0.7, 0.5, 0.3}) {
       for (int i = 0; i < starts.size() && roots.count() < number; i++) {
-        roots.search(starts.get(i).times(new Complex(shrunk, 0.5 * (1.0 - shrunk))), edge, radius);
+        roots.search(starts.get(i).multiply(new Complex(shrunk, 0.5 * (1.0 - shrunk))), edge, radius);
       }
     }
     if (roots.count() < number) {
@@ -166,8 +167,8 @@ public final class RotatingSolver {
   /** Halves a rectangle that holds zeros not yet found until each lies alone near the middle of its own. */
   private void divide(RotatingRoots roots, WindingContour contour, Rectangle part, double edge, double radius, int depth) {
     int inside = contour.zerosInside(part.left, part.right, part.low, part.high);
-    long known = roots.found().stream().filter(root -> root.re() > part.left && root.re() <= part.right
-        && root.im() > part.low && root.im() <= part.high).count();
+    long known = roots.found().stream().filter(root -> root.getReal() > part.left && root.getReal() <= part.right
+        && root.getImaginary() > part.low && root.getImaginary() <= part.high).count();
     if (inside <= known || depth > MOST_DIVISIONS) {
       return;
     }
@@ -193,9 +194,9 @@ public final class RotatingSolver {
     if (better == null) {
       throw new UnsolvedException("a growing mode at wavenumber " + kx + " per scale height is not resolved");
     }
-    double frequency = root.im() == 0.0 ? 0.0 : Math.abs(better.im());
-    return new RotatingMode(kx / scales.length(), better.re() / scales.time(), frequency / scales.time(),
-        better.minus(root).magnitude() / better.magnitude());
+    double frequency = root.getImaginary() == 0.0 ? 0.0 : Math.abs(better.getImaginary());
+    return new RotatingMode(kx / scales.length(), better.getReal() / scales.time(), frequency / scales.time(),
+        better.subtract(root).abs() / better.abs());
   }
 
   /**
@@ -215,7 +216,7 @@ public final class RotatingSolver {
       if (root == null) {
         return Optional.empty();
       }
-      root = Math.abs(root.im()) < REAL * root.magnitude() ? new Complex(root.re(), 0.0) : root;
+      root = Math.abs(root.getImaginary()) < REAL * root.abs() ? new Complex(root.getReal(), 0.0) : root;
       RotatingMode mode = checked(kx, root);
       if (mode.growthError() <= problem.tolerance()) {
         return Optional.of(mode);
@@ -240,12 +241,7 @@ public final class RotatingSolver {
 
   /** Its column contrast, as of {@link EigenMode#columnContrast()}, dimensionless. */
   public double columnContrast(RotatingMode mode) {
-    double bottom = problem.equilibrium().at(problem.equilibrium().bottom()).logDensity();
-    double[] height = checking.atmosphere().height;
-    double[] rootDensity = new double[height.length];
-    for (int i = 0; i < height.length; i++) {
-      rootDensity[i] = Math.exp(0.5 * (problem.equilibrium().at(height[i] * scales.length()).logDensity() - bottom));
-    }
+    double[] rootDensity = checking.atmosphere().rootDensity(problem.equilibrium(), scales);
     return shape(mode).columnContrast(problem.parity(), rootDensity);
   }
 

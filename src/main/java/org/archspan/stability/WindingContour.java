@@ -1,5 +1,9 @@
 package org.archspan.stability;
 
+import java.util.function.DoubleFunction;
+import java.util.function.ToDoubleFunction;
+import org.apache.commons.math3.complex.Complex;
+
 /**
  * Counts the zeros of det S(s) in {@code Re s > edge, |s| < radius} by the argument principle. The coefficients are real, so
  * zeros come in conjugate pairs and the upper half of the contour suffices: from the radius on the real axis along the arc,
@@ -22,7 +26,6 @@ final class WindingContour {
   private final double kx;
   private final double ky;
   private double edge;
-  private double radius;
   private int points;
   private double phase;
   private double rate;
@@ -42,35 +45,18 @@ final class WindingContour {
    * The number of zeros.
    *
    * @param newEdge   positive
-   * @param newRadius greater than the edge
+   * @param radius    greater than the edge
    * @throws UnsolvedException when the phase never settles, as when a zero lies on the contour
    */
-  int zeros(double newEdge, double newRadius) {
+  int zeros(double newEdge, double radius) {
     edge = newEdge;
-    radius = newRadius;
     points = 0;
     double corner = Math.acos(edge / radius) * radius;
     double height = radius * Math.sin(corner / radius);
-    double end = corner + height;
-    double turn = 0.0;
-    double at = 0.0;
-    look(at, corner, height);
-    while (at < end) {
-      double longest = at < corner ? Math.min(ARC_STEP * radius, Math.max(corner - at, 1e-12 * radius)) : LINE_STEP * edge;
-      double step = Math.min(Math.min(longest, AIM / rate), end - at);
-      double here = phase;
-      double rateHere = rate;
-      look(at + step, corner, height);
-      while (step * Math.max(rate, rateHere) > MOST) {
-        step *= 0.5;
-        look(at + step, corner, height);
-      }
-      turn += Math.IEEEremainder(phase - here, 2.0 * Math.PI);
-      at += step;
-      if (points > MOST_POINTS) {
-        throw new UnsolvedException("the phase of the determinant does not settle on a contour around the growing modes");
-      }
-    }
+    look(new Complex(radius, 0.0));
+    double turn = turn(at -> new Complex(radius * Math.cos(at / radius), radius * Math.sin(at / radius)), corner,
+        s -> ARC_STEP * radius);
+    turn += turn(at -> new Complex(edge, Math.max(0.0, height - at)), height, s -> LINE_STEP * edge);
     double zeros = turn / Math.PI;
     if (!(Math.abs(zeros - Math.rint(zeros)) < AGREEMENT)) {
       throw new UnsolvedException("the number of growing modes came out as " + zeros + " by the argument principle");
@@ -93,42 +79,46 @@ final class WindingContour {
   }
 
   private double turnAlong(Complex from, Complex to) {
-    double length = to.minus(from).magnitude();
+    double length = to.subtract(from).abs();
+    return turn(at -> from.add(to.subtract(from).multiply(at / length)), length, s -> LINE_STEP * s.getReal());
+  }
+
+  /**
+   * Turn of the phase along a path from where was looked last.
+   *
+   * @param path    place at a length along it
+   * @param length  of the path
+   * @param longest step allowed at a place
+   */
+  private double turn(DoubleFunction<Complex> path, double length, ToDoubleFunction<Complex> longest) {
     double turn = 0.0;
     double at = 0.0;
     while (at < length * (1.0 - 1e-12)) {
-      Complex s = from.plus(to.minus(from).times(at / length));
-      double step = Math.min(Math.min(LINE_STEP * s.re(), AIM / rate), length - at);
+      double step = Math.min(Math.min(longest.applyAsDouble(path.apply(at)), AIM / rate), length - at);
       double here = phase;
       double rateHere = rate;
-      look(from.plus(to.minus(from).times((at + step) / length)));
+      look(path.apply(at + step));
       while (step * Math.max(rate, rateHere) > MOST) {
         step *= 0.5;
-        look(from.plus(to.minus(from).times((at + step) / length)));
+        look(path.apply(at + step));
       }
       turn += Math.IEEEremainder(phase - here, 2.0 * Math.PI);
       at += step;
       if (points > MOST_POINTS) {
-        throw new UnsolvedException("the phase of the determinant does not settle around a rectangle of growth rates");
+        throw new UnsolvedException("the phase of the determinant does not settle on a contour around growing modes");
       }
     }
     return turn;
   }
 
-  /** Phase and rate of change of the logarithm at a length along the contour. */
-  private void look(double at, double corner, double height) {
-    Complex s = at < corner ? new Complex(radius * Math.cos(at / radius), radius * Math.sin(at / radius))
-        : new Complex(edge, Math.max(0.0, height - (at - corner)));
-    look(s);
-  }
-
+  /** Phase and rate of change of the logarithm at a place on the contour. */
   private void look(Complex s) {
     double h = DIFFERENCE * edge;
     points += 2;
-    determinant.evaluate(s.re() + h, s.im(), kx, ky);
+    determinant.evaluate(s.getReal() + h, s.getImaginary(), kx, ky);
     double magnitude = determinant.logMagnitude();
     double shifted = determinant.phase();
-    determinant.evaluate(s.re(), s.im(), kx, ky);
+    determinant.evaluate(s.getReal(), s.getImaginary(), kx, ky);
     phase = determinant.phase();
     rate = Math.hypot(magnitude - determinant.logMagnitude(), Math.IEEEremainder(shifted - phase, 2.0 * Math.PI)) / h;
   }
