@@ -3,7 +3,6 @@ package org.archspan.equilibrium;
 import java.util.Arrays;
 import java.util.stream.DoubleStream;
 import org.archspan.mesh.Mesh;
-import org.archspan.mesh.ReferenceElement;
 
 /**
  * A prescribed density of isothermal gas in a given gravity; the field is what the balance leaves over:
@@ -12,20 +11,17 @@ import org.archspan.mesh.ReferenceElement;
  * <p>The total pressure per mass is integrated downwards once, with positive terms only, and interpolated on panels.
  */
 final class BalanceStratification implements Stratification {
-  private static final ReferenceElement RULE = ReferenceElement.ofDegree(16);
 
   private final StratumSum strata;
   private final ExternalGravity gravity;
-  private final double[] edges;
-  private final double[] pressurePerMass;
+  private final PanelValues pressurePerMass;
   private final double dispersionSquared;
   private final double cosmicRayRatio;
 
-  private BalanceStratification(StratumSum strata, ExternalGravity gravity, double[] edges, double[] pressurePerMass,
+  private BalanceStratification(StratumSum strata, ExternalGravity gravity, PanelValues pressurePerMass,
       double dispersionSquared, double cosmicRayRatio) {
     this.strata = strata;
     this.gravity = gravity;
-    this.edges = edges;
     this.pressurePerMass = pressurePerMass;
     this.dispersionSquared = dispersionSquared;
     this.cosmicRayRatio = cosmicRayRatio;
@@ -36,8 +32,8 @@ final class BalanceStratification implements Stratification {
     HeightPanels panels = HeightPanels.of(strata::logDensity, bottom, landmarks(strata, gravity), gravity.kinks(),
         gravity.greatestHeight());
     // halves: interpolation over whole panels leaves the slope of the pressure, hence the balance, wrong by 3e-10
-    double[] edges = new Mesh(panels.edges(), RULE.degree()).halved().edges();
-    int n = RULE.degree() + 1;
+    double[] edges = new Mesh(panels.edges(), PanelValues.RULE.degree()).halved().edges();
+    int n = PanelValues.NODES;
     double[] perMass = new double[(edges.length - 1) * n];
     double far = edges[edges.length - 1];
     double above = gravity.acceleration(far) / -strata.logDensityGradient(far);
@@ -45,7 +41,7 @@ final class BalanceStratification implements Stratification {
     double endDensity = strata.logDensity(far);
     for (int panel = edges.length - 2; panel >= 0; panel--) {
       for (int i = n - 1; i >= 0; i--) {
-        double z = node(edges, panel, i);
+        double z = PanelValues.node(edges, panel, i);
         double here = strata.logDensity(z);
         above = above * Math.exp(endDensity - here) + HeightPanels.integrateShort(
             y -> Math.exp(strata.logDensity(y) - here) * gravity.acceleration(y), z, end);
@@ -54,35 +50,19 @@ final class BalanceStratification implements Stratification {
         endDensity = here;
       }
     }
-    return new BalanceStratification(strata, gravity, edges, perMass, 0.0, 0.0);
+    return new BalanceStratification(strata, gravity, new PanelValues(edges, perMass), 0.0, 0.0);
   }
 
   /** The same total pressure with an isothermal gas of c^2 (cm^2 s^-2) and cosmic rays in the ratio beta. */
   BalanceStratification split(double newDispersionSquared, double newCosmicRayRatio) {
-    return new BalanceStratification(strata, gravity, edges, pressurePerMass, newDispersionSquared,
+    return new BalanceStratification(strata, gravity, pressurePerMass, newDispersionSquared,
         newCosmicRayRatio);
-  }
-
-  private static double node(double[] edges, int panel, int i) {
-    return edges[panel] + 0.5 * (edges[panel + 1] - edges[panel]) * (1.0 + RULE.nodes()[i]);
   }
 
   /** Total pressure over density, cm^2 s^-2. */
   double totalPerMass(double height) {
-    int last = edges.length - 1;
-    if (height >= edges[last]) {
-      return gravity.acceleration(height) / -strata.logDensityGradient(height);
-    }
-    int found = Arrays.binarySearch(edges, height);
-    int panel = found >= 0 ? found : -found - 2;
-    int n = RULE.degree() + 1;
-    double[] weights = new double[n];
-    RULE.interpolate(2.0 * (height - edges[panel]) / (edges[panel + 1] - edges[panel]) - 1.0, weights);
-    double sum = 0.0;
-    for (int i = 0; i < n; i++) {
-      sum += weights[i] * pressurePerMass[panel * n + i];
-    }
-    return sum;
+    return height >= pressurePerMass.top() ? gravity.acceleration(height) / -strata.logDensityGradient(height)
+        : pressurePerMass.at(height);
   }
 
   @Override

@@ -41,12 +41,12 @@ record DomainEnd(double top, TopBoundary boundary) {
 
   private static double checkedTop(double top, Stratification state, double bottom) {
     if (!(top > bottom)) {
-      throw new RefusedModelException("domain.top (" + EquilibriumBuilder.parsecs(top) + ") must lie above"
-          + " domain.bottom (" + EquilibriumBuilder.parsecs(bottom) + ")");
+      throw new RefusedModelException("domain.top (" + EquilibriumBuilder.words(top) + ") must lie above"
+          + " domain.bottom (" + EquilibriumBuilder.words(bottom) + ")");
     }
     if (top > state.greatestHeight()) {
-      throw new RefusedModelException("domain.top (" + EquilibriumBuilder.parsecs(top) + ") lies above the last height"
-          + " of a table (" + EquilibriumBuilder.parsecs(state.greatestHeight()) + "); lower it or extend the table");
+      throw new RefusedModelException("domain.top (" + EquilibriumBuilder.words(top) + ") lies above the last height"
+          + " of a table (" + EquilibriumBuilder.words(state.greatestHeight()) + "); lower it or extend the table");
     }
     return top;
   }
@@ -59,7 +59,7 @@ record DomainEnd(double top, TopBoundary boundary) {
     if (domain.topBoundary().get() == TopBoundary.OPEN && !(change <= NEARLY_UNIFORM)) {
       throw new RefusedModelException(String.format(Locale.ROOT, "an open top needs a uniform atmosphere above it: over"
           + " the scale height above %s this one changes by %.3g per cent, more than the %.0f per cent allowed; raise"
-          + " domain.top or use domain.top-boundary = \"lid\"", EquilibriumBuilder.parsecs(top), 100.0 * change,
+          + " domain.top or use domain.top-boundary = \"lid\"", EquilibriumBuilder.words(top), 100.0 * change,
           100.0 * NEARLY_UNIFORM));
     }
     return domain.topBoundary().get();

@@ -159,7 +159,7 @@ public final class EquilibriumBuilder {
   }
 
   /** A length for messages: in parsecs, or in megametres where that is the smaller number of the two to read. */
-  static String parsecs(double length) {
+  static String words(double length) {
     return Math.abs(length) < 1e-6 * Constants.PARSEC ? String.format(Locale.ROOT, "%.4g Mm", length / 1e8)
         : String.format(Locale.ROOT, "%.4g pc", length / Constants.PARSEC);
   }

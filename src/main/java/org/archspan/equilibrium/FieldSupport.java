@@ -23,7 +23,7 @@ final class FieldSupport {
         throw new RefusedModelException(String.format(Locale.ROOT, "support runs out at a height of %s: gas and cosmic"
             + " rays already exceed the weight above (their pressure is %.4g of it), so the balance leaves no field"
             + " there; lower gas.dispersion, or raise field.strength at the midplane",
-            EquilibriumBuilder.parsecs(i == 0 ? z : firstFailure(state, z - (top - bottom) / SAMPLES, z)),
+            EquilibriumBuilder.words(i == 0 ? z : firstFailure(state, z - (top - bottom) / SAMPLES, z)),
             (here.gasPerMass() + here.cosmicRayPerMass()) / state.totalPerMass(z)));
       }
     }

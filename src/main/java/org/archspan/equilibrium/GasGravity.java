@@ -4,7 +4,6 @@ import java.util.Arrays;
 import java.util.function.ToDoubleBiFunction;
 import org.archspan.disk.RefusedModelException;
 import org.archspan.gravity.GravityLaw;
-import org.archspan.mesh.ReferenceElement;
 import org.archspan.units.Constants;
 
 /**
@@ -13,9 +12,6 @@ import org.archspan.units.Constants;
  * until they stand still. Immutable.
  */
 final class GasGravity implements GravityLaw {
-  private static final ReferenceElement RULE = ReferenceElement.ofDegree(16);
-  private static final int NODES = RULE.degree() + 1;
-  private static final double[] RUNNING_INTEGRAL = RunningIntegral.matrix(RULE);
   private static final double WIDEST_EFOLDINGS = 1.0;
   private static final double GROWTH = 1.5;
   /** Gas left above the last panel, relative to the column below it. */
@@ -23,16 +19,14 @@ final class GasGravity implements GravityLaw {
   private static final double SETTLED = 2e-16;
   private static final int MOST_ITERATIONS = 60;
   private static final int MOST_PANELS = 4000;
-  private final double[] edges;
-  private final double[] acceleration;
-  private final double[] potential;
+  private final PanelValues acceleration;
+  private final PanelValues potential;
   private final double height;
 
-  private GasGravity(double[] edges, double[] acceleration, double[] potential, double bottomDensity) {
-    this.edges = edges;
+  private GasGravity(PanelValues acceleration, PanelValues potential, double bottomDensity) {
     this.acceleration = acceleration;
     this.potential = potential;
-    this.height = acceleration[acceleration.length - 1] / (fourPiG() * bottomDensity);
+    this.height = acceleration.last() / (fourPiG() * bottomDensity);
   }
 
   private static double fourPiG() {
@@ -62,8 +56,8 @@ final class GasGravity implements GravityLaw {
     private final ToDoubleBiFunction<Double, Double> logDensity;
     private final double bottomLogDensity;
     private double[] edges = new double[64];
-    private double[] acceleration = new double[64 * NODES];
-    private double[] potential = new double[64 * NODES];
+    private double[] acceleration = new double[64 * PanelValues.NODES];
+    private double[] potential = new double[64 * PanelValues.NODES];
     private int panels;
     private double width;
     private double atPotential;
@@ -94,7 +88,7 @@ final class GasGravity implements GravityLaw {
         width = 0.5 * (to - from);
         return;
       }
-      int last = (panels + 1) * NODES - 1;
+      int last = (panels + 1) * PanelValues.NODES - 1;
       double end = logDensity.applyAsDouble(to, potential[last]);
       double fall = Math.abs(start - end);
       if (fall > WIDEST_EFOLDINGS) {
@@ -125,20 +119,20 @@ final class GasGravity implements GravityLaw {
     /** Fills the next panel; whether the iteration settled. */
     private boolean iterate(double from, double to) {
       double half = 0.5 * (to - from);
-      int offset = panels * NODES;
-      double[] source = new double[NODES];
-      for (int i = 0; i < NODES; i++) {
-        potential[offset + i] = atPotential + atAcceleration * half * (1.0 + RULE.nodes()[i]);
+      int offset = panels * PanelValues.NODES;
+      double[] source = new double[PanelValues.NODES];
+      for (int i = 0; i < PanelValues.NODES; i++) {
+        potential[offset + i] = atPotential + atAcceleration * half * (1.0 + PanelValues.RULE.nodes()[i]);
       }
       for (int step = 0; step < MOST_ITERATIONS; step++) {
-        for (int i = 0; i < NODES; i++) {
+        for (int i = 0; i < PanelValues.NODES; i++) {
           source[i] = fourPiG()
-              * Math.exp(logDensity.applyAsDouble(from + half * (1.0 + RULE.nodes()[i]), potential[offset + i]));
+              * Math.exp(logDensity.applyAsDouble(from + half * (1.0 + PanelValues.RULE.nodes()[i]), potential[offset + i]));
         }
-        integrate(source, 0, half, atAcceleration, acceleration, offset);
-        double before = potential[offset + NODES - 1];
-        integrate(acceleration, offset, half, atPotential, potential, offset);
-        double after = potential[offset + NODES - 1];
+        RunningIntegral.integrate(source, 0, half, atAcceleration, acceleration, offset);
+        double before = potential[offset + PanelValues.NODES - 1];
+        RunningIntegral.integrate(acceleration, offset, half, atPotential, potential, offset);
+        double after = potential[offset + PanelValues.NODES - 1];
         if (step > 2 && Math.abs(after - before) <= SETTLED * Math.abs(after)) {
           return true;
         }
@@ -146,47 +140,21 @@ final class GasGravity implements GravityLaw {
       return false;
     }
 
-    private static void integrate(double[] values, int at, double half, double start, double[] into, int offset) {
-      for (int i = 0; i < NODES; i++) {
-        double sum = 0.0;
-        for (int j = 0; j < NODES; j++) {
-          sum += RUNNING_INTEGRAL[i * NODES + j] * values[at + j];
-        }
-        into[offset + i] = start + half * sum;
-      }
-    }
-
     GasGravity build() {
-      return new GasGravity(Arrays.copyOf(edges, panels + 1), Arrays.copyOf(acceleration, panels * NODES),
-          Arrays.copyOf(potential, panels * NODES), Math.exp(bottomLogDensity));
+      double[] all = Arrays.copyOf(edges, panels + 1);
+      return new GasGravity(new PanelValues(all, Arrays.copyOf(acceleration, panels * PanelValues.NODES)),
+          new PanelValues(all, Arrays.copyOf(potential, panels * PanelValues.NODES)), Math.exp(bottomLogDensity));
     }
   }
 
   @Override
   public double acceleration(double z) {
-    int last = edges.length - 1;
-    return z >= edges[last] ? acceleration[acceleration.length - 1] : interpolated(acceleration, z);
+    return z >= acceleration.top() ? acceleration.last() : acceleration.at(z);
   }
 
   @Override
   public double potential(double z) {
-    int last = edges.length - 1;
-    if (z >= edges[last]) {
-      return potential[potential.length - 1] + acceleration[acceleration.length - 1] * (z - edges[last]);
-    }
-    return interpolated(potential, z);
-  }
-
-  private double interpolated(double[] values, double z) {
-    int found = Arrays.binarySearch(edges, z);
-    int panel = found >= 0 ? found : -found - 2;
-    double[] weights = new double[NODES];
-    RULE.interpolate(2.0 * (z - edges[panel]) / (edges[panel + 1] - edges[panel]) - 1.0, weights);
-    double sum = 0.0;
-    for (int i = 0; i < NODES; i++) {
-      sum += weights[i] * values[panel * NODES + i];
-    }
-    return sum;
+    return z >= potential.top() ? potential.last() + acceleration.last() * (z - potential.top()) : potential.at(z);
   }
 
   @Override

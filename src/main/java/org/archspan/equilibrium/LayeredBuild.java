@@ -111,7 +111,7 @@ final class LayeredBuild {
     double most = pressure(sheet, STRONGEST_RATIO, density, cosmicRays);
     refuse(!(wanted < most), String.format(Locale.ROOT, "a field of %.4g G leaves no gas pressure in the sheet: at %s"
         + " the weight above is only %.4g erg/cm^3, which a field of %.4g G would carry alone; lower field.strength or the"
-        + " sheet", strength, EquilibriumBuilder.parsecs(sheet.middle()), most, Math.sqrt(8.0 * Math.PI * most)));
+        + " sheet", strength, EquilibriumBuilder.words(sheet.middle()), most, Math.sqrt(8.0 * Math.PI * most)));
     double logarithm = new BrentSolver(1e-14, 1e-14).solve(200,
         x -> Math.log(pressure(sheet, Math.exp(x), density, cosmicRays) / wanted), Math.log(WEAKEST_RATIO),
         Math.log(STRONGEST_RATIO));
@@ -127,16 +127,17 @@ final class LayeredBuild {
     if (disk.gas() instanceof Gas.Layered layered) {
       for (GasLayer layer : layered.layers().subList(1, layered.layers().size())) {
         refuse(!(layer.from() > bottom && layer.from() < top), "a layer begins at "
-            + EquilibriumBuilder.parsecs(layer.from()) + ", outside the domain from " + EquilibriumBuilder.parsecs(bottom) + " to " + EquilibriumBuilder.parsecs(top)
+            + EquilibriumBuilder.words(layer.from()) + ", outside the domain from "
+            + EquilibriumBuilder.words(bottom) + " to " + EquilibriumBuilder.words(top)
             + "; change gas.layer.from or domain.top");
       }
     }
     if (disk.field() instanceof MagneticField.Sheet sheet) {
       boolean inside = sheet.bottom() >= bottom && sheet.bottom() < top
           && (sheet.top() <= top || Double.isInfinite(sheet.top()));
-      refuse(!inside, "the flux sheet from " + EquilibriumBuilder.parsecs(sheet.bottom()) + " to "
-          + EquilibriumBuilder.parsecs(sheet.top()) + " does not lie in the domain from "
-          + EquilibriumBuilder.parsecs(bottom) + " to " + EquilibriumBuilder.parsecs(top)
+      refuse(!inside, "the flux sheet from " + EquilibriumBuilder.words(sheet.bottom()) + " to "
+          + EquilibriumBuilder.words(sheet.top()) + " does not lie in the domain from "
+          + EquilibriumBuilder.words(bottom) + " to " + EquilibriumBuilder.words(top)
           + "; change field.bottom, field.top or domain.top");
     }
   }

@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.stream.DoubleStream;
 import java.util.stream.Stream;
 import org.archspan.disk.RefusedModelException;
-import org.archspan.mesh.ReferenceElement;
 
 /**
  * An atmosphere whose temperature and magnetic ratio are given functions of height. With the support
@@ -14,9 +13,6 @@ import org.archspan.mesh.ReferenceElement;
  * on panels that are as narrow as the changes of the profiles. Immutable.
  */
 final class ProfileStratification implements Stratification {
-  private static final ReferenceElement RULE = ReferenceElement.ofDegree(16);
-  private static final int NODES = RULE.degree() + 1;
-  private static final double[] RUNNING_INTEGRAL = RunningIntegral.matrix(RULE);
   private static final double FAR_EFOLDINGS = 45.0;
   /** A panel spans at most so many scale heights, and this share of its distance from a bend, or the width of that. */
   private static final double WIDEST_EFOLDINGS = 1.0;
@@ -27,7 +23,7 @@ final class ProfileStratification implements Stratification {
   private final double cosmicRayRatio;
   private final ExternalGravity gravity;
   private final double[] edges;
-  private final double[] logPressure;
+  private final PanelValues logPressure;
 
   /**
    * Integrates the balance upwards.
@@ -42,28 +38,19 @@ final class ProfileStratification implements Stratification {
     this.cosmicRayRatio = cosmicRayRatio;
     this.gravity = gravity;
     edges = edges(bottom);
-    logPressure = new double[(edges.length - 1) * NODES];
+    double[] integral = new double[(edges.length - 1) * PanelValues.NODES];
+    double[] fall = new double[PanelValues.NODES];
     double start = Math.log(bottomDensity * perMass(bottom));
     for (int panel = 0; panel + 1 < edges.length; panel++) {
-      start = integrate(panel, start);
-    }
-  }
-
-  private double integrate(int panel, double start) {
-    double half = 0.5 * (edges[panel + 1] - edges[panel]);
-    double[] fall = new double[NODES];
-    for (int i = 0; i < NODES; i++) {
-      double z = edges[panel] + half * (1.0 + RULE.nodes()[i]);
-      fall[i] = -gravity.acceleration(z) / perMass(z);
-    }
-    for (int i = 0; i < NODES; i++) {
-      double sum = 0.0;
-      for (int j = 0; j < NODES; j++) {
-        sum += RUNNING_INTEGRAL[i * NODES + j] * fall[j];
+      for (int i = 0; i < fall.length; i++) {
+        double z = PanelValues.node(edges, panel, i);
+        fall[i] = -gravity.acceleration(z) / perMass(z);
       }
-      logPressure[panel * NODES + i] = start + half * sum;
+      int offset = panel * PanelValues.NODES;
+      RunningIntegral.integrate(fall, 0, 0.5 * (edges[panel + 1] - edges[panel]), start, integral, offset);
+      start = integral[offset + PanelValues.NODES - 1];
     }
-    return logPressure[panel * NODES + NODES - 1];
+    logPressure = new PanelValues(edges, integral);
   }
 
   private double[] edges(double bottom) {
@@ -115,20 +102,9 @@ final class ProfileStratification implements Stratification {
   }
 
   private double logPressure(double z) {
-    int last = edges.length - 1;
-    if (z >= edges[last]) {
-      return logPressure[logPressure.length - 1]
-          - (gravity.potential(z) - gravity.potential(edges[last])) / perMass(edges[last]);
-    }
-    int found = Arrays.binarySearch(edges, z);
-    int panel = Math.max(0, found >= 0 ? found : -found - 2);
-    double[] weights = new double[NODES];
-    RULE.interpolate(2.0 * (z - edges[panel]) / (edges[panel + 1] - edges[panel]) - 1.0, weights);
-    double sum = 0.0;
-    for (int i = 0; i < NODES; i++) {
-      sum += weights[i] * logPressure[panel * NODES + i];
-    }
-    return sum;
+    double top = logPressure.top();
+    return z >= top ? logPressure.last() - (gravity.potential(z) - gravity.potential(top)) / perMass(top)
+        : logPressure.at(z);
   }
 
   @Override
