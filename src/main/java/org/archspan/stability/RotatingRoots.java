@@ -13,6 +13,8 @@ final class RotatingRoots {
   private static final double GOOD = 1e-9;
   private static final int MOST_STEPS = 40;
   private static final double SAME = 1e-6;
+  /** Of |s|: slower growth is rounding. */
+  private static final double NEUTRAL = 1e-9;
   private final RotatingDeterminant determinant;
   private final double kx;
   private final double ky;
@@ -34,9 +36,10 @@ final class RotatingRoots {
     return (int) found.stream().mapToLong(root -> root.getImaginary() == 0.0 ? 1 : 2).sum();
   }
 
-  /** Refines a guess with nothing divided out; null when it leads nowhere. */
+  /** Refines a guess with nothing divided out; null when it leads nowhere, or to a neutral oscillation. */
   Complex refine(Complex guess) {
-    return muller(guess, List.of());
+    Complex root = muller(guess, List.of());
+    return root != null && root.getReal() > NEUTRAL * root.abs() ? root : null;
   }
 
   /** Finds the zeros on the real axis at which the determinant, real there, changes its sign between points of a scan. */
