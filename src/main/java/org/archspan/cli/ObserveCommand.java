@@ -26,6 +26,7 @@ import org.archspan.units.Quantity;
 import org.archspan.units.UnitException;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Parameters;
@@ -73,21 +74,8 @@ final class ObserveCommand implements Callable<Integer> {
       + " ${DEFAULT-VALUE})")
   long seed;
 
-  @Option(names = "--threads", paramLabel = "N", description = "threads to use (default: all cores); the digits do not"
-      + " depend on it")
-  int threads = Runtime.getRuntime().availableProcessors();
-
-  @Option(names = "--out", paramLabel = "DIR", description = "write tables and figures into this folder")
-  Path out;
-
-  @Option(names = "--overwrite", description = "replace files that exist in --out")
-  boolean overwrite;
-
-  @Option(names = "--json", description = "print the result as one JSON document, and nothing else")
-  boolean json;
-
-  @Option(names = "--quiet", description = "print no summary and no progress")
-  boolean quiet;
+  @Mixin
+  OutputOptions output;
 
   @Spec
   CommandSpec spec;
@@ -97,15 +85,15 @@ final class ObserveCommand implements Callable<Integer> {
     if (trials < 100 || trials > 10_000_000) {
       throw fault("--trials " + trials + ": allowed is 100 to 10000000");
     }
-    if (threads < 1 || threads > 1024) {
-      throw fault("--threads " + threads + ": allowed is 1 to 1024");
-    }
+    output.fault().ifPresent(fault -> {
+      throw fault(fault);
+    });
     ObserveOptions options = new ObserveOptions(optionalLength("--shortest", shortest),
-        optionalLength("--longest", longest), trials, seed, threads);
+        optionalLength("--longest", longest), trials, seed, output.threads);
     Complexes complexes = ComplexesReader.read(table);
     List<PlanePosition> positions = positions(complexes);
     ObservedArm arm;
-    try (Progress progress = new Progress("observe", trials, quiet || json)) {
+    try (Progress progress = new Progress("observe", trials, output.quiet || output.json)) {
       arm = ArmStudy.solve(positions, options, progress::step);
     }
     write(new ObservationSource(table.toString(), complexes.names(), geometry(), seed), arm);
@@ -114,12 +102,12 @@ final class ObserveCommand implements Callable<Integer> {
 
   private void write(ObservationSource source, ObservedArm arm) throws IOException {
     OutputUnits units = OutputUnits.galactic();
-    if (out != null) {
-      ObservationFiles.write(source, arm, units, out, overwrite);
+    if (output.out != null) {
+      ObservationFiles.write(source, arm, units, output.out, output.overwrite);
     }
-    if (json) {
+    if (output.json) {
       spec.commandLine().getOut().print(ObservationJson.text(source, arm, units));
-    } else if (!quiet) {
+    } else if (!output.quiet) {
       spec.commandLine().getOut().print(ObservationText.text(source, arm, units, ModelCommand.width()));
     }
     spec.commandLine().getOut().flush();

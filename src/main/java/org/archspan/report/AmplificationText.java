@@ -13,7 +13,6 @@ import org.archspan.disk.Disk;
 import org.archspan.equilibrium.Equilibrium;
 import org.archspan.shear.Amplification;
 import org.archspan.shear.StartGain;
-import org.archspan.units.Constants;
 import org.archspan.units.OutputUnits;
 
 /** A wave in a shearing disk in words. */
@@ -32,13 +31,9 @@ public final class AmplificationText {
   public static String text(String title, Disk disk, Equilibrium equilibrium, Amplification wave, OutputUnits units,
       int width) {
     TextBlock block = Assumptions.block(title, disk.withoutRotation(), equilibrium, units, width);
-    disk.rotation().ifPresent(rotation -> block.labelled("rotation", speed(rotation.angularSpeed())
-        + ", epicyclic frequency " + speed(rotation.kappa())));
+    disk.rotation().ifPresent(rotation -> block.labelled("rotation", Numbers.galacticRate(rotation.angularSpeed())
+        + ", epicyclic frequency " + Numbers.galacticRate(rotation.kappa())));
     return new AmplificationText(wave, units).fill(block).text();
-  }
-
-  private static String speed(double perSecond) {
-    return Numbers.plain(perSecond * 1e3 * Constants.PARSEC / 1e5) + " km/s/kpc";
   }
 
   private TextBlock fill(TextBlock block) {

@@ -16,7 +16,6 @@ import org.archspan.equilibrium.Equilibrium;
 import org.archspan.equilibrium.GasState;
 import org.archspan.gravity.GravityLaw;
 import org.archspan.spacing.WaveRange;
-import org.archspan.units.Constants;
 import org.archspan.units.OutputUnits;
 
 /** What a result rests on, in words. */
@@ -35,8 +34,8 @@ public final class Assumptions {
     lines.put("field", field(disk, equilibrium, units));
     lines.put("cosmic rays", cosmicRays(disk.cosmicRays(), bottom));
     lines.put("gravity", gravity(disk, equilibrium));
-    disk.rotation().ifPresent(rotation -> lines.put("rotation", Numbers.plain(rotation.angularSpeed() * 1e3
-        * Constants.PARSEC / 1e5) + " km/s/kpc, taken as rigid"));
+    disk.rotation().ifPresent(rotation -> lines.put("rotation", Numbers.galacticRate(rotation.angularSpeed())
+        + ", taken as rigid"));
     lines.put("domain", domain(equilibrium, units));
     lines.put("waves", waves(range, units));
     return lines;

@@ -4,6 +4,7 @@ import java.math.BigDecimal;
 import java.math.MathContext;
 import java.math.RoundingMode;
 import java.util.Locale;
+import org.archspan.units.Constants;
 import org.archspan.units.OutputUnits;
 
 /** Numbers for people: few digits, and the unit in which they are short. */
@@ -110,5 +111,10 @@ public final class Numbers {
   /** A signed change in per cent. */
   public static String change(double relative) {
     return Double.isNaN(relative) ? "not known" : String.format(Locale.ROOT, "%+.1f per cent", 100.0 * relative);
+  }
+
+  /** An angular speed or a frequency of a galaxy, s^-1, in words: {@code 27.00 km/s/kpc}. */
+  static String galacticRate(double perSecond) {
+    return plain(perSecond * 1e3 * Constants.PARSEC / 1e5) + " km/s/kpc";
   }
 }

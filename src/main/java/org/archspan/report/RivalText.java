@@ -13,12 +13,10 @@ import org.archspan.rivals.Rival;
 import org.archspan.rivals.RivalInputs;
 import org.archspan.rivals.RivalResult;
 import org.archspan.rivals.StellarDisk;
-import org.archspan.units.Constants;
 import org.archspan.units.OutputUnits;
 
 /** Rival instabilities in words. */
 public final class RivalText {
-  private static final double KILOMETRE_PER_SECOND_PER_KILOPARSEC = 1e5 / (1e3 * Constants.PARSEC);
 
   private RivalText() {
   }
@@ -54,11 +52,11 @@ public final class RivalText {
 
   private static String rotation(Disk disk, RivalInputs inputs) {
     return disk.rotation().map(rotation -> "frequency "
-        + Numbers.plain(rotation.kappa() / KILOMETRE_PER_SECOND_PER_KILOPARSEC) + " km/s/kpc"
+        + Numbers.galacticRate(rotation.kappa())
         + (rotation.epicyclicFrequency().isPresent() ? "" : ", twice the angular speed, as none is given"))
         .orElse("none")
         + (inputs.lag().isPresent() ? "; lags with height by "
-            + Numbers.plain(inputs.lag().getAsDouble() / KILOMETRE_PER_SECOND_PER_KILOPARSEC) + " km/s/kpc" : "");
+            + Numbers.galacticRate(inputs.lag().getAsDouble()) : "");
   }
 
   private static String stars(RivalInputs inputs, OutputUnits units) {

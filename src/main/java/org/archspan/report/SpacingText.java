@@ -12,7 +12,6 @@ import org.archspan.spacing.CloudComplex;
 import org.archspan.spacing.HeldBy;
 import org.archspan.spacing.RotatingAnswer;
 import org.archspan.spacing.SpacingResult;
-import org.archspan.units.Constants;
 import org.archspan.units.OutputUnits;
 
 /** The answer of the main job in words: what was assumed, what was found, how sure, and what limits it. */
@@ -163,12 +162,13 @@ public final class SpacingText {
   }
 
   private void rotation(RotatingAnswer rotation) {
-    String spin = " (" + Numbers.plain(rotation.angularSpeed() * 1e3 * Constants.PARSEC / 1e5) + " km/s/kpc)";
+    String spin = " (" + Numbers.galacticRate(rotation.angularSpeed()) + ")";
     result.spacingPeak().filter(peak -> peak.frequency() > 0.0).ifPresent(peak -> block.sentence(
         "It oscillates while it grows, with a period of " + Numbers.time(2.0 * Math.PI / peak.frequency(), units) + "."));
-    rotation.without().spacingPeak().ifPresent(still -> block.sentence((result.stable() ? "That is with rotation"
-        : "All this is with rotation") + spin + "; without it the wavelength would be " + Numbers.length(still.wavelength(), still.wavelengthError(), units)
-        + " and the growth time " + Numbers.time(still.growthTime(), still.growthError(), units) + "."));
+    rotation.without().spacingPeak().ifPresent(still -> block.sentence(
+        (result.stable() ? "That is with rotation" : "All this is with rotation") + spin
+            + "; without it the wavelength would be " + Numbers.length(still.wavelength(), still.wavelengthError(), units)
+            + " and the growth time " + Numbers.time(still.growthTime(), still.growthError(), units) + "."));
   }
 
   private void complex(CloudComplex complex) {

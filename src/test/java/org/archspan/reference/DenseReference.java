@@ -1,6 +1,5 @@
 package org.archspan.reference;
 
-import dev.ludovic.netlib.lapack.JavaLAPACK;
 import java.util.Arrays;
 import java.util.function.ToDoubleFunction;
 import java.util.stream.IntStream;
@@ -10,7 +9,6 @@ import org.archspan.closure.CosmicRayClosure;
 import org.archspan.closure.GasClosure;
 import org.archspan.equilibrium.Equilibrium;
 import org.archspan.equilibrium.GasState;
-import org.netlib.util.intW;
 
 /**
  * The full problem in (X, Y, Z), nothing eliminated, by collocation on one set of Chebyshev points and
@@ -27,6 +25,8 @@ import org.netlib.util.intW;
  * with the velocities and {@code w = s/(s + kappa kx^2) d}, that is {@code s w = d(velocity) - kappa kx^2 w}.
  */
 public final class DenseReference {
+  /** Eigenvalues are of order one in these units and carry rounding of about 1e-12. */
+  private static final double ROUNDING = 1e-9;
   private final int points;
   private final Parity parity;
   private final TopBoundary topBoundary;
@@ -85,7 +85,7 @@ public final class DenseReference {
     boolean leaking = diffusivity > 0.0 && !Double.isInfinite(diffusivity) && max(cosmic) > 0.0;
     double x = kx * length;
     double y = ky * length;
-    double[] values = leaking ? firstOrder(x, y, true, 0.0).positive() : secondOrder(x, y).positive();
+    double[] values = leaking ? firstOrder(x, y, true, 0.0).realAbove(ROUNDING, 0.0) : secondOrder(x, y).realAbove(ROUNDING, 0.0);
     return Arrays.stream(values).map(v -> (leaking ? v : Math.sqrt(v)) * speed / length).toArray();
   }
 
@@ -98,7 +98,7 @@ public final class DenseReference {
    */
   public double[][] rotatingGrowth(double kx, double ky, double angularSpeed, double slowest) {
     boolean leaking = diffusivity > 0.0 && !Double.isInfinite(diffusivity) && max(cosmic) > 0.0;
-    Pencil pencil = firstOrder(kx * length, ky * length, leaking, 2.0 * angularSpeed * length / speed);
+    DensePencil pencil = firstOrder(kx * length, ky * length, leaking, 2.0 * angularSpeed * length / speed);
     double unit = speed / length;
     return Arrays.stream(pencil.growing()).filter(s -> s[0] * unit > slowest && s[1] > -1e-9)
         .map(s -> new double[] {s[0] * unit, s[1] * unit}).sorted((a, b) -> Double.compare(b[0], a[0]))
@@ -106,8 +106,8 @@ public final class DenseReference {
   }
 
   /** Eigenvalue s^2, blocks X, Y, Z. */
-  private Pencil secondOrder(double kx, double ky) {
-    Pencil pencil = new Pencil(3 * points);
+  private DensePencil secondOrder(double kx, double ky) {
+    DensePencil pencil = new DensePencil(3 * points);
     equations(pencil, kx, ky, 0, false);
     identity(pencil, 0, 0, 3 * points);
     boundaries(pencil, kx, ky, false, false);
@@ -115,9 +115,9 @@ public final class DenseReference {
   }
 
   /** Eigenvalue s, blocks of X, Y, Z, then their velocities, then w. */
-  private Pencil firstOrder(double kx, double ky, boolean leaking, double coriolis) {
+  private DensePencil firstOrder(double kx, double ky, boolean leaking, double coriolis) {
     int n = points;
-    Pencil pencil = new Pencil(7 * n);
+    DensePencil pencil = new DensePencil(7 * n);
     identity(pencil, 0, 0, 7 * n);
     for (int i = 0; i < 3 * n; i++) {
       pencil.addLeft(i, 3 * n + i, 1.0);
@@ -135,7 +135,7 @@ public final class DenseReference {
   }
 
   /** Rows {@code s^2 (X, Y, Z) = ...} from this row on. */
-  private void equations(Pencil pencil, double kx, double ky, int firstRow, boolean leaking) {
+  private void equations(DensePencil pencil, double kx, double ky, int firstRow, boolean leaking) {
     int n = points;
     for (int i = 0; i < n; i++) {
       gasPressure(pencil, firstRow + i, i, -kx, kx, ky, leaking);
@@ -151,13 +151,13 @@ public final class DenseReference {
   }
 
   /** Adds {@code factor d} at node i, from displacements or velocities that start at this column. */
-  private void divergence(Pencil pencil, int row, int i, double factor, double kx, double ky,
+  private void divergence(DensePencil pencil, int row, int i, double factor, double kx, double ky,
       int firstColumn) {
     pencil.addLeft(row, firstColumn + i, factor * kx);
     acrossDivergence(pencil, row, i, factor, ky, firstColumn);
   }
 
-  private void acrossDivergence(Pencil pencil, int row, int i, double factor, double ky, int firstColumn) {
+  private void acrossDivergence(DensePencil pencil, int row, int i, double factor, double ky, int firstColumn) {
     int vertical = firstColumn + 2 * points;
     pencil.addLeft(row, firstColumn + points + i, factor * ky);
     pencil.addLeft(row, vertical + i, -factor * 0.5 * slope[i]);
@@ -167,7 +167,7 @@ public final class DenseReference {
   }
 
   /** Adds {@code factor q} at node i. */
-  private void gasPressure(Pencil pencil, int row, int i, double factor, double kx, double ky,
+  private void gasPressure(DensePencil pencil, int row, int i, double factor, double kx, double ky,
       boolean leaking) {
     divergence(pencil, row, i, factor * stiffness[i], kx, ky, 0);
     pencil.addLeft(row, 2 * points + i, -factor * g[i]);
@@ -177,7 +177,7 @@ public final class DenseReference {
   }
 
   /** Adds {@code factor P} at node i. */
-  private void totalPressure(Pencil pencil, int row, int i, double factor, double kx, double ky,
+  private void totalPressure(DensePencil pencil, int row, int i, double factor, double kx, double ky,
       boolean leaking) {
     if (factor != 0.0) {
       gasPressure(pencil, row, i, factor, kx, ky, leaking);
@@ -185,13 +185,13 @@ public final class DenseReference {
     }
   }
 
-  private void boundaries(Pencil pencil, double kx, double ky, boolean firstOrder, boolean leaking) {
+  private void boundaries(DensePencil pencil, double kx, double ky, boolean firstOrder, boolean leaking) {
     end(pencil, 0, parity != Parity.FLEXING, kx, ky, firstOrder, leaking);
     end(pencil, points - 1, topBoundary == TopBoundary.LID, kx, ky, firstOrder, leaking);
   }
 
   /** At an end Z = 0, or the Lagrangian change of the total pressure, {@code P + g Z}, vanishes. */
-  private void end(Pencil pencil, int node, boolean rigid, double kx, double ky, boolean firstOrder, boolean leaking) {
+  private void end(DensePencil pencil, int node, boolean rigid, double kx, double ky, boolean firstOrder, boolean leaking) {
     int z = 2 * points + node;
     int row = firstOrder ? z + 3 * points : z;
     pencil.clearRow(row);
@@ -207,77 +207,11 @@ public final class DenseReference {
     }
   }
 
-  private static void identity(Pencil pencil, int row, int column, int size) {
+  private static void identity(DensePencil pencil, int row, int column, int size) {
     IntStream.range(0, size).forEach(i -> pencil.addRight(row + i, column + i, 1.0));
   }
 
   private static double max(double[] values) {
     return Arrays.stream(values).max().orElse(0.0);
-  }
-
-  /** {@code A u = lambda B u}, both dense and column by column. */
-  private static final class Pencil {
-    private final int size;
-    private final double[] left;
-    private final double[] right;
-
-    Pencil(int size) {
-      this.size = size;
-      left = new double[size * size];
-      right = new double[size * size];
-    }
-
-    void addLeft(int row, int column, double value) {
-      left[row + size * column] += value;
-    }
-
-    void addRight(int row, int column, double value) {
-      right[row + size * column] += value;
-    }
-
-    void clearRow(int row) {
-      for (int column = 0; column < size; column++) {
-        left[row + size * column] = 0.0;
-        right[row + size * column] = 0.0;
-      }
-    }
-
-    /** Finite eigenvalues with a positive real part; overwrites the matrices. */
-    double[][] growing() {
-      double[] real = new double[size];
-      double[] imaginary = new double[size];
-      double[] denominator = new double[size];
-      double[] work = new double[16 * size];
-      intW info = new intW(0);
-      JavaLAPACK.getInstance().dggev("N", "N", size, left, size, right, size, real, imaginary, denominator,
-          new double[1], 1, new double[1], 1, work, work.length, info);
-      if (info.val != 0) {
-        throw new IllegalStateException("dggev did not converge: info " + info.val);
-      }
-      return IntStream.range(0, size).filter(i -> Math.abs(denominator[i]) > 1e-9 * Math.hypot(real[i], imaginary[i]))
-          .mapToObj(i -> new double[] {real[i] / denominator[i], imaginary[i] / denominator[i]})
-          .filter(s -> s[0] > 0.0).toArray(double[][]::new);
-    }
-
-    /** Real positive eigenvalues, descending; overwrites the matrices. */
-    double[] positive() {
-      double[] real = new double[size];
-      double[] imaginary = new double[size];
-      double[] denominator = new double[size];
-      double[] work = new double[16 * size];
-      intW info = new intW(0);
-      JavaLAPACK.getInstance().dggev("N", "N", size, left, size, right, size, real, imaginary, denominator,
-          new double[1], 1, new double[1], 1, work, work.length, info);
-      if (info.val != 0) {
-        throw new IllegalStateException("dggev did not converge: info " + info.val);
-      }
-      // 1e-9: eigenvalues are of order one in these units and carry rounding of about 1e-12; infinite ones
-      // (boundary rows) have a vanishing denominator
-      double[] ascending = IntStream.range(0, size)
-          .filter(i -> Math.abs(denominator[i]) > 1e-9 * Math.abs(real[i]) && imaginary[i] == 0.0)
-          .mapToDouble(i -> real[i] / denominator[i]).filter(v -> v > 1e-9).sorted().toArray();
-      int last = ascending.length - 1;
-      return IntStream.rangeClosed(0, last).mapToDouble(i -> ascending[last - i]).toArray();
-    }
   }
 }

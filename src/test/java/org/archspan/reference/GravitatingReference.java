@@ -1,6 +1,5 @@
 package org.archspan.reference;
 
-import dev.ludovic.netlib.lapack.JavaLAPACK;
 import java.util.Arrays;
 import java.util.function.ToDoubleFunction;
 import java.util.stream.IntStream;
@@ -10,7 +9,6 @@ import org.archspan.closure.GasClosure;
 import org.archspan.equilibrium.Equilibrium;
 import org.archspan.equilibrium.GasState;
 import org.archspan.units.Constants;
-import org.netlib.util.intW;
 
 /**
  * The full problem in (X, Y, Z, psi) of a gas that feels its own perturbed gravity, nothing eliminated, by collocation on
@@ -33,8 +31,7 @@ final class GravitatingReference {
   private final double[] tension;
   private final double[] stiffness;
   private final double[] jeans;
-  private double[] left;
-  private double[] right;
+  private DensePencil pencil;
   private final double[] kx;
   private final double[] ky;
   private double waveSquared;
@@ -84,22 +81,22 @@ final class GravitatingReference {
 
   private double[] growthRates() {
     waveSquared = kx[0] * kx[0] + ky[0] * ky[0];
-    left = new double[16 * n * n];
-    right = new double[16 * n * n];
+    pencil = new DensePencil(4 * n);
     for (int i = 0; i < n; i++) {
       gasPressure(i, i, -kx[i]);
       totalPressure(n + i, i, -ky[i]);
       add(n + i, n + i, -tension[i] * kx[i] * kx[i]);
       vertical(i);
       potential(i);
-      IntStream.of(i, n + i, 2 * n + i).forEach(row -> right[row + 4 * n * row] = 1.0);
+      IntStream.of(i, n + i, 2 * n + i).forEach(row -> pencil.addRight(row, row, 1.0));
     }
     ends();
-    return Arrays.stream(positive()).map(v -> Math.sqrt(v) * speed / length).toArray();
+    // rounding of eigenvalues that are of order one; rows without s^2 make some of them nearly real only
+    return Arrays.stream(pencil.realAbove(1e-7, 1e-8)).map(v -> Math.sqrt(v) * speed / length).toArray();
   }
 
   private void add(int row, int column, double value) {
-    left[row + 4 * n * column] += value;
+    pencil.addLeft(row, column, value);
   }
 
   private void vertical(int i) {
@@ -148,17 +145,10 @@ final class GravitatingReference {
     perpendicular(row, i, factor * tension[i]);
   }
 
-  private void clear(int row) {
-    for (int column = 0; column < 4 * n; column++) {
-      left[row + 4 * n * column] = 0.0;
-      right[row + 4 * n * column] = 0.0;
-    }
-  }
-
   private void ends() {
     boolean mirror = parity == Parity.MIRROR;
     vertical(0, mirror);
-    clear(3 * n);
+    pencil.clearRow(3 * n);
     if (mirror) {
       slopeOfPotential(3 * n, 0);
     } else {
@@ -167,7 +157,7 @@ final class GravitatingReference {
     int last = n - 1;
     vertical(last, top == TopBoundary.LID);
     int row = 3 * n + last;
-    clear(row);
+    pencil.clearRow(row);
     slopeOfPotential(row, last);
     add(row, row, Math.sqrt(waveSquared));
     add(row, 2 * n + last, top == TopBoundary.FREE ? jeans[last] : 0.0);
@@ -182,7 +172,7 @@ final class GravitatingReference {
   /** Z = 0; or no Lagrangian change of the total pressure at a free surface, no change at all at a midplane that flexes. */
   private void vertical(int node, boolean rigid) {
     int row = 2 * n + node;
-    clear(row);
+    pencil.clearRow(row);
     if (rigid) {
       add(row, row, 1.0);
     } else {
@@ -192,25 +182,5 @@ final class GravitatingReference {
       add(row, row, g[node]);
       add(row, 3 * n + node, jeans[node]);
     }
-  }
-
-  private double[] positive() {
-    int size = 4 * n;
-    double[] real = new double[size];
-    double[] imaginary = new double[size];
-    double[] denominator = new double[size];
-    double[] work = new double[16 * size];
-    intW info = new intW(0);
-    JavaLAPACK.getInstance().dggev("N", "N", size, left, size, right, size, real, imaginary, denominator,
-        new double[1], 1, new double[1], 1, work, work.length, info);
-    if (info.val != 0) {
-      throw new IllegalStateException("dggev did not converge: info " + info.val);
-    }
-    // infinite eigenvalues (rows without s^2) have a vanishing denominator; 1e-8: rounding of the finite ones
-    double[] ascending = IntStream.range(0, size)
-        .filter(i -> Math.abs(denominator[i]) > 1e-9 * Math.abs(real[i]) && Math.abs(imaginary[i]) < 1e-8)
-        .mapToDouble(i -> real[i] / denominator[i]).filter(v -> v > 1e-7).sorted().toArray();
-    int end = ascending.length - 1;
-    return IntStream.rangeClosed(0, end).mapToDouble(i -> ascending[end - i]).toArray();
   }
 }
