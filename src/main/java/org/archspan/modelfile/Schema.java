@@ -111,7 +111,8 @@ public final class Schema {
     specs.add(density("gas.midplane-density"));
     specs.add(quantity("gas.surface-density", "Msun/pc^2", POSITIVE, "none", "instead of the midplane density"));
     specs.add(number("gas.mass-per-hydrogen", POSITIVE, "1.4", "mass for each hydrogen nucleus, in hydrogen masses"));
-    specs.add(quantity("gas.cooling-time", "Myr", POSITIVE, "none", "Newtonian cooling of the perturbations towards the first temperature"));
+    specs.add(quantity("gas.cooling-time", "Myr", POSITIVE, "none",
+        "Newtonian cooling of the perturbations towards the first temperature"));
     specs.add(choice("gas.self-gravity", "off", "the gas's own gravity: nowhere, in the base state, or there and on the"
         + " perturbations", "off", "equilibrium", "full"));
     specs.add(new KeySpec("gas.component.#.name", TEXT, "", ANY, List.of(), "none", "name of a component"));

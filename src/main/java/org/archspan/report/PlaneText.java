@@ -32,7 +32,8 @@ public final class PlaneText {
     } else {
       block.sentence("Fastest on the grid: one e-folding in " + Numbers.time(1.0 / best, units) + " at a wavelength of "
           + Numbers.length(2.0 * Math.PI / plane.along()[bestAlong], units) + " along and "
-          + Numbers.length(2.0 * Math.PI / Math.abs(plane.across()[bestAcross]), units) + " across the field" + (disk.fieldTurn() == 0.0 ? "." : " at the lower end."));
+          + Numbers.length(2.0 * Math.PI / Math.abs(plane.across()[bestAcross]), units)
+              + " across the field" + (disk.fieldTurn() == 0.0 ? "." : " at the lower end."));
     }
     block.sentence(limit == 0.0 ? "Infinitely short waves across the field, which no ideal wave outgrows, do not grow"
         + " at the wavelengths of the grid either."

@@ -110,7 +110,7 @@ public final class SpacingFiles {
     List<GrowthFigure.Mark> marks = new ArrayList<>();
     if (result.rotation().isPresent()) {
       result.spacingPeak().ifPresent(peak -> marks.add(mark("with rotation", peak)));
-      result.drivenPeak().ifPresent(peak -> marks.add(mark("without, as the curves", peak)));
+      result.withoutRotation().spacingPeak().ifPresent(peak -> marks.add(mark("without, as the curves", peak)));
       return marks;
     }
     result.spacing().map(result.branches()::get).ifPresent(peak -> marks.add(mark("sets the spacing", peak)));

@@ -62,7 +62,7 @@ public final class SpacingText {
     block.sentence(sentence(result, units));
     result.complex().ifPresent(this::complex);
     result.rotation().ifPresent(this::rotation);
-    result.drivenPeak().flatMap(BranchPeak::work).ifPresent(work -> block.sentence(
+    result.withoutRotation().spacingPeak().flatMap(BranchPeak::work).ifPresent(work -> block.sentence(
         (result.rotation().isPresent() ? "What drives it without rotation. " : "") + Drivers.sentence(work)));
     BranchPeak peak = result.spacingPeak().orElseThrow();
     if (peak.heldBy() == HeldBy.DISK) {

@@ -23,7 +23,7 @@ public final class ElasticityStudy {
   public ElasticityStudy(Disk disk, SearchOptions options, SpacingResult result) {
     this.disk = disk;
     this.options = options;
-    this.result = result.rotation().map(RotatingAnswer::without).orElse(result);
+    this.result = result.withoutRotation();
   }
 
   /** The elasticities; their cost is that of four base states for each input. */

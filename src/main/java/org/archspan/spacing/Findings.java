@@ -86,7 +86,8 @@ final class Findings {
         ? String.format(Locale.ROOT, "%.3g scale heights", options.gatheringHeight().value()) : "the height asked for";
     if (spacing.isEmpty()) {
       sentences.add("No unstable branch has its kinetic-energy centroid within " + limit + " of the "
-          + (equilibrium.aboutMidplane() ? "midplane" : "floor") + ": nothing gathers the disk's own gas, and the spacing given is that of the fastest growth anywhere.");
+          + (equilibrium.aboutMidplane() ? "midplane" : "floor") + ": nothing gathers the disk's own gas,"
+          + " and the spacing given is that of the fastest growth anywhere.");
     } else if (branches.get(spacing.get()) != fastest) {
       sentences.add("The fastest growth of all is not the one that gathers the disk's own gas; the spacing is that of"
           + " the fastest branch whose kinetic-energy centroid lies within " + limit + ".");

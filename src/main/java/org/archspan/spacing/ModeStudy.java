@@ -31,7 +31,7 @@ public final class ModeStudy {
 
   /** The same, for a result at hand. */
   public Optional<EigenMode> spacingMode(SpacingResult result) {
-    return result.rotation().map(RotatingAnswer::without).orElse(result).spacingPeak().filter(peak -> !peak.continuum() && peak.wavenumber() > 0.0)
+    return result.withoutRotation().spacingPeak().filter(peak -> !peak.continuum() && peak.wavenumber() > 0.0)
         .flatMap(peak -> mode(peak.parity(), peak.order(), peak.wavenumber()));
   }
 

@@ -64,8 +64,8 @@ public record SpacingResult(Equilibrium equilibrium, double forceBalanceResidual
     return spacing.map(branches::get).or(() -> fastest);
   }
 
-  /** The peak whose drivers are known: that of the spacing, without rotation. */
-  public Optional<BranchPeak> drivenPeak() {
-    return rotation.map(RotatingAnswer::without).orElse(this).spacingPeak();
+  /** The same answer without rotation: itself where there is none. */
+  public SpacingResult withoutRotation() {
+    return rotation.map(RotatingAnswer::without).orElse(this);
   }
 }

@@ -9,7 +9,6 @@ import org.archspan.boundary.Parity;
 import org.archspan.reference.UniformAtmosphere;
 import org.archspan.spacing.BranchPeak;
 import org.archspan.spacing.HeldBy;
-import org.archspan.spacing.RotatingAnswer;
 import org.archspan.spacing.SpacingResult;
 import org.archspan.spacing.SpacingStudy;
 import org.archspan.units.Constants;
@@ -25,7 +24,7 @@ class ShippedAnswersTest {
     Model model = ModelTexts.model(ShippedModels.text(name), settings);
     SpacingResult result = new SpacingStudy(model.disk(), model.options(), model.arm()).solve();
     // what was published, and the closed forms, are without rotation
-    return result.rotation().map(RotatingAnswer::without).orElse(result);
+    return result.withoutRotation();
   }
 
   private static BranchPeak fastestOf(SpacingResult result, Parity parity) {
