@@ -71,8 +71,9 @@ public final class SpacingText {
           + Numbers.change(peak.tallerGrowthChange()) + ".");
     }
     shortAcross();
-    result.longestStableWavelength().ifPresent(shortest -> block.sentence("Waves " + (directed() ? "in that direction" : "along the field") + " shorter than "
-        + Numbers.length(shortest, units) + " are stable."));
+    result.longestStableWavelength().ifPresent(shortest -> block.sentence("Waves "
+        + (directed() ? "in that direction" : "along the field") + " shorter than " + Numbers.length(shortest, units)
+        + " are stable."));
   }
 
   private void shortAcross() {
