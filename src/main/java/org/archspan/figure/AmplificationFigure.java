@@ -1,6 +1,5 @@
 package org.archspan.figure;
 
-import java.awt.Color;
 import java.awt.Graphics2D;
 import java.awt.geom.Rectangle2D;
 import java.util.Arrays;
@@ -36,13 +35,8 @@ public final class AmplificationFigure implements Figure {
   }
 
   @Override
-  public double width() {
-    return FigureStyle.PAGE;
-  }
-
-  @Override
-  public double height() {
-    return 0.42 * FigureStyle.PAGE;
+  public Page page() {
+    return new Page(FigureStyle.PAGE, 0.42 * FigureStyle.PAGE, style.background());
   }
 
   @Override
@@ -50,11 +44,6 @@ public final class AmplificationFigure implements Figure {
     return "Left: velocity over that at the start and density contrast of a wave wound up by differential rotation, with the"
         + " growth of the fastest modes of rigid rotation and of no rotation; right: "
         + (wave.starts().size() > 1 ? "e-foldings gained from each start" : "radial over azimuthal wavenumber");
-  }
-
-  @Override
-  public Color background() {
-    return style.background();
   }
 
   @Override

@@ -45,24 +45,14 @@ public final class ComparisonCurves implements Figure {
   }
 
   @Override
-  public double width() {
-    return FigureStyle.COLUMN;
-  }
-
-  @Override
-  public double height() {
-    return 1.45 * FigureStyle.COLUMN;
+  public Page page() {
+    return new Page(FigureStyle.COLUMN, 1.45 * FigureStyle.COLUMN, style.background());
   }
 
   @Override
   public String description() {
     return "Wavelength, growth time and mass of a complex against " + input.key() + "; filled points: held by the disk,"
         + " open: by the lid, triangles: by the atmosphere above";
-  }
-
-  @Override
-  public java.awt.Color background() {
-    return style.background();
   }
 
   @Override

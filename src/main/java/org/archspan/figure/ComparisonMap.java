@@ -53,23 +53,13 @@ public final class ComparisonMap implements Figure {
   }
 
   @Override
-  public double width() {
-    return FigureStyle.PAGE;
-  }
-
-  @Override
-  public double height() {
-    return 0.42 * FigureStyle.PAGE;
+  public Page page() {
+    return new Page(FigureStyle.PAGE, 0.42 * FigureStyle.PAGE, style.background());
   }
 
   @Override
   public String description() {
     return "Wavelength and growth time over " + across.key() + " and " + up.key() + "; " + MARKS;
-  }
-
-  @Override
-  public Color background() {
-    return style.background();
   }
 
   @Override

@@ -1,7 +1,6 @@
 package org.archspan.figure;
 
 import java.awt.BasicStroke;
-import java.awt.Color;
 import java.awt.Graphics2D;
 import java.awt.Paint;
 import java.awt.geom.Rectangle2D;
@@ -48,13 +47,8 @@ public final class DriverFigure implements Figure {
   }
 
   @Override
-  public double width() {
-    return 0.85 * FigureStyle.PAGE;
-  }
-
-  @Override
-  public double height() {
-    return ROW * (bars.size() + 1) + 42.0;
+  public Page page() {
+    return new Page(0.85 * FigureStyle.PAGE, ROW * (bars.size() + 1) + 42.0, style.background());
   }
 
   @Override
@@ -62,11 +56,6 @@ public final class DriverFigure implements Figure {
     StringBuilder words = new StringBuilder("Terms of the square of the growth rate:");
     bars.forEach(bar -> words.append(String.format(Locale.ROOT, " %s %+.3f;", bar.name(), bar.share())));
     return words + " sum 1";
-  }
-
-  @Override
-  public Color background() {
-    return style.background();
   }
 
   @Override

@@ -46,24 +46,14 @@ public final class EnsembleFigure implements Figure {
   }
 
   @Override
-  public double width() {
-    return driven() ? FigureStyle.PAGE : 0.68 * FigureStyle.PAGE;
-  }
-
-  @Override
-  public double height() {
-    return 0.36 * FigureStyle.PAGE;
+  public Page page() {
+    return new Page(driven() ? FigureStyle.PAGE : 0.68 * FigureStyle.PAGE, 0.36 * FigureStyle.PAGE, style.background());
   }
 
   @Override
   public String description() {
     return "Histogram of the wavelength with its median and its range of 68 per cent, the joint distribution of"
         + " wavelength and growth time, and the Sobol' indices of the inputs";
-  }
-
-  @Override
-  public Color background() {
-    return style.background();
   }
 
   @Override

@@ -36,24 +36,14 @@ public final class EquilibriumFigure implements Figure {
   }
 
   @Override
-  public double width() {
-    return FigureStyle.COLUMN;
-  }
-
-  @Override
-  public double height() {
-    return 1.45 * FigureStyle.COLUMN;
+  public Page page() {
+    return new Page(FigureStyle.COLUMN, 1.45 * FigureStyle.COLUMN, style.background());
   }
 
   @Override
   public String description() {
     return "Base state against height: density and pressures relative to their values at the lower end, field strength"
         + " and Alfven speed, gravity";
-  }
-
-  @Override
-  public java.awt.Color background() {
-    return style.background();
   }
 
   @Override

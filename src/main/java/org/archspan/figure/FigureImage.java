@@ -1,5 +1,6 @@
 package org.archspan.figure;
 
+import java.awt.Dimension;
 import java.awt.Graphics2D;
 import java.awt.RenderingHints;
 import java.awt.geom.Rectangle2D;
@@ -40,8 +41,9 @@ public final class FigureImage {
   /** The figure as PNG, its resolution noted in the file. */
   public static byte[] png(Figure figure) {
     double scale = DOTS_PER_INCH / 72.0;
-    BufferedImage image = new BufferedImage((int) Math.round(figure.width() * scale),
-        (int) Math.round(figure.height() * scale), BufferedImage.TYPE_INT_RGB);
+    Page page = figure.page();
+    BufferedImage image = new BufferedImage((int) Math.round(page.width() * scale),
+        (int) Math.round(page.height() * scale), BufferedImage.TYPE_INT_RGB);
     Graphics2D graphics = image.createGraphics();
     graphics.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
     graphics.setRenderingHint(RenderingHints.KEY_TEXT_ANTIALIASING, RenderingHints.VALUE_TEXT_ANTIALIAS_ON);
@@ -49,7 +51,7 @@ public final class FigureImage {
     graphics.setRenderingHint(RenderingHints.KEY_STROKE_CONTROL, RenderingHints.VALUE_STROKE_PURE);
     graphics.setRenderingHint(RenderingHints.KEY_INTERPOLATION, RenderingHints.VALUE_INTERPOLATION_BICUBIC);
     graphics.scale(scale, scale);
-    page(figure, graphics);
+    draw(figure, page, graphics);
     graphics.dispose();
     try {
       return encoded(image);
@@ -59,10 +61,10 @@ public final class FigureImage {
   }
 
   /** The figure on a page of its colour, which reaches to the last, broken dot. */
-  private static void page(Figure figure, Graphics2D graphics) {
-    graphics.setPaint(figure.background());
-    graphics.fill(new Rectangle2D.Double(0.0, 0.0, figure.width() + 1.0, figure.height() + 1.0));
-    figure.draw(graphics, new Rectangle2D.Double(0.0, 0.0, figure.width(), figure.height()));
+  private static void draw(Figure figure, Page page, Graphics2D graphics) {
+    graphics.setPaint(page.colour());
+    graphics.fill(new Rectangle2D.Double(0.0, 0.0, page.width() + 1.0, page.height() + 1.0));
+    figure.draw(graphics, new Rectangle2D.Double(0.0, 0.0, page.width(), page.height()));
   }
 
   private static byte[] encoded(BufferedImage image) throws IOException {
@@ -99,27 +101,27 @@ public final class FigureImage {
     context.setPrecision(4);
     context.setImageHandler(new EmbeddedImages());
     SVGGraphics2D graphics = new SVGGraphics2D(context, false);
-    graphics.setSVGCanvasSize(new java.awt.Dimension((int) Math.ceil(figure.width()), (int) Math.ceil(figure.height())));
-    page(figure, graphics);
+    Page page = figure.page();
+    Dimension size = new Dimension((int) Math.ceil(page.width()), (int) Math.ceil(page.height()));
+    graphics.setSVGCanvasSize(size);
+    draw(figure, page, graphics);
     StringWriter text = new StringWriter();
     try {
       graphics.stream(text, false);
     } catch (IOException impossible) {
       throw new UncheckedIOException("a drawing in memory could not be written", impossible);
     }
-    return withTitle(text.toString(), figure);
+    return withTitle(text.toString(), size, figure.description());
   }
 
   /** Size in points, a view box for scaling, and the description for those who cannot see the figure. */
-  private static String withTitle(String svg, Figure figure) {
-    int width = (int) Math.ceil(figure.width());
-    int height = (int) Math.ceil(figure.height());
+  private static String withTitle(String svg, Dimension size, String description) {
     int start = svg.indexOf("<svg ");
     int end = svg.indexOf('>', start);
     String head = svg.substring(start, end).replaceFirst(" width=\"[^\"]*\"", "").replaceFirst(" height=\"[^\"]*\"", "");
-    String described = figure.description().replace("&", "&amp;").replace("<", "&lt;");
-    return svg.substring(0, start) + head + " role=\"img\" width=\"" + width + "pt\" height=\"" + height
-        + "pt\" viewBox=\"0 0 " + width + " " + height + "\"><title>" + described + "</title>"
+    String described = description.replace("&", "&amp;").replace("<", "&lt;");
+    return svg.substring(0, start) + head + " role=\"img\" width=\"" + size.width + "pt\" height=\"" + size.height
+        + "pt\" viewBox=\"0 0 " + size.width + " " + size.height + "\"><title>" + described + "</title>"
         + svg.substring(end + 1);
   }
 

@@ -66,13 +66,8 @@ public final class GrowthFigure implements Figure {
   }
 
   @Override
-  public double width() {
-    return FigureStyle.COLUMN;
-  }
-
-  @Override
-  public double height() {
-    return 0.86 * FigureStyle.COLUMN;
+  public Page page() {
+    return new Page(FigureStyle.COLUMN, 0.86 * FigureStyle.COLUMN, style.background());
   }
 
   @Override
@@ -80,11 +75,6 @@ public final class GrowthFigure implements Figure {
     StringBuilder words = new StringBuilder("Growth rate against wavelength along the field");
     marks.forEach(mark -> words.append("; ").append(named(mark)));
     return words.toString();
-  }
-
-  @Override
-  public java.awt.Color background() {
-    return style.background();
   }
 
   @Override

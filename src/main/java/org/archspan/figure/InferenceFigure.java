@@ -1,7 +1,6 @@
 package org.archspan.figure;
 
 import java.awt.BasicStroke;
-import java.awt.Color;
 import java.awt.Graphics2D;
 import java.awt.geom.Ellipse2D;
 import java.awt.geom.Rectangle2D;
@@ -39,13 +38,8 @@ public final class InferenceFigure implements Figure {
   }
 
   @Override
-  public double width() {
-    return FigureStyle.PAGE;
-  }
-
-  @Override
-  public double height() {
-    return 0.42 * FigureStyle.PAGE;
+  public Page page() {
+    return new Page(FigureStyle.PAGE, 0.42 * FigureStyle.PAGE, style.background());
   }
 
   @Override
@@ -53,11 +47,6 @@ public final class InferenceFigure implements Figure {
     return "Left: wavelength against " + inference.input().key() + " with all other inputs at their middles, the"
         + " observed spacing with its error, and the values that reproduce it; right: distribution of the input"
         + " before and after";
-  }
-
-  @Override
-  public Color background() {
-    return style.background();
   }
 
   @Override

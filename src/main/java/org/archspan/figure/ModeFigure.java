@@ -45,13 +45,8 @@ public final class ModeFigure implements Figure {
   }
 
   @Override
-  public double width() {
-    return FigureStyle.PAGE;
-  }
-
-  @Override
-  public double height() {
-    return 0.42 * FigureStyle.PAGE;
+  public Page page() {
+    return new Page(FigureStyle.PAGE, 0.42 * FigureStyle.PAGE, style.background());
   }
 
   @Override
@@ -65,11 +60,6 @@ public final class ModeFigure implements Figure {
         + " open); beside it displacement amplitudes and kinetic energy against height",
         mode.parity().name().toLowerCase(Locale.ROOT), mode.order(), Plots.short3(units.length(wavelength())),
         units.length(), Plots.short3(units.length(drawn() * greatest)), units.length());
-  }
-
-  @Override
-  public java.awt.Color background() {
-    return style.background();
   }
 
   @Override

@@ -48,24 +48,14 @@ public final class ObservationFigure implements Figure {
   }
 
   @Override
-  public double width() {
-    return FigureStyle.PAGE;
-  }
-
-  @Override
-  public double height() {
-    return MAP * FigureStyle.PAGE - MARGINS;
+  public Page page() {
+    return new Page(FigureStyle.PAGE, MAP * FigureStyle.PAGE - MARGINS, style.background());
   }
 
   @Override
   public String description() {
     return "Left: complexes in the plane of the disk with the fitted arm, strays open. Right: places along the arm with"
         + " multiples of the spacing, and the Rayleigh power against wavelength with the levels that chance exceeds";
-  }
-
-  @Override
-  public Color background() {
-    return style.background();
   }
 
   @Override

@@ -62,24 +62,14 @@ public final class PlaneFigure implements Figure {
   }
 
   @Override
-  public double width() {
-    return 1.35 * FigureStyle.COLUMN;
-  }
-
-  @Override
-  public double height() {
-    return 0.92 * FigureStyle.COLUMN;
+  public Page page() {
+    return new Page(1.35 * FigureStyle.COLUMN, 0.92 * FigureStyle.COLUMN, style.background());
   }
 
   @Override
   public String description() {
     return "Growth rate over wavenumbers along and across the field as a colour map with contours, its greatest value"
         + " marked; beside it the limit of infinitely short waves across the field";
-  }
-
-  @Override
-  public java.awt.Color background() {
-    return style.background();
   }
 
   @Override

@@ -1,6 +1,5 @@
 package org.archspan.figure;
 
-import java.awt.Color;
 import java.awt.Graphics2D;
 import java.awt.Shape;
 import java.awt.geom.Ellipse2D;
@@ -28,24 +27,14 @@ public final class RivalFigure implements Figure {
   }
 
   @Override
-  public double width() {
-    return FigureStyle.PAGE;
-  }
-
-  @Override
-  public double height() {
-    return 0.5 * FigureStyle.PAGE;
+  public Page page() {
+    return new Page(FigureStyle.PAGE, 0.5 * FigureStyle.PAGE, style.background());
   }
 
   @Override
   public String description() {
     return "E-folding time against wavelength: one mark for each instability of the gas that chooses a wave, and a line"
         + " over the waves that grow; the lower the faster";
-  }
-
-  @Override
-  public Color background() {
-    return style.background();
   }
 
   @Override
